@@ -48,6 +48,8 @@ export interface ChipData extends PartEntry {
   /** Holds for every pin without an entry of its own. */
   readonly pins: PinData;
   readonly pin: Readonly<Record<string, PinData>>;
+  /** Names of the pins that can drive something, as the maker writes them; absent: not listed here. */
+  readonly names?: readonly string[];
   readonly groups: readonly PinGroup[];
   readonly total: { readonly source?: Figure; readonly sink?: Figure };
   readonly draws?: Figure;
@@ -105,6 +107,8 @@ export interface GateData extends PartEntry {
   readonly total?: Figure;
   readonly rising?: Figure;
   readonly falling?: Figure;
+  /** Supply at which `rising` and `falling` hold; at another supply they move in proportion. */
+  readonly thresholdSupply?: Figure;
   readonly draws?: Figure;
 }
 
