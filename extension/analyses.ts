@@ -1,0 +1,63 @@
+/**
+ * One analysis per document version, shared by all features. The core is loaded at the first of our documents
+ * and not before: an editor full of other YAML files never pays for it.
+ */
+import type * as vscode from 'vscode';
+import type { Analysis } from '../core/index';
+import { describe, type Log } from './log';
+
+export type Core = typeof import('../core/index');
+
+interface Kept {
+  readonly version: number;
+  readonly analysis: Analysis;
+}
+
+export class Analyses {
+  private core: Promise<Core> | undefined;
+  private readonly kept = new WeakMap<vscode.TextDocument, Kept>();
+
+  constructor(private readonly log: Log) {}
+
+  get coreLoaded(): boolean {
+    return this.core !== undefined;
+  }
+
+  loadCore(): Promise<Core> {
+    if (this.core === undefined) {
+      const start = performance.now();
+      this.core = import('../core/index');
+      this.core.then(
+        () => this.log.debug(`Core loaded in ${elapsed(start)}.`),
+        (error) => this.log.error(`The core could not be loaded: ${describe(error)}`),
+      );
+    }
+    return this.core;
+  }
+
+  /** The analysis of the document as it stands; nothing when the core itself failed (the log says why). */
+  async of(document: vscode.TextDocument): Promise<Analysis | undefined> {
+    try {
+      const core = await this.loadCore();
+      const kept = this.kept.get(document);
+      if (kept?.version === document.version) return kept.analysis;
+      const start = performance.now();
+      const { version } = document;
+      const analysis = core.analyse(document.getText(), { file: fileName(document.uri) });
+      this.kept.set(document, { version, analysis });
+      this.log.debug(`${fileName(document.uri)}, version ${version}, computed in ${elapsed(start)}.`);
+      return analysis;
+    } catch (error) {
+      this.log.error(`${document.uri.toString()} could not be computed: ${describe(error)}`);
+      return undefined;
+    }
+  }
+}
+
+function fileName(uri: vscode.Uri): string {
+  return uri.path.slice(uri.path.lastIndexOf('/') + 1);
+}
+
+function elapsed(start: number): string {
+  return `${Math.round(performance.now() - start)} ms`;
+}

@@ -1,0 +1,19 @@
+/**
+ * Which documents are ours: `rails.yaml` and `*.rails.yaml`, whose language stays `yaml` so that colouring,
+ * formatting and other YAML helpers keep working on them.
+ */
+import * as vscode from 'vscode';
+
+/** Reading features work in every scheme, history views included. */
+export const selector: vscode.DocumentSelector = { language: 'yaml', pattern: '**/{rails,*.rails}.yaml' };
+
+export function isOurs(document: vscode.TextDocument): boolean {
+  return vscode.languages.match(selector, document) > 0;
+}
+
+/** Only where one can write: the old side of a comparison must not double every problem. */
+export function isJudged(document: vscode.TextDocument): boolean {
+  const { scheme } = document.uri;
+  const writable = scheme === 'untitled' || vscode.workspace.fs.isWritableFileSystem(scheme) === true;
+  return writable && isOurs(document);
+}

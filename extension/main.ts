@@ -1,0 +1,35 @@
+/**
+ * The extension's entry: registers features by file name and returns. Nothing is computed here; the core is
+ * loaded when the first board opens.
+ */
+import * as vscode from 'vscode';
+import { Analyses } from './analyses';
+import { showLogCommand, sizeRailCommand } from './commands/names';
+import { sizeRailHandler } from './commands/size-rail';
+import { registerDiagnostics } from './diagnostics';
+import { selector } from './files';
+import { createLog } from './log';
+import { hoverProvider } from './providers/hover';
+
+/** What other extensions (and the tests) may ask. */
+export interface Api {
+  /** False until a board has been opened in this window. */
+  readonly coreLoaded: () => boolean;
+}
+
+export function activate(context: vscode.ExtensionContext): Api {
+  const log = createLog();
+  const analyses = new Analyses(log);
+  const showLog = () => log.show();
+  context.subscriptions.push(
+    log,
+    registerDiagnostics(analyses),
+    vscode.languages.registerHoverProvider(selector, hoverProvider(analyses)),
+    vscode.commands.registerCommand(
+      sizeRailCommand,
+      sizeRailHandler(analyses, showLog, (line) => log.info(line)),
+    ),
+    vscode.commands.registerCommand(showLogCommand, showLog),
+  );
+  return { coreLoaded: () => analyses.coreLoaded };
+}
