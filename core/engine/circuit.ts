@@ -1,0 +1,135 @@
+/**
+ * A network prepared for solving: nodes renumbered, elements in flat arrays, and for every segment of the
+ * clock period the part of the matrix that does not change.
+ *
+ * Voltages live in one array per stage: unknown nodes first, then the known potentials, so that an element
+ * reads both its terminals the same way.
+ */
+import { Envelope } from './envelope';
+import { leastOhms, type Network, nodeLeak, type Terminal } from './network';
+import { orderNodes } from './ordering';
+
+/** Two-terminal elements of one kind: indices into the voltage array, and the place of their off-diagonal. */
+export interface Branches {
+  readonly count: number;
+  readonly a: Int32Array;
+  readonly b: Int32Array;
+  readonly position: Int32Array;
+}
+
+export interface Circuit {
+  readonly network: Network;
+  /** Unknown nodes; the voltage array holds `nodes + knowns` entries. */
+  readonly nodes: number;
+  readonly knowns: number;
+  readonly segments: number;
+  readonly period: number;
+  /** Place of each node of the network in the voltage array. */
+  readonly place: Int32Array;
+  readonly resistors: Branches;
+  readonly capacitors: Branches;
+  readonly diodes: Branches;
+  readonly loads: Branches;
+  readonly conductance: readonly Float64Array[];
+  readonly farads: Float64Array;
+  readonly esr: Float64Array;
+  readonly saturation: Float64Array;
+  readonly slope: Float64Array;
+  readonly diodeOhms: Float64Array;
+  readonly amps: Float64Array;
+  readonly knee: Float64Array;
+  readonly knownVolts: readonly Float64Array[];
+  readonly base: readonly { readonly matrix: Envelope; readonly rhs: Float64Array }[];
+  readonly work: Envelope;
+}
+
+export function prepare(network: Network): Circuit {
+  const nodes = network.nodeNames.length;
+  const knowns = network.knowns.length;
+  const elements = [network.resistors, network.capacitors, network.diodes, network.loads];
+  const edges = elements
+    .flat()
+    .filter((e) => e.a >= 0 && e.b >= 0)
+    .map((e) => [e.a, e.b] as const);
+  const place = orderNodes(nodes, edges);
+  const first = Int32Array.from({ length: nodes }, (_, i) => i);
+  for (const [a, b] of edges) {
+    const low = Math.min(place[a]!, place[b]!);
+    const high = Math.max(place[a]!, place[b]!);
+    first[high] = Math.min(first[high]!, low);
+  }
+  const work = new Envelope(first);
+  const index = (t: Terminal) => (t >= 0 ? place[t]! : nodes + ~t);
+  const branches = (list: readonly { a: Terminal; b: Terminal }[]): Branches => {
+    const a = Int32Array.from(list, (e) => index(e.a));
+    const b = Int32Array.from(list, (e) => index(e.b));
+    const position = Int32Array.from(list, (e) =>
+      e.a >= 0 && e.b >= 0 && e.a !== e.b ? work.position(place[e.a]!, place[e.b]!) : -1,
+    );
+    return { count: list.length, a, b, position };
+  };
+  const resistors = branches(network.resistors);
+  const conductance = network.segments.map((_, s) =>
+    Float64Array.from(network.resistors, (r) => 1 / Math.max(r.ohms[s]!, leastOhms)),
+  );
+  const knownVolts = network.segments.map((_, s) => Float64Array.from(network.knowns, (k) => k.volts[s]!));
+  const base = network.segments.map((_, s) => {
+    const matrix = new Envelope(first);
+    const rhs = new Float64Array(nodes);
+    matrix.diagonal.fill(nodeLeak);
+    for (let r = 0; r < resistors.count; r++)
+      stamp(matrix, rhs, resistors, r, conductance[s]![r]!, 0, nodes, knownVolts[s]!);
+    return { matrix, rhs };
+  });
+  return {
+    network,
+    nodes,
+    knowns,
+    segments: network.segments.length,
+    period: network.segments.reduce((sum, s) => sum + s.duration, 0),
+    place,
+    resistors,
+    capacitors: branches(network.capacitors),
+    diodes: branches(network.diodes),
+    loads: branches(network.loads),
+    conductance,
+    farads: Float64Array.from(network.capacitors, (c) => c.farads),
+    esr: Float64Array.from(network.capacitors, (c) => Math.max(c.ohms, leastOhms)),
+    saturation: Float64Array.from(network.diodes, (d) => d.saturation),
+    slope: Float64Array.from(network.diodes, (d) => d.slope),
+    diodeOhms: Float64Array.from(network.diodes, (d) => Math.max(d.ohms, leastOhms)),
+    amps: Float64Array.from(network.loads, (l) => l.amps),
+    knee: Float64Array.from(network.loads, (l) => l.knee),
+    knownVolts,
+    base,
+    work,
+  };
+}
+
+/** Adds the branch current `i = g * v + offset` (from a to b) to the nodal equations. */
+export function stamp(
+  matrix: Envelope,
+  rhs: Float64Array,
+  branches: Branches,
+  index: number,
+  g: number,
+  offset: number,
+  nodes: number,
+  knownVolts: Float64Array,
+): void {
+  const a = branches.a[index]!;
+  const b = branches.b[index]!;
+  if (a < nodes) {
+    matrix.diagonal[a] = matrix.diagonal[a]! + g;
+    rhs[a] = rhs[a]! - offset + (b >= nodes ? g * knownVolts[b - nodes]! : 0);
+  }
+  if (b < nodes) {
+    matrix.diagonal[b] = matrix.diagonal[b]! + g;
+    rhs[b] = rhs[b]! + offset + (a >= nodes ? g * knownVolts[a - nodes]! : 0);
+  }
+  const position = branches.position[index]!;
+  if (position >= 0) {
+    matrix.lower[position] = matrix.lower[position]! - g;
+    matrix.upper[position] = matrix.upper[position]! - g;
+  }
+}

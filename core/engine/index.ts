@@ -1,0 +1,17 @@
+/**
+ * The circuit engine: a small switched network in, its periodic steady state out. Knows nothing of boards.
+ */
+export type { ElementFigures, KnownFigures, Measures, NodeFigures } from './measure';
+export {
+  type Capacitor,
+  type CurrentLoad,
+  type Diode,
+  type Known,
+  type Network,
+  networkFault,
+  type Resistor,
+  type Segment,
+  type Terminal,
+} from './network';
+export type { Parameter } from './parameter';
+export { type Counts, defaultOptions, type Solved, type SolveOptions, solve, type Unsolved } from './solve';

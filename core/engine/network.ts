@@ -1,0 +1,106 @@
+/**
+ * A small switched network as plain data: what the engine solves. It knows nothing of boards or parts.
+ *
+ * Terminals: `0..nodeNames.length-1` are unknown nodes; `~k` (bitwise not) is the known potential `k`.
+ * Potentials and resistances of switched elements are given per segment of the clock period.
+ */
+
+export type Terminal = number;
+
+export interface Segment {
+  /** Second, above 0. */
+  readonly duration: number;
+}
+
+export interface Known {
+  readonly name: string;
+  /** Volt, one per segment. */
+  readonly volts: readonly number[];
+}
+
+export interface Resistor {
+  readonly name: string;
+  readonly a: Terminal;
+  readonly b: Terminal;
+  /** Ohm, one per segment, above 0: a pin's resistance changes with its level. */
+  readonly ohms: readonly number[];
+}
+
+export interface Capacitor {
+  readonly name: string;
+  readonly a: Terminal;
+  readonly b: Terminal;
+  readonly farads: number;
+  /** Equivalent series resistance; values below 1 mohm are taken as 1 mohm, so that edges stay algebraic. */
+  readonly ohms: number;
+}
+
+/** Shockley diode with series resistance; current flows from `a` (anode) to `b`. */
+export interface Diode {
+  readonly name: string;
+  readonly a: Terminal;
+  readonly b: Terminal;
+  /** Saturation current, A. */
+  readonly saturation: number;
+  /** Ideality times thermal voltage, V. */
+  readonly slope: number;
+  readonly ohms: number;
+}
+
+/**
+ * A current from `a` to `b` that is constant while the voltage is well above `knee`:
+ * `amps * (1 - exp(-v / knee))` for v > 0, `amps * v / knee` below. The concave knee keeps an overloaded
+ * rail from being pulled to voltages that no real load would reach.
+ */
+export interface CurrentLoad {
+  readonly name: string;
+  readonly a: Terminal;
+  readonly b: Terminal;
+  readonly amps: number;
+  /** V, above 0. */
+  readonly knee: number;
+}
+
+export interface Network {
+  /** One clock period, in order. */
+  readonly segments: readonly Segment[];
+  readonly nodeNames: readonly string[];
+  readonly knowns: readonly Known[];
+  readonly resistors: readonly Resistor[];
+  readonly capacitors: readonly Capacitor[];
+  readonly diodes: readonly Diode[];
+  readonly loads: readonly CurrentLoad[];
+}
+
+/** Floor of resistances that must not vanish, ohm. */
+export const leastOhms = 1e-3;
+/** Conductance from every node to zero volt, S: keeps a floating node defined without being seen. */
+export const nodeLeak = 1e-12;
+
+/** The first reason why a network cannot be solved as written, in words; undefined when it is well formed. */
+export function networkFault(network: Network): string | undefined {
+  const segments = network.segments.length;
+  const terminal = (t: number) =>
+    Number.isInteger(t) && (t >= 0 ? t < network.nodeNames.length : ~t < network.knowns.length);
+  if (segments === 0) return 'a clock period has no segments';
+  if (!network.segments.every((s) => s.duration > 0 && Number.isFinite(s.duration)))
+    return 'a segment of the clock period has no length';
+  for (const known of network.knowns)
+    if (known.volts.length !== segments || !known.volts.every(Number.isFinite))
+      return `${known.name}: a potential is missing or not finite`;
+  const groups = [network.resistors, network.capacitors, network.diodes, network.loads];
+  for (const element of groups.flat())
+    if (!terminal(element.a) || !terminal(element.b)) return `${element.name}: a terminal leads nowhere`;
+  for (const r of network.resistors)
+    if (r.ohms.length !== segments || !r.ohms.every((x) => x > 0 && Number.isFinite(x)))
+      return `${r.name}: a resistance must be above 0 ohm`;
+  for (const c of network.capacitors)
+    if (!(c.farads > 0 && Number.isFinite(c.farads)) || !(c.ohms >= 0))
+      return `${c.name}: a capacitance must be above 0 F`;
+  for (const d of network.diodes)
+    if (!(d.saturation > 0 && d.slope > 0 && d.ohms >= 0 && d.saturation * d.slope * d.ohms < Infinity))
+      return `${d.name}: saturation current and slope must be above 0`;
+  for (const l of network.loads)
+    if (!(Number.isFinite(l.amps) && l.knee > 0)) return `${l.name}: a load current must be finite`;
+  return undefined;
+}

@@ -1,0 +1,152 @@
+/**
+ * What the output may be differentiated by. Part values are taken in relative terms (per unit of the
+ * natural logarithm), potentials in volt, the injected current in ampere.
+ */
+import type { Circuit } from './circuit';
+import type { Terminal } from './network';
+import type { Trajectory } from './trajectory';
+
+export type Parameter =
+  | { readonly kind: 'ohms'; readonly index: number /** Only in this segment. */; readonly segment?: number }
+  | { readonly kind: 'volts'; readonly index: number; readonly segment?: number }
+  | {
+      readonly kind: 'farads' | 'esr' | 'saturation' | 'slope' | 'diode-ohms' | 'amps';
+      readonly index: number;
+    }
+  /** A current drawn from `a` and returned to `b`. */
+  | { readonly kind: 'draw'; readonly a: Terminal; readonly b: Terminal };
+
+/** Adds to `target` the right-hand side that a unit change of the parameter makes in stage `s`. */
+export function parameterCurrent(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  parameter: Parameter,
+  target: Float64Array,
+  at: number,
+): void {
+  const { nodes, knowns } = circuit;
+  const v0 = s * (nodes + knowns);
+  const segment = path.segment[s]!;
+  const add = (a: number, b: number, current: number) => {
+    if (a < nodes) target[at + a] = target[at + a]! - current;
+    if (b < nodes) target[at + b] = target[at + b]! + current;
+  };
+  switch (parameter.kind) {
+    case 'ohms': {
+      if (parameter.segment !== undefined && parameter.segment !== segment) return;
+      const { a, b } = circuit.resistors;
+      const k = parameter.index;
+      const across = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
+      return add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * across);
+    }
+    case 'volts': {
+      if (parameter.segment !== undefined && parameter.segment !== segment) return;
+      return knownCurrent(circuit, path, s, nodes + parameter.index, add);
+    }
+    case 'farads':
+    case 'esr': {
+      const k = parameter.index;
+      const { g, current, reach } = capacitorAt(circuit, path, s, k);
+      const factor = parameter.kind === 'farads' ? reach : -circuit.esr[k]!;
+      return add(circuit.capacitors.a[k]!, circuit.capacitors.b[k]!, g * factor * current);
+    }
+    case 'amps': {
+      const { a, b } = circuit.loads;
+      const k = parameter.index;
+      const v = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
+      const knee = circuit.knee[k]!;
+      return add(a[k]!, b[k]!, circuit.amps[k]! * (v > 0 ? -Math.expm1(-v / knee) : v / knee));
+    }
+    case 'draw':
+      return add(
+        parameter.a >= 0 ? circuit.place[parameter.a]! : nodes,
+        parameter.b >= 0 ? circuit.place[parameter.b]! : nodes,
+        1,
+      );
+    default:
+      return add(
+        circuit.diodes.a[parameter.index]!,
+        circuit.diodes.b[parameter.index]!,
+        diodeChange(circuit, path, s, parameter.kind, parameter.index),
+      );
+  }
+}
+
+/** What a unit change of the parameter adds to the capacitor's state beside the change of its current. */
+export function parameterState(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  parameter: Parameter,
+  state: Float64Array,
+  at: number,
+  columns: number,
+  column: number,
+): void {
+  if (parameter.kind !== 'farads' && parameter.kind !== 'esr') return;
+  const k = parameter.index;
+  const { g, current, reach } = capacitorAt(circuit, path, s, k);
+  const index = at + k * columns + column;
+  const shift =
+    parameter.kind === 'farads'
+      ? reach * (g * reach * current - current)
+      : -reach * g * circuit.esr[k]! * current;
+  state[index] = state[index]! + shift;
+}
+
+function capacitorAt(circuit: Circuit, path: Trajectory, s: number, k: number) {
+  const v0 = s * (circuit.nodes + circuit.knowns);
+  const reach = path.reach[s]! / circuit.farads[k]!;
+  const g = 1 / (reach + circuit.esr[k]!);
+  const across = path.volts[v0 + circuit.capacitors.a[k]!]! - path.volts[v0 + circuit.capacitors.b[k]!]!;
+  return { g, reach, current: g * (across - path.origin[s * circuit.capacitors.count + k]!) };
+}
+
+/** Change of the diode's current at fixed voltage per unit of the logarithm of one of its parameters, A. */
+function diodeChange(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  kind: 'saturation' | 'slope' | 'diode-ohms',
+  k: number,
+): number {
+  const saturation = circuit.saturation[k]!;
+  const slope = circuit.slope[k]!;
+  const ohms = circuit.diodeOhms[k]!;
+  const current = Math.max(path.lines.i[s * circuit.diodes.count + k]!, -saturation * (1 - 1e-15));
+  const total = current + saturation;
+  const scale = 1 / (slope + ohms * total);
+  if (kind === 'saturation') return slope * current * scale;
+  if (kind === 'slope') return -total * slope * Math.log1p(current / saturation) * scale;
+  return -ohms * current * total * scale;
+}
+
+/** A rise of a known potential by 1 V pushes the conductance of each element attached to it. */
+function knownCurrent(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  known: number,
+  add: (a: number, b: number, current: number) => void,
+): void {
+  const push = (branches: { a: Int32Array; b: Int32Array }, k: number, g: number) => {
+    if (branches.a[k] === known) add(known, branches.b[k]!, g);
+    else if (branches.b[k] === known) add(branches.a[k]!, known, -g);
+  };
+  const segment = path.segment[s]!;
+  for (let k = 0; k < circuit.resistors.count; k++)
+    push(circuit.resistors, k, circuit.conductance[segment]![k]!);
+  for (let k = 0; k < circuit.capacitors.count; k++)
+    push(circuit.capacitors, k, 1 / (path.reach[s]! / circuit.farads[k]! + circuit.esr[k]!));
+  for (let k = 0; k < circuit.diodes.count; k++)
+    push(circuit.diodes, k, path.lines.g[s * circuit.diodes.count + k]!);
+  for (let k = 0; k < circuit.loads.count; k++) {
+    const v = path.loadVolts[s * circuit.loads.count + k]!;
+    push(
+      circuit.loads,
+      k,
+      (circuit.amps[k]! / circuit.knee[k]!) * (v > 0 ? Math.exp(-v / circuit.knee[k]!) : 1),
+    );
+  }
+}
