@@ -51,54 +51,73 @@ export interface Unsolved {
 /** Energy that may go missing in the integration before a result counts as none. */
 const balanceLimit = 1e-3;
 
+/** Meshes laid for one solution before it is given up. */
+const mostRounds = 8;
+/** Steps in one segment of the first meshes; the last ones may take several times as many. */
+const mostSteps = 400;
+
 /** Never throws; work is bounded. A result whose energy balance is off by 0.1 % or more is `Unsolved`. */
 export function solve(network: Network, options: Partial<SolveOptions> = {}): Solved | Unsolved {
   const settings = { ...defaultOptions, ...options };
   const fault = networkFault(network);
   if (fault !== undefined) return { converged: false, reason: fault };
   const circuit = prepare(network);
-  let reason = 'no iteration settled';
-  for (const tighter of [1, 0.1, 0.01]) {
-    const result = attempt(circuit, settings, settings.tolerance * tighter);
-    if (!result.converged) {
-      reason = result.reason;
-      continue;
-    }
-    if (result.balance < balanceLimit) return result;
-    reason = `energy balance off by ${(100 * result.balance).toPrecision(2)} %`;
-  }
-  return { converged: false, reason };
-}
-
-function attempt(circuit: Circuit, options: SolveOptions, tolerance: number): Solved | Unsolved {
-  const count = circuit.capacitors.count;
-  const start = new Float64Array(count);
-  const first = coarseSolution(circuit, start);
-  if (!first) return { converged: false, reason: 'the coarse period did not settle' };
-  const mesh: MeshSettings = { tolerance, lineError: options.lineError, mostSteps: 400 };
-  let swing = swings(circuit, first.path);
-  let seed = first.path;
+  const start = new Float64Array(circuit.capacitors.count);
+  const coarse = coarseSolution(circuit, start);
+  if (!coarse) return { converged: false, reason: 'the coarse period did not settle' };
+  let seed = coarse.path;
+  let tolerance = settings.tolerance;
+  let reason = 'no mesh was fine enough';
   let fine = 0;
-  for (let meshes = 1; meshes <= 4; meshes++) {
-    const path = fineMesh(circuit, start, swing, seed, mesh);
-    if (!path) return { converged: false, reason: 'a step within the period did not settle' };
-    const result = solvePeriodic(circuit, path, start, options.lineError, 60);
+  for (let round = 1; round <= mostRounds; round++) {
+    const mesh: MeshSettings = {
+      tolerance,
+      lineError: settings.lineError,
+      mostSteps: round > 4 ? 4 * mostSteps : mostSteps,
+    };
+    const laid = layMesh(circuit, start, seed, mesh);
+    if (!laid) return { converged: false, reason: 'a step within the period did not settle' };
+    const { path } = laid;
+    const result = solvePeriodic(circuit, path, start, settings.lineError, 60);
     fine += result.iterations;
     if (!result.converged) return { converged: false, reason: 'the fine period did not settle' };
-    swing = swings(circuit, path);
     seed = path;
-    if (meshError(circuit, path, swing, mesh) > 8 && meshes < 4) continue;
+    if (laid.loosened || meshError(circuit, path, swings(circuit, path), mesh) > 8) continue;
+    const measures = measure(circuit, path);
+    if (measures.balance >= balanceLimit) {
+      reason = `the energy balance stays off by ${(100 * measures.balance).toPrecision(2)} %`;
+      tolerance /= 10;
+      continue;
+    }
     return {
       converged: true,
-      ...measure(circuit, path),
-      derivatives: differentiate(circuit, path, start, options),
-      counts: { coarse: first.iterations, fine, meshes, stages: path.count },
+      ...measures,
+      derivatives: differentiate(circuit, path, start, settings),
+      counts: { coarse: coarse.iterations, fine, meshes: round, stages: path.count },
       start,
       circuit,
       path,
     };
   }
-  return { converged: false, reason: 'no mesh was fine enough' };
+  return { converged: false, reason };
+}
+
+/**
+ * Away from the periodic state the path may be far rougher than it will be in it: a mesh that needs too many
+ * steps is laid with a looser hand, and laid again from the solution it leads to.
+ */
+function layMesh(
+  circuit: Circuit,
+  start: Float64Array,
+  seed: Trajectory,
+  mesh: MeshSettings,
+): { path: Trajectory; loosened: boolean } | undefined {
+  const swing = swings(circuit, seed);
+  for (const factor of [1, 10, 100]) {
+    const path = fineMesh(circuit, start, swing, seed, { ...mesh, tolerance: factor * mesh.tolerance });
+    if (path) return { path, loosened: factor > 1 };
+  }
+  return undefined;
 }
 
 function coarseSolution(
@@ -115,7 +134,7 @@ function coarseSolution(
   return undefined;
 }
 
-/** Voltage by which each capacitor moves within the period, with a floor of a millivolt. */
+/** Voltage by which each capacitor moves within the period, with a floor that no error needs to undercut. */
 function swings(circuit: Circuit, path: Trajectory): Float64Array {
   const count = circuit.capacitors.count;
   const swing = new Float64Array(count);
@@ -128,9 +147,10 @@ function swings(circuit: Circuit, path: Trajectory): Float64Array {
       if (v < low) low = v;
       if (v > high) high = v;
     }
-    swing[k] = Math.max(high - low, 1e-3);
+    swing[k] = high - low;
   }
-  return swing;
+  const floor = Math.max(1e-3, 2e-4 * Math.max(...swing));
+  return swing.map((value) => Math.max(value, floor));
 }
 
 function differentiate(
