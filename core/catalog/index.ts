@@ -8,27 +8,69 @@ import { lithiumCoin } from './batteries/lithium-coin';
 import { c0g, x5r, x7r, y5v } from './capacitors/ceramic';
 import { aluminium, polymer, tantalum } from './capacitors/electrolytic';
 import { film } from './capacitors/film';
+import { atmega32u4 } from './chips/atmega32u4';
 import { atmega328p } from './chips/atmega328p';
+import { atmega2560 } from './chips/atmega2560';
+import { attiny85 } from './chips/attiny85';
+import { atmega4809, attiny1614 } from './chips/attiny1614';
+import { esp32, esp32c3, esp32s3 } from './chips/esp32';
+import { msp430g2553 } from './chips/msp430g2553';
+import { nrf52840 } from './chips/nrf52840';
+import { pic16f1939, pic16f18877, pic18f47k42 } from './chips/pic';
 import { rp2040 } from './chips/rp2040';
 import { rp2350 } from './chips/rp2350';
+import { samd21 } from './chips/samd21';
 import { stm32f103 } from './chips/stm32f103';
+import { stm32f303 } from './chips/stm32f303';
+import { stm32f407 } from './chips/stm32f407';
+import { stm32g071 } from './chips/stm32g071';
+import { stm32l476 } from './chips/stm32l476';
 import { schottky1A20V } from './diodes/schottky-1a-20v';
 import { schottky1A30V } from './diodes/schottky-1a-30v';
 import { schottky1A40V } from './diodes/schottky-1a-40v';
 import { schottkySignal } from './diodes/schottky-signal';
 import { siliconRectifier1A } from './diodes/silicon-rectifier-1a';
 import { siliconSwitching } from './diodes/silicon-switching';
+import { ac, ahc, hc, hcBusDriver, hcSingle, lvc, lvcSingle } from './gates/plain';
+import { hcSchmitt, hcSchmittSingle } from './gates/schmitt';
+import { nmosLogicLevel, nmosSmallSignal, pmosLogicLevel, pmosSmallSignal } from './mosfets/small';
 import type { Catalogue, PartEntry } from './part';
 import { usb2Configured, usb2Unconfigured, usb3, usbC3A, usbC1500mA, usbCDefault } from './standards/usb';
+import { bipolarAstable, cmosAstable } from './timers/astable';
+import { npn500mA, pnp500mA } from './transistors/medium-power';
+import { npnSmallSignal, pnpSmallSignal } from './transistors/small-signal';
 
 export const catalogue: Catalogue = {
-  chips: [atmega328p, rp2040, rp2350, stm32f103],
+  chips: [
+    atmega2560,
+    atmega328p,
+    atmega32u4,
+    atmega4809,
+    attiny1614,
+    attiny85,
+    esp32,
+    esp32c3,
+    esp32s3,
+    msp430g2553,
+    nrf52840,
+    pic16f18877,
+    pic16f1939,
+    pic18f47k42,
+    rp2040,
+    rp2350,
+    samd21,
+    stm32f103,
+    stm32f303,
+    stm32f407,
+    stm32g071,
+    stm32l476,
+  ],
   diodes: [schottky1A20V, schottky1A30V, schottky1A40V, schottkySignal, siliconRectifier1A, siliconSwitching],
   capacitors: [aluminium, c0g, film, polymer, tantalum, x5r, x7r, y5v],
-  transistors: [],
-  mosfets: [],
-  gates: [],
-  timers: [],
+  transistors: [npn500mA, npnSmallSignal, pnp500mA, pnpSmallSignal],
+  mosfets: [nmosLogicLevel, nmosSmallSignal, pmosLogicLevel, pmosSmallSignal],
+  gates: [ac, ahc, hc, hcBusDriver, hcSchmitt, hcSchmittSingle, hcSingle, lvc, lvcSingle],
+  timers: [bipolarAstable, cmosAstable],
   standards: [usb2Configured, usb2Unconfigured, usb3, usbC1500mA, usbC3A, usbCDefault],
   batteries: [alkaline, liIon, lithiumCoin],
 };

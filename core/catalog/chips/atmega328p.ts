@@ -32,12 +32,16 @@ export const atmega328p: ChipData = {
   pin: {},
   names: [...pinRange('PB', 0, 7), ...pinRange('PC', 0, 6), ...pinRange('PD', 0, 7)],
   groups: [
-    { name: 'C0-C5', pins: pinRange('PC', 0, 5), sink: sinkSum },
-    { name: 'B0-B7, D5-D7', pins: [...pinRange('PB', 0, 7), ...pinRange('PD', 5, 7)], sink: sinkSum },
-    { name: 'D0-D4, C6', pins: [...pinRange('PD', 0, 4), 'PC6'], sink: sinkSum },
-    { name: 'C0-C6, D0-D4', pins: [...pinRange('PC', 0, 6), ...pinRange('PD', 0, 4)], source: sourceSum },
+    { name: 'sink C0-C5', pins: pinRange('PC', 0, 5), sink: sinkSum },
+    { name: 'sink B0-B7, D5-D7', pins: [...pinRange('PB', 0, 7), ...pinRange('PD', 5, 7)], sink: sinkSum },
+    { name: 'sink D0-D4, C6', pins: [...pinRange('PD', 0, 4), 'PC6'], sink: sinkSum },
     {
-      name: 'B0-B7, D5-D7 high',
+      name: 'source C0-C6, D0-D4',
+      pins: [...pinRange('PC', 0, 6), ...pinRange('PD', 0, 4)],
+      source: sourceSum,
+    },
+    {
+      name: 'source B0-B7, D5-D7',
       pins: [...pinRange('PB', 0, 7), ...pinRange('PD', 5, 7)],
       source: sourceSum,
     },

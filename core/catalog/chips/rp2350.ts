@@ -34,6 +34,6 @@ export const rp2350: ChipData = {
     15e-3,
     25e-3,
     'A',
-    dataSheet('about 15 mA at 150 MHz in a design note that quotes the data sheet; edges are guesses'),
+    memory('about 15 mA at 150 MHz in a design note that quotes the data sheet; the edges are guesses'),
   ),
 };
