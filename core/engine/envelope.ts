@@ -56,7 +56,7 @@ export class Envelope {
         const sj = start[j]! - fj;
         let l = lower[si + j]!;
         let u = upper[si + j]!;
-        for (let k = fi > fj ? fi : fj; k < j; k++) {
+        for (let k = Math.max(fi, fj); k < j; k++) {
           l -= lower[si + k]! * upper[sj + k]!;
           u -= lower[sj + k]! * upper[si + k]!;
         }

@@ -38,38 +38,44 @@ export function parameterCurrent(
       const { a, b } = circuit.resistors;
       const k = parameter.index;
       const across = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
-      return add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * across);
+      add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * across);
+      return;
     }
     case 'volts': {
       if (parameter.segment !== undefined && parameter.segment !== segment) return;
-      return knownCurrent(circuit, path, s, nodes + parameter.index, add);
+      knownCurrent(circuit, path, s, nodes + parameter.index, add);
+      return;
     }
     case 'farads':
     case 'esr': {
       const k = parameter.index;
       const { g, current, reach } = capacitorAt(circuit, path, s, k);
       const factor = parameter.kind === 'farads' ? reach : -circuit.esr[k]!;
-      return add(circuit.capacitors.a[k]!, circuit.capacitors.b[k]!, g * factor * current);
+      add(circuit.capacitors.a[k]!, circuit.capacitors.b[k]!, g * factor * current);
+      return;
     }
     case 'amps': {
       const { a, b } = circuit.loads;
       const k = parameter.index;
       const v = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
       const knee = circuit.knee[k]!;
-      return add(a[k]!, b[k]!, circuit.amps[k]! * (v > 0 ? -Math.expm1(-v / knee) : v / knee));
+      add(a[k]!, b[k]!, circuit.amps[k]! * (v > 0 ? -Math.expm1(-v / knee) : v / knee));
+      return;
     }
     case 'draw':
-      return add(
+      add(
         parameter.a >= 0 ? circuit.place[parameter.a]! : nodes,
         parameter.b >= 0 ? circuit.place[parameter.b]! : nodes,
         1,
       );
+      return;
     default:
-      return add(
+      add(
         circuit.diodes.a[parameter.index]!,
         circuit.diodes.b[parameter.index]!,
         diodeChange(circuit, path, s, parameter.kind, parameter.index),
       );
+      return;
   }
 }
 

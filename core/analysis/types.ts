@@ -1,0 +1,210 @@
+/**
+ * What is known about a board after reading and computing it once: immutable, and the only thing that checks,
+ * reports and editor features read. `null` stands for "not computed"; the board's findings say why.
+ */
+import type { ChipData, PinData } from '../catalog/part';
+import type { Finding } from '../checks/finding';
+import type { BoardReading } from '../model/build';
+import type { Chip, Clock, Rail, Supply } from '../model/board';
+import type { Band, Figure, Unit } from '../quantity/figure';
+
+/** One quantity of a corner and the end of its band at which it was taken. */
+export interface CornerSetting {
+  /** In the user's words: `flying capacitor`, `ambient`, `mcu.GP15 high resistance`. */
+  readonly label: string;
+  /** Dotted path of the place in the file that the quantity belongs to. */
+  readonly path: string;
+  readonly value: number;
+  readonly unit: Unit;
+  readonly end: 'lowest' | 'highest';
+}
+
+/** The extreme of a result over tolerance and temperature, and the corner that made it. */
+export interface CornerEnd {
+  readonly value: number;
+  /** Most influential first. Empty when nothing has a band. */
+  readonly settings: readonly CornerSetting[];
+}
+
+export interface Drop {
+  readonly in: string;
+  readonly volts: number;
+}
+
+/** Current of one drive of a pump into the pump, A: source positive. */
+export interface DriveFigures {
+  readonly sourceAverage: number;
+  readonly sinkAverage: number;
+  readonly rms: number;
+  readonly peakSource: number;
+  readonly peakSink: number;
+}
+
+export interface CapacitorFigures {
+  /** Key in the report: `v6.flying[0]`, `v6.reservoir`. */
+  readonly key: string;
+  /** Largest voltage across it, magnitude, V. */
+  readonly voltage: number;
+  readonly rmsCurrent: number;
+}
+
+export interface DiodeFigures {
+  /** Key in the report: `v6.diode[0]`. */
+  readonly key: string;
+  readonly reverse: number;
+  readonly average: number;
+  readonly peak: number;
+}
+
+/** A pump at typical values in one mode. Voltages carry the rail's sign. */
+export interface PumpPoint {
+  /** Absent when the board has no modes. */
+  readonly mode?: string;
+  readonly voltage: number;
+  /** Lowest and highest momentary output in the period. */
+  readonly lowest: number;
+  readonly highest: number;
+  readonly ripple: number;
+  /** Average into all loads and the bleeder, magnitude, A. */
+  readonly loadCurrent: number;
+  /** Average that the loads ask for, A: more than `loadCurrent` when the rail stalls. */
+  readonly askedCurrent: number;
+  /** Average out of the input rail, A; 0 when it stands on ground. */
+  readonly inputCurrent: number;
+  /** Power taken from input and drives, W. */
+  readonly powerIn: number;
+  readonly powerOut: number;
+  readonly ideal: number;
+  readonly openCircuit: number;
+  readonly outputResistance: number;
+  readonly drops: readonly Drop[];
+  readonly balance: number;
+  readonly drives: readonly DriveFigures[];
+  readonly capacitors: readonly CapacitorFigures[];
+  readonly diodes: readonly DiodeFigures[];
+  /** Solver effort: iterations and steps. */
+  readonly effort: { readonly iterations: number; readonly steps: number };
+}
+
+/** Closed forms beside the solution: for explanation and as a check. */
+export interface PumpEstimate {
+  readonly ideal: number;
+  /** Slow and fast switching limits of the output resistance and their combination, ohm. */
+  readonly slowLimit: number;
+  readonly fastLimit: number;
+  readonly resistance: number;
+  /** Drop of one diode at the effective current, V. */
+  readonly diodeDrop: number;
+  readonly voltage: number;
+}
+
+export interface PumpResult {
+  /** One for each mode, or a single one. */
+  readonly points: readonly PumpPoint[];
+  /** The point with the largest load. */
+  readonly heaviest: PumpPoint;
+  /** Extremes over modes and corners: `lowest` is the smaller number. */
+  readonly voltage: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
+  readonly ripple: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
+  /** Largest magnitudes at the corners, in the order of `drives`. */
+  readonly estimate: PumpEstimate | null;
+  /** Quantities that move the output, most influential first: change of voltage over the quantity's band, V. */
+  readonly influences: readonly { readonly label: string; readonly path: string; readonly volts: number }[];
+}
+
+export interface RailResult {
+  readonly rail: Rail;
+  readonly voltage: Band | null;
+  readonly ripple: Band | null;
+  readonly current: number | null;
+  readonly inputCurrent: number | null;
+  readonly power: number | null;
+  readonly efficiency: number | null;
+  readonly headroom: number | null;
+  readonly storedEnergy: number | null;
+  /** By mode; empty when the board has no modes. */
+  readonly modes: ReadonlyMap<string, { readonly voltage: number | null; readonly current: number | null }>;
+  readonly pump?: PumpResult;
+  /** One sentence when something is null. */
+  readonly because?: string;
+}
+
+export interface PinResult {
+  /** `mcu.GP15`. */
+  readonly key: string;
+  readonly chip: Chip;
+  readonly name: string;
+  readonly data: PinData;
+  /** Resistances used, ohm. */
+  readonly highResistance: Figure | null;
+  readonly lowResistance: Figure | null;
+  /** Worst mode, typical values. */
+  readonly sourceAverage: number | null;
+  readonly sinkAverage: number | null;
+  readonly rms: number | null;
+  readonly peakSource: number | null;
+  readonly peakSink: number | null;
+  /** The limit that `use` is measured against, and which of the data sheet's limits it is. */
+  readonly limit: Figure | null;
+  readonly limitKind: 'recommended' | 'absolute' | null;
+  readonly use: number | null;
+  /** Rails whose pump this pin drives. */
+  readonly drives: readonly string[];
+}
+
+export interface GroupResult {
+  /** `mcu.port B`. */
+  readonly key: string;
+  readonly chip: Chip;
+  readonly source: number;
+  readonly sink: number;
+  readonly sourceLimit: Figure | null;
+  readonly sinkLimit: Figure | null;
+  readonly use: number | null;
+  readonly pins: readonly string[];
+}
+
+export interface ChipResult {
+  readonly chip: Chip;
+  readonly data: ChipData | null;
+  readonly voltage: Band | null;
+  readonly current: Band | null;
+  /** Sums over its pins in the worst mode, A. */
+  readonly sourceTotal: number;
+  readonly sinkTotal: number;
+  readonly use: number | null;
+}
+
+export interface ClockResult {
+  readonly clock: Clock;
+  readonly frequency: Band | null;
+  readonly duty: Band | null;
+  readonly high: number | null;
+  readonly low: number | null;
+}
+
+export interface SupplyResult {
+  readonly supply: Supply;
+  readonly voltage: Band | null;
+  /** min and max over the modes, typical weighted by their share, A. */
+  readonly current: Band | null;
+  readonly power: number | null;
+  readonly limit: Figure | null;
+  readonly use: number | null;
+}
+
+export interface BoardAnalysis {
+  readonly text: string;
+  readonly file: string;
+  readonly reading: BoardReading;
+  readonly rails: ReadonlyMap<string, RailResult>;
+  readonly pins: ReadonlyMap<string, PinResult>;
+  readonly groups: ReadonlyMap<string, GroupResult>;
+  readonly chips: ReadonlyMap<string, ChipResult>;
+  readonly clocks: ReadonlyMap<string, ClockResult>;
+  readonly supplies: ReadonlyMap<string, SupplyResult>;
+  /** Worst of all pumps. */
+  readonly balance: number | null;
+  /** What the computation itself has to say: missing data, no convergence, figures assumed. */
+  readonly problems: readonly Finding[];
+}
