@@ -187,7 +187,7 @@ export function convert(text: string, contents: unknown): SyntaxTree {
   }
 
   /** A block collection's range runs to the next key's line: it ends with its last visible child instead. */
-  function extent(range: ParsedNode['range'] | undefined, flow: boolean, ends: readonly number[]): Span {
+  function extent(range: readonly number[] | null | undefined, flow: boolean, ends: readonly number[]): Span {
     const whole = rangeOf(range);
     const last = flow ? whole.end : Math.max(whole.start, ...ends.slice(-1));
     return span(whole.start, Math.min(last, text.length));

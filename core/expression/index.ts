@@ -1,0 +1,4 @@
+/**
+ * Expressions in place of quantities.
+ */
+export { evaluateExpression, isExpression, longestExpression } from './evaluate';
