@@ -14,4 +14,12 @@ export {
   type Terminal,
 } from './network';
 export type { Parameter } from './parameter';
-export { type Counts, defaultOptions, type Solved, type SolveOptions, solve, type Unsolved } from './solve';
+export {
+  type Counts,
+  defaultOptions,
+  type PortDerivatives,
+  type Solved,
+  type SolveOptions,
+  solve,
+  type Unsolved,
+} from './solve';

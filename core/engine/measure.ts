@@ -78,7 +78,7 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
         addTo(
           sum,
           path.weight[s]! / period,
-          counts(path, s),
+          isOnCurve(path, s),
           i,
           voltage,
           (across - (stored ? voltage : 0)) * i,
@@ -114,7 +114,7 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
     const sum = newSum();
     for (let s = 0; s < path.count; s++) {
       const v = path.volts[s * width + circuit.place[n]!]!;
-      addTo(sum, path.weight[s]! / period, counts(path, s), 0, v, nodeLeak * v * v);
+      addTo(sum, path.weight[s]! / period, isOnCurve(path, s), 0, v, nodeLeak * v * v);
     }
     losses += sum.loss;
     return { name, average: sum.volts, min: sum.low, max: sum.high };
@@ -137,7 +137,7 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
 }
 
 /** First stages of a step lie off the curve by more than the step's end does: they count only in averages. */
-function counts(path: Trajectory, s: number): boolean {
+export function isOnCurve(path: Trajectory, s: number): boolean {
   return path.last[s] === 1 || path.kind[s] === Step.probe;
 }
 

@@ -4,7 +4,7 @@
  * coarse for the solution found.
  */
 import { type Circuit, prepare } from './circuit';
-import { type Measures, measure } from './measure';
+import { isOnCurve, type Measures, measure } from './measure';
 import { coarseMesh, fineMesh, type MeshSettings, meshError } from './mesh';
 import { type Network, networkFault, type Terminal } from './network';
 import type { Parameter } from './parameter';
@@ -25,6 +25,14 @@ export interface SolveOptions {
 
 export const defaultOptions: SolveOptions = { tolerance: 1e-3, lineError: 1e-6, parameters: [] };
 
+/** Per unit of each parameter, in the order of `parameters`; NaN where they could not be had. */
+export interface PortDerivatives {
+  /** Of the average voltage at `port`, V. */
+  readonly average: readonly number[];
+  /** Of the peak-to-peak voltage at `port`, V. */
+  readonly ripple: readonly number[];
+}
+
 export interface Counts {
   readonly coarse: number;
   readonly fine: number;
@@ -34,8 +42,7 @@ export interface Counts {
 
 export interface Solved extends Measures {
   readonly converged: true;
-  /** d(average voltage at `port`) per unit of each parameter, in the order of `parameters`. */
-  readonly derivatives: readonly number[];
+  readonly derivatives: PortDerivatives;
   readonly counts: Counts;
   /** Capacitor states at the start of the period, V. */
   readonly start: Float64Array;
@@ -158,28 +165,54 @@ function differentiate(
   path: Trajectory,
   start: Float64Array,
   options: SolveOptions,
-): number[] {
+): PortDerivatives {
   const { parameters, port } = options;
-  if (parameters.length === 0 || !port) return [];
+  const none = { average: parameters.map(() => Number.NaN), ripple: parameters.map(() => Number.NaN) };
+  if (parameters.length === 0 || !port) return none;
   const d = derivatives(circuit, path.count, parameters);
-  if (!linearPass(circuit, path, start, d)) return parameters.map(() => Number.NaN);
+  if (!linearPass(circuit, path, start, d)) return none;
   const change = closePeriod(circuit, path, start, d);
-  if (!change) return parameters.map(() => Number.NaN);
+  if (!change) return none;
   const { nodes } = circuit;
   const count = circuit.capacitors.count;
-  const at = (column: number, s: number, terminal: Terminal) =>
-    terminal < 0 ? 0 : d.volts[(s * d.columns + column) * nodes + circuit.place[terminal]!]!;
-  const average = (column: number) => {
-    let sum = 0;
-    for (let s = 0; s < path.count; s++)
-      sum += path.weight[s]! * (at(column, s, port.a) - at(column, s, port.b));
-    return sum / circuit.period;
+  const place = (terminal: Terminal) => (terminal < 0 ? -1 : circuit.place[terminal]!);
+  const a = place(port.a);
+  const b = place(port.b);
+  const at = (column: number, s: number) => {
+    const offset = (s * d.columns + column) * nodes;
+    return (a < 0 ? 0 : d.volts[offset + a]!) - (b < 0 ? 0 : d.volts[offset + b]!);
   };
-  const byState = Array.from({ length: count }, (_, k) => average(k));
-  const width = 1 + parameters.length;
-  return parameters.map((_, p) => {
-    let total = average(count + p);
-    for (let k = 0; k < count; k++) total += byState[k]! * change[k * width + 1 + p]!;
-    return total;
+  const { highest, lowest } = extremes(circuit, path, port);
+  const rows = Array.from({ length: d.columns }, (_, column) => {
+    let sum = 0;
+    for (let s = 0; s < path.count; s++) sum += path.weight[s]! * at(column, s);
+    return { average: sum / circuit.period, ripple: at(column, highest) - at(column, lowest) };
   });
+  const width = 1 + parameters.length;
+  const total = (p: number, key: 'average' | 'ripple') => {
+    let sum = rows[count + p]![key];
+    for (let k = 0; k < count; k++) sum += rows[k]![key] * change[k * width + 1 + p]!;
+    return sum;
+  };
+  return {
+    average: parameters.map((_, p) => total(p, 'average')),
+    ripple: parameters.map((_, p) => total(p, 'ripple')),
+  };
+}
+
+/** Stages at which the voltage at the port is highest and lowest. */
+function extremes(circuit: Circuit, path: Trajectory, port: { a: Terminal; b: Terminal }) {
+  const width = circuit.nodes + circuit.knowns;
+  const index = (t: Terminal) => (t >= 0 ? circuit.place[t]! : circuit.nodes + ~t);
+  const a = index(port.a);
+  const b = index(port.b);
+  const volts = (s: number) => path.volts[s * width + a]! - path.volts[s * width + b]!;
+  let highest = 0;
+  let lowest = 0;
+  for (let s = 0; s < path.count; s++) {
+    if (!isOnCurve(path, s)) continue;
+    if (volts(s) > volts(highest)) highest = s;
+    if (volts(s) < volts(lowest)) lowest = s;
+  }
+  return { highest, lowest };
 }
