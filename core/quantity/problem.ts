@@ -21,6 +21,8 @@ export interface QuantityProblem {
   readonly message: string;
   readonly expected: string;
   readonly actual: string;
+  /** What should stand at the span instead, when that is plain. */
+  readonly meant?: string;
 }
 
 export function quantityField(unit: Unit): QuantityField {
@@ -38,7 +40,9 @@ export function problem(
   span: Span,
   field: QuantityField,
   message: string,
+  meant?: string,
 ): QuantityProblem {
   const actual = text.slice(span.start, span.end);
-  return { code, span, message, expected: expectation(field), actual };
+  const found = { code, span, message, expected: expectation(field), actual };
+  return meant === undefined ? found : { ...found, meant };
 }

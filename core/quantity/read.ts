@@ -61,7 +61,12 @@ export function readQuantity(text: string, field: QuantityField): QuantityReadin
   const value = tolerance ? tolerated(terms[0], tolerance) : ranged(terms);
   const { min, typical, max } = value.band;
   if (![min, typical, max].every(Number.isFinite)) return fail(`\`${text.trim()}\` is too large a number.`);
-  if (min > max || min > typical || typical > max) return fail(disorder(text, terms));
+  if (min > max || min > typical || typical > max) {
+    const turned = terms.length === 2 ? turn(text, terms) : undefined;
+    const cure = turned === undefined ? '' : `: write \`${turned}\``;
+    const message = `The figures of a range go from the lowest to the highest${cure}.`;
+    return { problem: problem('bad-quantity', text, whole, field, message, turned) };
+  }
   return { value };
 }
 
@@ -135,17 +140,12 @@ function wrongUnit(text: string, term: Term, spelling: Spelling, field: Quantity
   return problem('wrong-unit', text, term.unit?.span ?? term.span, field, message);
 }
 
-function disorder(text: string, terms: readonly Term[]): string {
-  const parts = terms.map(({ span: { start, end } }) => text.slice(start, end));
-  const turned = terms.length === 2 ? `: write \`${turn(terms, parts)}\`` : '';
-  return `The figures of a range go from the lowest to the highest${turned}.`;
-}
-
-function turn(terms: readonly Term[], parts: readonly string[]): string {
+/** A range of two with its ends exchanged; a unit given once stays behind the last figure. */
+function turn(text: string, terms: readonly Term[]): string {
+  const [first = '', second = ''] = terms.map(({ span: { start, end } }) => text.slice(start, end));
   const [a, b] = terms;
-  if (a?.unit || !b?.unit) return `${parts[1]}..${parts[0]}`;
-  const tail = (parts[1] ?? '').slice(b.digits.length);
-  return `${b.digits}..${parts[0]}${tail}`;
+  if (a?.unit || !b?.unit) return `${second}..${first}`;
+  return `${second.slice(0, b.digits.length)}..${first}${second.slice(b.digits.length)}`;
 }
 
 function leftover(rest: string, field: QuantityField): string {

@@ -148,5 +148,12 @@ function unknownUnit(
   const cure = meant
     ? `did you mean \`${meant}\`?`
     : `${field.what} is expected, such as \`${field.example}\` (unit ${unitFacts[field.unit].unit}).`;
-  return problem('wrong-unit', text, unitSpan, field, `\`${symbol}\` is not a unit known here: ${cure}`);
+  return problem(
+    'wrong-unit',
+    text,
+    unitSpan,
+    field,
+    `\`${symbol}\` is not a unit known here: ${cure}`,
+    meant,
+  );
 }
