@@ -4,8 +4,8 @@
  */
 import type { ChipData, PinData } from '../catalog/part';
 import type { Finding } from '../checks/finding';
-import type { BoardReading } from '../model/build';
 import type { Chip, Clock, Rail, Supply } from '../model/board';
+import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 
 /** One quantity of a corner and the end of its band at which it was taken. */

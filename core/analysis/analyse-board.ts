@@ -1,0 +1,124 @@
+/**
+ * A board computed once: the only entry from text to numbers. Never throws on what a user writes.
+ */
+import type { Catalogue } from '../catalog/part';
+import type { Finding } from '../checks/finding';
+import type { Board } from '../model/board';
+import { type BoardReading, readBoard } from '../model/build';
+import { weightedModes } from './board-modes';
+import { chipResults, groupResults, overModes } from './chips';
+import { boardCurrents, type Currents } from './currents';
+import { isGap } from './gap';
+import { pinResults } from './pins';
+import { type RailVoltages, railVoltages } from './rail-voltages';
+import { railResults } from './rails';
+import { supplyVoltage } from './supply-voltage';
+import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
+
+/** `file` is only a name for reports; `text` has no byte-order mark. */
+export function analyseBoard(text: string, file: string, catalogue: Catalogue): BoardAnalysis {
+  const reading = readBoard(text, catalogue);
+  return computeBoard(text, file, reading);
+}
+
+export function computeBoard(text: string, file: string, reading: BoardReading): BoardAnalysis {
+  const { board } = reading;
+  const modes = weightedModes(board);
+  const solved = railVoltages(board);
+  const currents = boardCurrents(board, solved);
+  const pins = pinResults(board, solved);
+  const balances = [...solved.pumps.values()].flatMap((pump) => pump.points.map((point) => point.balance));
+  return {
+    text,
+    file,
+    reading,
+    rails: railResults(board, solved, currents, modes),
+    pins,
+    groups: groupResults(board, pins),
+    chips: chipResults(board, solved, pins, currents, modes),
+    clocks: clockResults(board, solved),
+    supplies: supplyResults(board, currents),
+    balance: balances.length > 0 ? Math.max(...balances) : null,
+    problems: [...gapFindings(solved), ...assumedDraws(board)],
+  };
+}
+
+function gapFindings(solved: RailVoltages): Finding[] {
+  const seen = new Set<string>();
+  return [...solved.voltages.values()].flatMap((voltage) => {
+    if (!isGap(voltage) || !voltage.finding) return [];
+    const key = `${voltage.finding.code} ${voltage.finding.at}`;
+    if (seen.has(key)) return [];
+    seen.add(key);
+    return [voltage.finding];
+  });
+}
+
+/** A chip whose own current the file leaves out counts with its catalogue figure, and the report says so. */
+function assumedDraws(board: Board): Finding[] {
+  return [...board.chips.values()].flatMap((chip): Finding[] => {
+    const draws = chip.part?.data?.draws;
+    if (chip.draws.length > 0 || !draws) return [];
+    const milliampere = Number((1000 * draws.typical).toPrecision(3));
+    return [
+      {
+        code: 'assumed',
+        severity: 'information',
+        at: chip.path,
+        span: chip.nameSpan,
+        message:
+          `${chip.name}: its own current is not given; ${milliampere} mA is taken from the catalogue ` +
+          `(${draws.origin.note ?? draws.origin.kind}). Write draws to settle it.`,
+        actual: `${milliampere} mA`,
+        source: draws.origin.kind,
+      },
+    ];
+  });
+}
+
+function clockResults(board: Board, solved: RailVoltages): Map<string, ClockResult> {
+  const results = new Map<string, ClockResult>();
+  for (const clock of board.clocks.values()) {
+    const chip = clock.pin && board.chips.get(clock.pin.chip);
+    const voltage = chip?.rail && solved.voltages.get(chip.rail.name);
+    const known = clock.pin && !clock.timer && !clock.inverseOf;
+    results.set(clock.name, {
+      clock,
+      frequency: known ? (clock.frequency ?? null) : null,
+      duty: known ? (clock.duty ?? null) : null,
+      high: voltage && !isGap(voltage) ? voltage.typical : null,
+      low: voltage && !isGap(voltage) ? 0 : null,
+    });
+  }
+  return results;
+}
+
+function supplyResults(board: Board, currents: Currents): Map<string, SupplyResult> {
+  const modes = weightedModes(board);
+  const results = new Map<string, SupplyResult>();
+  for (const supply of board.supplies.values()) {
+    const rails = [...board.rails.values()].filter(
+      (rail) => rail.origin?.kind === 'supply' && rail.origin.supply.name === supply.name,
+    );
+    const voltage = supplyVoltage(supply);
+    const current = overModes(modes, (mode) => {
+      let sum = 0;
+      for (const rail of rails) {
+        const part = currents.rail(rail.name, mode);
+        if (part === null) return null;
+        sum += part;
+      }
+      return sum;
+    });
+    const limit = supply.current ?? supply.standard?.data?.current ?? supply.battery?.data?.current ?? null;
+    results.set(supply.name, {
+      supply,
+      voltage,
+      current,
+      power: voltage && current ? voltage.typical * current.typical : null,
+      limit,
+      use: current && limit ? current.max / limit.min : null,
+    });
+  }
+  return results;
+}

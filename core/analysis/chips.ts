@@ -1,0 +1,100 @@
+/**
+ * Chips and their pin groups: what all pins together source and sink, and what the chip takes from its rail.
+ */
+import type { Board } from '../model/board';
+import type { Band, Figure } from '../quantity/figure';
+import type { WeightedMode } from './board-modes';
+import type { Currents } from './currents';
+import { isGap } from './gap';
+import type { RailVoltages } from './rail-voltages';
+import type { ChipResult, GroupResult, PinResult } from './types';
+
+export function groupResults(board: Board, pins: ReadonlyMap<string, PinResult>): Map<string, GroupResult> {
+  const results = new Map<string, GroupResult>();
+  for (const chip of board.chips.values()) {
+    for (const group of chip.part?.data?.groups ?? []) {
+      const members = group.pins.flatMap((name) => pins.get(`${chip.name}.${name}`) ?? []);
+      if (members.length === 0) continue;
+      const { source, sink } = sums(members);
+      const key = `${chip.name}.${group.name}`;
+      const sourceLimit = group.source ?? null;
+      const sinkLimit = group.sink ?? null;
+      const use = share(source, sink, sourceLimit, sinkLimit);
+      results.set(key, {
+        key,
+        chip,
+        source,
+        sink,
+        sourceLimit,
+        sinkLimit,
+        use,
+        pins: members.map((pin) => pin.name),
+      });
+    }
+  }
+  return results;
+}
+
+export function chipResults(
+  board: Board,
+  solved: RailVoltages,
+  pins: ReadonlyMap<string, PinResult>,
+  currents: Currents,
+  modes: readonly WeightedMode[],
+): Map<string, ChipResult> {
+  const results = new Map<string, ChipResult>();
+  for (const chip of board.chips.values()) {
+    const own = [...pins.values()].filter((pin) => pin.chip === chip);
+    const { source, sink } = sums(own);
+    const data = chip.part?.data ?? null;
+    const rail = chip.rail && solved.voltages.get(chip.rail.name);
+    results.set(chip.name, {
+      chip,
+      data,
+      voltage: rail && !isGap(rail) ? rail : null,
+      current: overModes(modes, (mode) => currents.chip(chip, mode)),
+      sourceTotal: source,
+      sinkTotal: sink,
+      use: data ? share(source, sink, data.total.source ?? null, data.total.sink ?? null) : null,
+    });
+  }
+  return results;
+}
+
+/** Lowest and highest over the modes, and the average weighted by their share; null when one is not known. */
+export function overModes(
+  modes: readonly WeightedMode[],
+  value: (mode: string | undefined) => number | null,
+): Band | null {
+  let typical = 0;
+  let min = Number.POSITIVE_INFINITY;
+  let max = Number.NEGATIVE_INFINITY;
+  for (const { name, share: weight } of modes) {
+    const current = value(name);
+    if (current === null) return null;
+    typical += weight * current;
+    min = Math.min(min, current);
+    max = Math.max(max, current);
+  }
+  return { min, typical, max };
+}
+
+function sums(pins: readonly PinResult[]): { source: number; sink: number } {
+  return {
+    source: pins.reduce((sum, pin) => sum + (pin.sourceAverage ?? 0), 0),
+    sink: pins.reduce((sum, pin) => sum + (pin.sinkAverage ?? 0), 0),
+  };
+}
+
+function share(
+  source: number,
+  sink: number,
+  sourceLimit: Figure | null,
+  sinkLimit: Figure | null,
+): number | null {
+  const shares = [
+    ...(sourceLimit ? [source / sourceLimit.typical] : []),
+    ...(sinkLimit ? [sink / sinkLimit.typical] : []),
+  ];
+  return shares.length > 0 ? Math.max(...shares) : null;
+}

@@ -1,0 +1,103 @@
+/**
+ * Average currents up the tree of rails, mode by mode: what loads, chips, regulators and pumps take from each rail.
+ * Typical values; loads that are resistances see the rail's typical voltage.
+ */
+import type { Board, Chip, Rail } from '../model/board';
+import { activeIn } from './board-modes';
+import { isGap } from './gap';
+import { pumpDrives } from './pump-drive';
+import type { RailVoltages } from './rail-voltages';
+
+export interface Currents {
+  /** Into the rail's own loads and bleeder, A; null when the rail has no voltage to tell. */
+  loads(rail: Rail, mode: string | undefined): number | null;
+  /** Out of the rail in all, A; null when a part of it is not known. */
+  rail(name: string, mode: string | undefined): number | null;
+  /** What a chip takes from its rail, its pins included, A. */
+  chip(chip: Chip, mode: string | undefined): number | null;
+}
+
+export function boardCurrents(board: Board, solved: RailVoltages): Currents {
+  const memo = new Map<string, number | null>();
+  const open = new Set<string>();
+
+  const point = (rail: Rail, mode: string | undefined) =>
+    solved.pumps.get(rail.name)?.points.find((p) => p.mode === mode);
+
+  const loads = (rail: Rail, mode: string | undefined): number | null => {
+    if (rail.origin?.kind === 'pump') return point(rail, mode)?.loadCurrent ?? null;
+    const voltage = solved.voltages.get(rail.name);
+    let sum = 0;
+    const resistors = [...rail.loads.values()]
+      .filter((load) => activeIn(mode, load.modes))
+      .flatMap((load) => {
+        sum += Math.abs(load.current?.typical ?? 0);
+        return load.resistance ? [load.resistance.typical] : [];
+      });
+    if (rail.bleeder) resistors.push(rail.bleeder.typical);
+    if (resistors.length === 0) return sum;
+    if (!voltage || isGap(voltage)) return null;
+    for (const ohms of resistors) sum += Math.abs(voltage.typical) / ohms;
+    return sum;
+  };
+
+  /** Pumps that the chip's pins drive take their charge from the chip's rail. */
+  const drive = (chip: Chip, mode: string | undefined): number | null => {
+    let sum = 0;
+    for (const rail of board.rails.values()) {
+      if (rail.origin?.kind !== 'pump') continue;
+      const drives = pumpDrives(board, rail, rail.origin.pump);
+      if (isGap(drives)) continue;
+      const at = point(rail, mode);
+      for (const [k, d] of drives.entries()) {
+        if (d.chip !== chip) continue;
+        if (!at) return null;
+        sum += at.drives[k]?.sourceAverage ?? 0;
+      }
+    }
+    return sum;
+  };
+
+  const chip = (item: Chip, mode: string | undefined): number | null => {
+    const driven = drive(item, mode);
+    if (driven === null) return null;
+    const fallback = item.draws.length === 0 ? (item.part?.data?.draws?.typical ?? 0) : 0;
+    const own = item.draws
+      .filter((draw) => activeIn(mode, draw.mode && [draw.mode]))
+      .reduce((sum, draw) => sum + draw.current.typical, fallback);
+    const pins = [...item.pins.values()].reduce((sum, pin) => sum + (pin.sources?.typical ?? 0), 0);
+    return own + pins + driven;
+  };
+
+  const consumers = (name: string, mode: string | undefined): (number | null)[] => {
+    const list: (number | null)[] = [];
+    for (const item of board.chips.values()) if (item.rail?.name === name) list.push(chip(item, mode));
+    for (const other of board.rails.values()) {
+      const { origin } = other;
+      if (origin?.kind === 'regulator' && origin.regulator.from?.name === name) {
+        const out = rail(other.name, mode);
+        list.push(out === null ? null : out + (origin.regulator.ground?.typical ?? 0));
+      }
+      if (origin?.kind === 'filter' && origin.filter.from?.name === name) list.push(rail(other.name, mode));
+      if (origin?.kind === 'pump' && origin.pump.input?.name === name)
+        list.push(point(other, mode)?.inputCurrent ?? null);
+    }
+    return list;
+  };
+
+  const rail = (name: string, mode: string | undefined): number | null => {
+    const key = `${name}\n${mode ?? ''}`;
+    const known = memo.get(key);
+    if (known !== undefined) return known;
+    const item = board.rails.get(name);
+    if (!item || open.has(name)) return null;
+    open.add(name);
+    let sum: number | null = loads(item, mode);
+    for (const part of consumers(name, mode)) sum = sum === null || part === null ? null : sum + part;
+    open.delete(name);
+    memo.set(key, sum);
+    return sum;
+  };
+
+  return { loads, rail, chip };
+}

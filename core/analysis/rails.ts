@@ -1,0 +1,117 @@
+/**
+ * Everything about each rail, put together from its voltage, its pump and its currents.
+ */
+import type { Board, Rail } from '../model/board';
+import type { Band } from '../quantity/figure';
+import type { WeightedMode } from './board-modes';
+import { overModes } from './chips';
+import type { Currents } from './currents';
+import { isGap } from './gap';
+import type { RailVoltages } from './rail-voltages';
+import type { PumpResult, RailResult } from './types';
+
+export function railResults(
+  board: Board,
+  solved: RailVoltages,
+  currents: Currents,
+  modes: readonly WeightedMode[],
+): Map<string, RailResult> {
+  const results = new Map<string, RailResult>();
+  for (const rail of board.rails.values()) results.set(rail.name, railResult(rail, solved, currents, modes));
+  return results;
+}
+
+function railResult(
+  rail: Rail,
+  solved: RailVoltages,
+  currents: Currents,
+  modes: readonly WeightedMode[],
+): RailResult {
+  const found = solved.voltages.get(rail.name);
+  const voltage: Band | null = found && !isGap(found) ? found : null;
+  const pump = solved.pumps.get(rail.name);
+  const at = (mode: string | undefined) => pump?.points.find((point) => point.mode === mode);
+  // What a pump's output feeds are its own loads; any other rail also carries the rails and chips below it.
+  const current = overModes(modes, (mode) =>
+    pump ? (at(mode)?.loadCurrent ?? null) : currents.rail(rail.name, mode),
+  );
+  const average = (value: (mode: string | undefined) => number | undefined) =>
+    overModes(modes, (mode) => value(mode) ?? null)?.typical ?? null;
+  const powerIn = pump ? average((mode) => at(mode)?.powerIn) : null;
+  const powerOut = pump
+    ? average((mode) => at(mode)?.powerOut)
+    : voltage && current
+      ? Math.abs(voltage.typical) * current.typical
+      : null;
+  const stated = modes.filter((mode) => mode.name !== undefined);
+  return {
+    rail,
+    voltage,
+    ripple: pump ? rippleBand(pump) : null,
+    current: current?.typical ?? null,
+    inputCurrent: pump ? average((mode) => at(mode)?.inputCurrent) : inputCurrent(rail, currents, modes),
+    power: powerOut,
+    efficiency: powerIn !== null && powerOut !== null && powerIn > 0 ? powerOut / powerIn : null,
+    headroom: voltage ? headroom(rail, voltage) : null,
+    storedEnergy: pump ? storedEnergy(rail, pump) : null,
+    modes: new Map(
+      stated.map((mode) => [
+        mode.name!,
+        {
+          voltage: pump ? (at(mode.name)?.voltage ?? null) : (voltage?.typical ?? null),
+          current: pump ? (at(mode.name)?.loadCurrent ?? null) : currents.rail(rail.name, mode.name),
+        },
+      ]),
+    ),
+    ...(pump ? { pump } : {}),
+    ...(found && isGap(found) ? { because: found.because } : {}),
+  };
+}
+
+/** A linear regulator takes what it gives and its own ground current. */
+function inputCurrent(rail: Rail, currents: Currents, modes: readonly WeightedMode[]): number | null {
+  if (rail.origin?.kind !== 'regulator') return null;
+  const out = overModes(modes, (mode) => currents.rail(rail.name, mode));
+  return out && out.typical + (rail.origin.regulator.ground?.typical ?? 0);
+}
+
+function rippleBand(pump: PumpResult): Band {
+  return {
+    min: pump.ripple.lowest.value,
+    typical: pump.heaviest.ripple,
+    max: pump.ripple.highest.value,
+  };
+}
+
+/**
+ * Volts between the weakest corner and the edge of the window it must not fall below, in magnitude: for a negative
+ * rail the edge nearer to zero.
+ */
+function headroom(rail: Rail, voltage: Band): number | null {
+  const window = rail.needs?.voltage;
+  if (!window) return null;
+  return window.max <= 0 ? window.max - voltage.max : voltage.min - window.min;
+}
+
+/** J, all capacitors of the pump at their largest voltage. */
+function storedEnergy(rail: Rail, pump: PumpResult): number | null {
+  if (rail.origin?.kind !== 'pump') return null;
+  const { flying, smoothing, reservoir } = rail.origin.pump;
+  const farads = new Map<string, number>();
+  for (const [name, list] of [
+    ['flying', flying],
+    ['smoothing', smoothing.length > 0 ? smoothing : flying],
+  ] as const)
+    for (let k = 0; k < 10; k++) {
+      const capacitor = list.length === 1 ? list[0] : list[k];
+      if (capacitor?.value) farads.set(`${rail.name}.${name}[${k}]`, capacitor.value.typical);
+    }
+  if (reservoir?.value) farads.set(`${rail.name}.reservoir`, reservoir.value.typical);
+  let sum = 0;
+  for (const capacitor of pump.heaviest.capacitors) {
+    const value = farads.get(capacitor.key);
+    if (value === undefined) return null;
+    sum += (value * capacitor.voltage ** 2) / 2;
+  }
+  return sum;
+}

@@ -1,0 +1,27 @@
+/**
+ * Phrases about computed results that checks and cards share, so that a number is never worded in two ways.
+ */
+import { formatQuantity } from '../quantity/write';
+import type { CornerEnd, CornerSetting } from './types';
+
+/** `lowest ambient (-20 degC), highest mcu.GP15 high resistance (75 ohm)`; empty when nothing has a band. */
+export function cornerWords(end: CornerEnd, most = 3): string {
+  const shown = end.settings.slice(0, most).map(settingWords);
+  const left = end.settings.length - shown.length;
+  return left > 0 ? `${shown.join(', ')} and ${left} more` : shown.join(', ');
+}
+
+export function settingWords({ label, value, unit, end }: CornerSetting): string {
+  return `${end} ${label} (${formatQuantity(value, unit)})`;
+}
+
+/** A small difference of voltages, written so that it never reads as zero: `82 mV`, `0.37 V`. */
+export function volts(difference: number): string {
+  const size = Math.abs(difference);
+  return size >= 0.1 && size < 1 ? `${Number(size.toFixed(2))} V` : formatQuantity(size, 'V', 2);
+}
+
+/** ` in mode active`, or nothing on a board without modes. */
+export function inMode(mode: string | undefined): string {
+  return mode === undefined ? '' : ` in mode ${mode}`;
+}
