@@ -8,7 +8,7 @@ export const combiningExponent = 2.54;
  *
  * Both in ohm, 0 or more. Out of range: undefined. An estimate only: seeds and explanations, never a reported rail.
  * Source: rule of Seeman and Sanders with p = 2; the exponent is a published fit (from memory: confirm), its error
- * was measured here against the exact form. Worked: 100 and 80 ohm give 119.6 ohm, exact 124.0 ohm for unequal phases.
+ * was measured here against the exact form. Worked: 100 and 80 ohm give 119.4 ohm, where two unequal phases make 124.0 ohm.
  */
 export function combinedResistance(slowOhm: number, fastOhm: number): number | undefined {
   if (!(slowOhm >= 0 && fastOhm >= 0) || !Number.isFinite(slowOhm + fastOhm)) return undefined;

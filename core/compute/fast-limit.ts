@@ -4,6 +4,8 @@ import { type PumpTopology, stageCount } from './pump-topology';
 export interface FastLimitInput {
   readonly topology: PumpTopology;
   readonly stages: number;
+  /** -1 for a chain that pumps down: it delivers while its last clock is low. An inverter always does. */
+  readonly sign: 1 | -1;
   /** Share of the period in which the pump delivers into its output, between 0 and 1, both excluded. */
   readonly deliverShare: number;
   /** Resistance of the driver while it is high and while it is low, ohm. */
@@ -27,18 +29,14 @@ export interface FastLimitInput {
 export function fastLimit(input: FastLimitInput): number | undefined {
   const n = stageCount(input.topology, input.stages);
   if (n === undefined || !isFastLimit(input)) return undefined;
-  switch (input.topology) {
-    case 'ladder':
-      return ladder(input, n);
-    // An inverter recharges while its clock is high and delivers while it is low.
-    case 'inverter':
-      return chain({ ...input, driverHighOhm: input.driverLowOhm, driverLowOhm: input.driverHighOhm }, n);
-    default:
-      return chain(input, n);
-  }
+  const down = input.topology === 'inverter' || input.sign === -1;
+  const delivering = down
+    ? { ...input, driverHighOhm: input.driverLowOhm, driverLowOhm: input.driverHighOhm }
+    : input;
+  return input.topology === 'ladder' ? ladder(delivering, n) : chain(delivering, n);
 }
 
-/** Flying capacitors on two antiphase drivers; with one capacitor only one of them is there. */
+/** Flying capacitors on two antiphase drivers (with one capacitor only one is there), "high" read as "delivering". */
 function chain(input: FastLimitInput, n: number): number {
   const { deliverShare: deliver, driverHighOhm: high, driverLowOhm: low } = input;
   const recharge = 1 - deliver;

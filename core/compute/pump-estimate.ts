@@ -12,7 +12,6 @@ import { type SlowLimitInput, slowLimit } from './slow-limit';
 export interface PumpEstimateInput extends SlowLimitInput, FastLimitInput {
   readonly inputV: number;
   readonly swingV: number;
-  readonly sign: 1 | -1;
   /** Average load current, A, 0 or more. */
   readonly outputA: number;
   readonly diodeSaturationA: number;
