@@ -22,14 +22,20 @@ export interface CardLink {
   readonly target: string;
 }
 
+/**
+ * The editor shows about ten lines before it scrolls, so the answer and the link come first and close together,
+ * and the origins last.
+ */
 export function cardMarkdown(card: Card, theme: Theme, link: CardLink | undefined): string {
-  const parts = [
+  const title = [
     escapeMarkdown(card.title),
-    `${marks[card.state]} **${escapeMarkdown(card.answer)}**`,
+    link === undefined ? '' : `[${escapeMarkdown(link.label)}](${link.target})`,
+  ];
+  const parts = [
+    `${title.filter((part) => part !== '').join(' &ensp; ')}  \n${marks[card.state]} **${escapeMarkdown(card.answer)}**`,
     table(card.head, card.rows),
     picture(card, theme),
     card.origins.map((origin) => `*${escapeMarkdown(origin)}*`).join('  \n'),
-    link === undefined ? '' : `[${escapeMarkdown(link.label)}](${link.target})`,
   ];
   return parts.filter((part) => part !== '').join('\n\n');
 }
@@ -65,7 +71,7 @@ function table(head: readonly string[], rows: readonly (readonly string[])[]): s
   const columns = Math.max(head.length, ...rows.map((row) => row.length));
   if (rows.length === 0 || columns === 0) return '';
   const line = (cells: readonly string[]) =>
-    `| ${Array.from({ length: columns }, (_, column) => escapeMarkdown(cells[column] ?? '')).join(' | ')} |`;
+    `| ${Array.from({ length: columns }, (_, column) => escapeMarkdown(cells[column] ?? '')).join('&ensp; | ')} |`;
   const rule = `|${' :-- |'.repeat(columns)}`;
   return [line(head), rule, ...rows.map(line)].join('\n');
 }

@@ -1,0 +1,17 @@
+/**
+ * Entry of the tests that run inside the extension host, in the browser workbench and on the desktop alike.
+ * The order matters once: that the core stays unloaded can be seen only before the first board opens.
+ */
+import { runTests } from './runner';
+import { activationTests } from './suites/activation';
+import { diagnosticsTests } from './suites/diagnostics';
+import { hoverTests } from './suites/hover';
+import { sizeRailTests } from './suites/size-rail';
+
+export async function run(): Promise<void> {
+  activationTests();
+  diagnosticsTests();
+  hoverTests();
+  sizeRailTests();
+  await runTests();
+}
