@@ -1,9 +1,10 @@
 /**
  * Finds a Chromium, Chrome or Edge in the usual places of Linux, macOS and Windows. CHROME_PATH wins.
+ * Run by itself it prints the program, and fails when there is none.
  */
 import { accessSync, constants, mkdirSync, rmSync, writeFileSync } from 'node:fs';
 import { delimiter, join } from 'node:path';
-import { editorTests } from './paths.mjs';
+import { editorTests, isStarted } from './paths.mjs';
 
 const commands = [
   'chromium',
@@ -64,4 +65,10 @@ export function freshProfile(name) {
   const preferences = { profile: { cookie_controls_mode: 0, block_third_party_cookies: false } };
   writeFileSync(join(folder, 'Default', 'Preferences'), JSON.stringify(preferences));
   return folder;
+}
+
+if (isStarted(import.meta.url)) {
+  const program = findBrowser();
+  if (program === undefined) process.exitCode = 1;
+  console.log(program ?? browserAdvice);
 }

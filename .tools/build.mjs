@@ -6,9 +6,8 @@ import { spawn } from 'node:child_process';
 import { chmodSync, existsSync, mkdirSync, rmSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { join } from 'node:path';
-import { pathToFileURL } from 'node:url';
 import { build } from 'vite';
-import { dist, root } from './paths.mjs';
+import { dist, isStarted, root } from './paths.mjs';
 
 /**
  * One bundle in one file. `coreFile` names the file beside it that holds the core, which then stays outside.
@@ -108,7 +107,7 @@ export async function buildAll({ types = true } = {}) {
   await withTypes;
 }
 
-if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href) {
+if (isStarted(import.meta.url)) {
   rmSync(dist, { recursive: true, force: true });
   try {
     await buildAll({ types: !process.argv.includes('--no-types') });
