@@ -90,6 +90,11 @@ export function parameterState(
   columns: number,
   column: number,
 ): void {
+  if (parameter.kind === 'volts') {
+    if (parameter.segment === undefined || parameter.segment === path.segment[s])
+      knownState(circuit, path, s, circuit.nodes + parameter.index, state, at, columns, column);
+    return;
+  }
   if (parameter.kind !== 'farads' && parameter.kind !== 'esr') return;
   const k = parameter.index;
   const { g, current, reach } = capacitorAt(circuit, path, s, k);
@@ -99,6 +104,27 @@ export function parameterState(
       ? reach * (g * reach * current - current)
       : -reach * g * circuit.esr[k]! * current;
   state[index] = state[index]! + shift;
+}
+
+/** A capacitor that stands on the potential is pushed along with it. */
+function knownState(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  known: number,
+  state: Float64Array,
+  at: number,
+  columns: number,
+  column: number,
+): void {
+  const { count, a, b } = circuit.capacitors;
+  for (let k = 0; k < count; k++) {
+    const sign = (a[k] === known ? 1 : 0) - (b[k] === known ? 1 : 0);
+    if (sign === 0) continue;
+    const reach = path.reach[s]! / circuit.farads[k]!;
+    const index = at + k * columns + column;
+    state[index] = state[index]! + (sign * reach) / (reach + circuit.esr[k]!);
+  }
 }
 
 function capacitorAt(circuit: Circuit, path: Trajectory, s: number, k: number) {

@@ -1,0 +1,61 @@
+/**
+ * Random pumps over the ranges that the engine must stand: fixed seed, so that a failure can be had again.
+ */
+import type { PumpValues } from '../../core/pump/values';
+
+/** Numbers from 0 to 1 by a 32-bit mixing generator (xorshift and multiply; from memory). */
+export function randomNumbers(seed: number): () => number {
+  let state = seed >>> 0;
+  return () => {
+    state = (state + 0x6d2b79f5) >>> 0;
+    let mixed = state;
+    mixed = Math.imul(mixed ^ (mixed >>> 15), mixed | 1);
+    mixed ^= mixed + Math.imul(mixed ^ (mixed >>> 7), mixed | 61);
+    return ((mixed ^ (mixed >>> 14)) >>> 0) / 2 ** 32;
+  };
+}
+
+/**
+ * 10 Hz to 1 MHz, 1 nF to 1 mF, no load to near short and currents up to what cannot be carried,
+ * saturation currents 1e-14 to 1e-5 A, drives of 5 to 500 ohm, 1 to 6 stages.
+ */
+export function randomPump(random: () => number): PumpValues {
+  const within = (low: number, high: number) => low * (high / low) ** random();
+  const chance = (share: number) => random() < share;
+  const ladder = chance(0.5);
+  const stages = 1 + Math.floor(6 * random());
+  const negative = chance(0.4);
+  const volts = 2 + 13 * random();
+  const ohms = within(5, 500);
+  const drive = { high: volts, low: 0, highOhms: ohms * (0.7 + 0.6 * random()), lowOhms: ohms };
+  const diode = {
+    saturation: within(1e-14, 1e-5),
+    slope: (1 + random()) * 0.0258,
+    ohms: within(0.01, 10),
+  };
+  const capacitor = () => ({ farads: within(1e-9, 1e-3), ohms: within(1e-3, 3) });
+  const one = capacitor();
+  const alike = chance(0.5);
+  const column = Array.from({ length: stages }, () => (alike ? one : capacitor()));
+  const kind = random();
+  return {
+    topology: ladder ? 'ladder' : 'chain',
+    stages,
+    negative,
+    input: negative || chance(0.3) ? 0 : volts,
+    frequency: within(10, 1e6),
+    duty: 0.1 + 0.8 * random(),
+    drives: !ladder && stages > 1 ? [drive, drive] : [drive],
+    series: chance(0.2) ? within(1, 1000) : 0,
+    flying: column,
+    smoothing: ladder ? column : [],
+    ...(ladder && chance(0.5) ? {} : { reservoir: capacitor() }),
+    diodes: Array.from({ length: ladder ? 2 * stages : stages + 1 }, () => diode),
+    loads:
+      kind < 0.4
+        ? [{ name: 'resistor', kind: 'resistance', ohms: within(1, 1e9) }]
+        : kind < 0.9
+          ? [{ name: 'current', kind: 'current', amps: within(1e-7, 1) }]
+          : [],
+  };
+}
