@@ -13,7 +13,15 @@ export interface RailVoltages {
   readonly pumps: ReadonlyMap<string, PumpResult>;
 }
 
+/** All rails of the board. */
 export function railVoltages(board: Board): RailVoltages {
+  const solver = railSolver(board);
+  for (const name of board.rails.keys()) solver.voltage(name);
+  return solver;
+}
+
+/** Rails on demand: asking for one computes it and those that it depends on. */
+export function railSolver(board: Board): RailVoltages & { readonly voltage: RailVoltage } {
   const voltages = new Map<string, Band | Gap>();
   const pumps = new Map<string, PumpResult>();
   const open = new Set<string>();
@@ -54,6 +62,5 @@ export function railVoltages(board: Board): RailVoltages {
       }
     }
   };
-  for (const name of board.rails.keys()) voltage(name);
-  return { voltages, pumps };
+  return { voltages, pumps, voltage };
 }
