@@ -6,6 +6,7 @@
 import { mkdirSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { pathToFileURL } from 'node:url';
 import { browserAdvice, findBrowser, freshProfile } from './browser.mjs';
 import { buildAll, bundle } from './build.mjs';
 import { demo, dist, editorTests, root } from './paths.mjs';
@@ -28,11 +29,14 @@ await installWorkbench();
 
 if (process.argv.includes('--picture')) {
   const { drawPicture } = await import('../test/editor/screen/picture.mjs');
+  const core = await import(pathToFileURL(join(dist, 'core.mjs')).href);
   await withWorkbench({ folder: demo }, ({ open }) =>
     drawPicture({
       program,
       profile: freshProfile('picture'),
-      address: open('rails.yaml'),
+      open,
+      board: join(demo, 'rails.yaml'),
+      core,
       file: join(root, 'media', 'hover.png'),
     }),
   );

@@ -28,7 +28,7 @@ export async function installWorkbench() {
 /**
  * @param {{ folder: string, tests?: string, verbose?: boolean }} options `folder` is mounted as the workspace: it is
  *   read from disk and written in memory only; `tests` is a bundle under the project that the extension host runs
- * @returns {Promise<{ address: string, open: (file: string) => string, stop: () => void }>}
+ * @returns {Promise<{ address: string, open: (file: string, line?: number) => string, stop: () => void }>}
  */
 export async function serveWorkbench({ folder, tests, verbose = false }) {
   const server = fork(
@@ -42,9 +42,18 @@ export async function serveWorkbench({ folder, tests, verbose = false }) {
   });
   return {
     address,
-    /** The page with one file of the folder open in the editor. */
-    open: (file) =>
-      `${address}?payload=${encodeURIComponent(JSON.stringify([['openFile', `vscode-test-web://mount/${file}`]]))}`,
+    /** The page with one file of the folder open in the editor, at a line if one is given. */
+    open: (file, line) => {
+      const place = `vscode-test-web://mount/${file}`;
+      const payload =
+        line === undefined
+          ? [['openFile', place]]
+          : [
+              ['openFile', `${place}:${line}:1`],
+              ['gotoLineMode', 'true'],
+            ];
+      return `${address}?payload=${encodeURIComponent(JSON.stringify(payload))}`;
+    },
     stop: () => {
       if (server.connected) server.disconnect();
     },

@@ -104,9 +104,10 @@ function judgePackage(path: string, target: string): string | undefined {
   return undefined;
 }
 
-/** Nothing for the façade itself, which stands in no room. */
+/** Nothing for the façade itself, which stands in no room. A room's own name means its index. */
 function roomOf(path: string): string | undefined {
-  return /^core\/([^/]+)\//.exec(path)?.[1];
+  const name = /^core\/([^/]+)/.exec(path)?.[1]?.replace(/\.ts$/, '');
+  return name === 'index' ? undefined : name;
 }
 
 function resolve(path: string, target: string): string {
@@ -115,5 +116,6 @@ function resolve(path: string, target: string): string {
     if (part === '..') parts.pop();
     else if (part !== '.') parts.push(part);
   }
-  return parts.join('/').replace(/\.[jt]s$/, '');
+  const resolved = parts.join('/').replace(/\.[jt]s$/, '');
+  return resolved === 'core' ? facade : resolved;
 }

@@ -59,7 +59,7 @@ function visibleLines(page) {
 }
 
 /** The screen rectangle of the first place of a piece of text in the editor. @param {Page} page */
-async function placeOf(page, text) {
+export async function placeOf(page, text) {
   const place = await page.evaluate((wanted) => {
     for (const line of document.querySelectorAll('.part.editor .view-lines .view-line')) {
       const walker = document.createTreeWalker(line, NodeFilter.SHOW_TEXT);
