@@ -1,0 +1,216 @@
+/**
+ * Text to board: the whole language in one call. Never throws; a broken or half-typed text gives whatever can be
+ * read, and findings.
+ */
+import type { Catalogue } from '../catalog/part';
+import type { Finding } from '../checks/finding';
+import { boardShape, conditionsShape, type NameSpace, type Row } from '../format';
+import { type Figure, figure } from '../quantity/figure';
+import { locate, type Place } from '../syntax/locate';
+import type { MapNode, Node, SyntaxIssue } from '../syntax/node';
+import { parseText } from '../syntax/parse';
+import { stripBom } from '../text/bom';
+import { covers, type Span, touches } from '../text/span';
+import type { Board } from './board';
+import type { Context, ReadQuantity, ReadReference } from './context';
+import { report } from './context';
+import { railCycles } from './cycles';
+import { figureOf } from './figures';
+import { readParts } from './parts';
+import { present } from './present';
+import { chipsOf } from './sections/chips';
+import { clocksOf } from './sections/clocks';
+import { driversOf } from './sections/drivers';
+import { railsOf } from './sections/rails';
+import { benchOf, includesOf, waiversOf } from './sections/reality';
+import { modesOf, suppliesOf } from './sections/supplies';
+import { join, openMap, type Slot } from './slot';
+import { refOf } from './words';
+
+export interface BoardReading {
+  /** The text that all spans refer to: without a byte-order mark. */
+  readonly text: string;
+  readonly board: Board;
+  /** What is wrong with the file as a text of the language, by place. */
+  readonly findings: readonly Finding[];
+  /** With the file's own `parts` in it. */
+  readonly catalogue: Catalogue;
+  /** Every quantity that could be read, by place. */
+  readonly quantities: readonly ReadQuantity[];
+  /** Every name that points somewhere, by place. */
+  readonly references: readonly ReadReference[];
+  /** Key path and node at an offset; also on lines that are half typed. */
+  nodeAt(offset: number): Place;
+  quantityAt(offset: number): ReadQuantity | undefined;
+  referenceAt(offset: number): ReadReference | undefined;
+}
+
+export function readBoard(source: string, catalogue: Catalogue): BoardReading {
+  const text = stripBom(source);
+  const { root, issues } = parseText(text);
+  const context: Context = {
+    text,
+    catalogue,
+    names: namesOf(root),
+    partPlaces: new Map(),
+    findings: issues.map((issue) => syntaxFinding(text, root, issue)),
+    quantities: [],
+    references: [],
+    quiet: false,
+    said: new Set(),
+  };
+  const board = boardOf(context, root);
+  const quantities = byPlace(context.quantities);
+  const references = byPlace(context.references);
+  return {
+    text,
+    board: board.board,
+    catalogue: board.catalogue,
+    findings: settle([...context.findings, ...railCycles(board.board)], issues),
+    quantities,
+    references,
+    nodeAt: (offset) => locate(text, root, offset),
+    quantityAt: (offset) => innermost(quantities, offset),
+    referenceAt: (offset) => innermost(references, offset),
+  };
+}
+
+function boardOf(context: Context, root: Node | undefined): { board: Board; catalogue: Catalogue } {
+  const slot: Slot | undefined = root && {
+    context,
+    node: root,
+    row: wholeFile,
+    path: '',
+    span: top(root.span),
+    keySpan: top(root.span),
+  };
+  const fields = slot && openMap(slot, boardShape);
+  if (!fields?.keys.has('rails') && (root === undefined || root.kind === 'map')) {
+    const place = { path: 'rails', span: { start: 0, end: Math.min(1, context.text.length) } };
+    report(
+      context,
+      'missing-key',
+      place,
+      'This file has no `rails` yet: there is nothing to compute. For example `rails: { v5: { supply: port } }`.',
+      {},
+      'warning',
+    );
+  }
+  const own = readParts(context, fields?.at('parts'));
+  // Everything below looks parts up in the catalogue with the file's own entries.
+  const parts = { catalogue: own.catalogue, partPlaces: own.places };
+  const at = (key: keyof typeof boardShape.keys): Slot | undefined => {
+    const found = fields?.at(key);
+    return found && { ...found, context: { ...found.context, ...parts } };
+  };
+  const title = refOf(at('board'));
+  const conditions = at('conditions');
+  const chips = chipsOf(at('chips'));
+  const clocks = clocksOf(at('clocks'), chips);
+  const drivers = driversOf(at('drivers'), chips);
+  reportSharedNames(context, clocks, drivers);
+  return {
+    catalogue: own.catalogue,
+    board: {
+      ...present({ title: title?.name, titleSpan: title?.span }),
+      ambient: ambientOf(conditions),
+      supplies: suppliesOf(at('supplies')),
+      chips,
+      clocks,
+      drivers,
+      rails: railsOf(at('rails')),
+      modes: modesOf(at('modes')),
+      bench: benchOf(at('bench')),
+      waivers: waiversOf(at('waivers')),
+      includes: includesOf(at('include')),
+    },
+  };
+}
+
+const wholeFile: Row = {
+  values: [{ kind: 'map', shape: boardShape }],
+  doc: boardShape.doc,
+  example: '',
+  required: true,
+  computed: true,
+};
+
+/** 25 degC, at which part data hold, where the file says nothing. */
+const usualAmbient = figure(298.15, 'K', { kind: 'assumed', note: '25 degC, as part data' });
+
+function ambientOf(slot: Slot | undefined): Figure {
+  const fields = slot && openMap(slot, conditionsShape);
+  return figureOf(fields?.at('ambient')) ?? usualAmbient;
+}
+
+/** Names of all sections, known before anything is read, so that entries may stand in any order. */
+function namesOf(root: Node | undefined): Context['names'] {
+  const section = (name: NameSpace): ReadonlyMap<string, Span> => {
+    const node = root?.kind === 'map' ? find(root, name) : undefined;
+    if (node?.kind !== 'map') return new Map();
+    return new Map(node.entries.map((entry) => [entry.key.text, entry.key.span]));
+  };
+  return {
+    supplies: section('supplies'),
+    chips: section('chips'),
+    clocks: section('clocks'),
+    drivers: section('drivers'),
+    rails: section('rails'),
+    modes: section('modes'),
+  };
+}
+
+function find(map: MapNode, key: string): Node | undefined {
+  return map.entries.find((entry) => entry.key.text === key)?.value;
+}
+
+/** `drive` names clocks and drivers alike, so that no two of them may share a name. */
+function reportSharedNames(context: Context, clocks: Board['clocks'], drivers: Board['drivers']): void {
+  for (const driver of drivers.values()) {
+    const clock = clocks.get(driver.name);
+    if (!clock) continue;
+    const message = `A clock is called \`${driver.name}\` too: a pump's \`drive\` could mean either. Rename one of them.`;
+    const related = [{ span: clock.nameSpan, message: 'The clock is here.' }];
+    report(context, 'duplicate-name', { path: driver.path, span: driver.nameSpan }, message, { related });
+  }
+}
+
+function syntaxFinding(text: string, root: Node | undefined, issue: SyntaxIssue): Finding {
+  const { kind, span, message, related } = issue;
+  // A second key is not in the tree: the first one has the same path.
+  const { path } = locate(text, root, (related ?? issue).span.start);
+  const base: Finding = {
+    code: kind === 'duplicate-key' ? 'duplicate-name' : 'syntax',
+    severity: kind === 'warning' ? 'warning' : 'error',
+    at: path.reduce<string>(join, ''),
+    span,
+    message,
+  };
+  return related ? { ...base, related: [related] } : base;
+}
+
+/** By place; and where the text itself is broken, nothing is said about what it might mean. */
+function settle(findings: readonly Finding[], issues: readonly SyntaxIssue[]): Finding[] {
+  const broken = issues.filter(({ kind }) => kind === 'broken').map(({ span }) => span);
+  const kept = findings.filter(
+    ({ code, span }) =>
+      code === 'syntax' ||
+      code === 'rail-cycle' ||
+      !broken.some((hole) => covers(hole, span) || covers(span, hole)),
+  );
+  return kept.sort((a, b) => a.span.start - b.span.start || a.span.end - b.span.end);
+}
+
+function byPlace<T extends { readonly span: Span }>(items: readonly T[]): T[] {
+  return [...items].sort((a, b) => a.span.start - b.span.start || a.span.end - b.span.end);
+}
+
+function innermost<T extends { readonly span: Span }>(items: readonly T[], offset: number): T | undefined {
+  const here = items.filter(({ span }) => touches(span, offset));
+  return here.sort((a, b) => a.span.end - a.span.start - (b.span.end - b.span.start))[0];
+}
+
+/** A mark for the whole file: its first character. */
+function top(span: Span): Span {
+  return { start: span.start, end: Math.min(span.end, span.start + 1) };
+}

@@ -1,0 +1,67 @@
+/**
+ * What building a board collects on its way, and what it knows: names of the sections, part data, findings.
+ */
+import type { Catalogue } from '../catalog/part';
+import type { Finding, FindingCode, Severity } from '../checks/finding';
+import type { NameSpace } from '../format';
+import type { Figure } from '../quantity/figure';
+import type { Span } from '../text/span';
+
+/** A quantity of the file: a hover on it shows what it was read as. */
+export interface ReadQuantity {
+  readonly span: Span;
+  /** Dotted path of the key. */
+  readonly path: string;
+  readonly figure: Figure;
+  /** True when it is an `=` expression. */
+  readonly expression: boolean;
+}
+
+/** A name of the file that points to an entry, a part or a finding. */
+export interface ReadReference {
+  readonly span: Span;
+  readonly path: string;
+  readonly to: NameSpace | 'pin' | 'part';
+  readonly name: string;
+  /** Where the entry's name stands; absent for names of the catalogue and unknown ones. */
+  readonly target?: Span;
+}
+
+export interface Context {
+  readonly text: string;
+  /** With the file's own `parts` in it. */
+  readonly catalogue: Catalogue;
+  readonly names: Readonly<Record<NameSpace, ReadonlyMap<string, Span>>>;
+  /** Where the file's own parts have their names, by entry. */
+  readonly partPlaces: ReadonlyMap<unknown, Span>;
+  readonly findings: Finding[];
+  readonly quantities: ReadQuantity[];
+  readonly references: ReadReference[];
+  /** True inside an entry that as a whole is not computed: its keys need no finding of their own. */
+  readonly quiet: boolean;
+  /** What was already said once for the whole file. */
+  readonly said: Set<string>;
+}
+
+export type FindingDetails = Partial<Omit<Finding, 'code' | 'severity' | 'at' | 'span' | 'message'>>;
+
+export function report(
+  context: Context,
+  code: FindingCode,
+  place: { readonly path: string; readonly span: Span },
+  message: string,
+  details: FindingDetails = {},
+  severity: Severity = code === 'assumed' || code === 'not-computed' ? 'information' : 'error',
+): void {
+  context.findings.push({ code, severity, at: place.path, span: place.span, message, ...details });
+}
+
+/** Says that something is read but has no effect on the numbers yet, unless the entry around it said so. */
+export function reportNotComputed(
+  context: Context,
+  place: { readonly path: string; readonly span: Span },
+  subject: string,
+): void {
+  if (context.quiet) return;
+  report(context, 'not-computed', place, `${subject} is read but not computed yet: the numbers ignore it.`);
+}
