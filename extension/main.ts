@@ -10,6 +10,7 @@ import { registerDiagnostics } from './diagnostics';
 import { selector } from './files';
 import { createLog } from './log';
 import { hoverProvider } from './providers/hover';
+import { quickFixKinds, quickFixProvider } from './providers/quick-fix';
 
 /** What other extensions (and the tests) may ask. */
 export interface Api {
@@ -25,6 +26,9 @@ export function activate(context: vscode.ExtensionContext): Api {
     log,
     registerDiagnostics(analyses),
     vscode.languages.registerHoverProvider(selector, hoverProvider(analyses)),
+    vscode.languages.registerCodeActionsProvider(selector, quickFixProvider(analyses), {
+      providedCodeActionKinds: quickFixKinds,
+    }),
     vscode.commands.registerCommand(
       sizeRailCommand,
       sizeRailHandler(analyses, showLog, (line) => log.info(line)),

@@ -6,12 +6,14 @@ import { runTests } from './runner';
 import { activationTests } from './suites/activation';
 import { diagnosticsTests } from './suites/diagnostics';
 import { hoverTests } from './suites/hover';
+import { quickFixTests } from './suites/quick-fix';
 import { sizeRailTests } from './suites/size-rail';
 
 export async function run(): Promise<void> {
   activationTests();
   diagnosticsTests();
   hoverTests();
+  quickFixTests();
   sizeRailTests();
   await runTests();
 }
