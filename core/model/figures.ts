@@ -132,10 +132,9 @@ function subjectOf(slot: Slot): string {
   return `\`${key}\``;
 }
 
-function brokenLimit(
-  { min, typical, max }: Figure,
-  { unit, limits, percent }: QuantityValue,
-): string | undefined {
+function brokenLimit(found: Figure, value: QuantityValue, signed: boolean): string | undefined {
+  const { min, typical, max } = found;
+  const { unit, limits, percent } = value;
   const written = (value: number) => (percent ? formatPercent(value) : formatQuantity(value, unit));
   const { above, least, most, whole }: Limits = limits;
   if (above !== undefined && min <= above)
