@@ -35,6 +35,8 @@ export interface BoardReading {
   readonly findings: readonly Finding[];
   /** With the file's own `parts` in it. */
   readonly catalogue: Catalogue;
+  /** Where the names of the file's own parts stand, by entry of the catalogue. */
+  readonly ownParts: ReadonlyMap<unknown, Span>;
   /** Every quantity that could be read, by place. */
   readonly quantities: readonly ReadQuantity[];
   /** Every name that points somewhere, by place. */
@@ -66,6 +68,7 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
     text,
     board: board.board,
     catalogue: board.catalogue,
+    ownParts: board.ownParts,
     findings: settle([...context.findings, ...railCycles(board.board)], issues),
     quantities,
     references,
@@ -75,7 +78,10 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
   };
 }
 
-function boardOf(context: Context, root: Node | undefined): { board: Board; catalogue: Catalogue } {
+function boardOf(
+  context: Context,
+  root: Node | undefined,
+): { board: Board; catalogue: Catalogue; ownParts: ReadonlyMap<unknown, Span> } {
   const slot: Slot | undefined = root && {
     context,
     node: root,
@@ -111,6 +117,7 @@ function boardOf(context: Context, root: Node | undefined): { board: Board; cata
   reportSharedNames(context, clocks, drivers);
   return {
     catalogue: own.catalogue,
+    ownParts: own.places,
     board: {
       ...present({ title: title?.name, titleSpan: title?.span }),
       ambient: ambientOf(conditions),

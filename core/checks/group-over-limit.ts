@@ -1,0 +1,47 @@
+/**
+ * The pins of one port or supply pin together above what the data sheet allows for that group.
+ */
+import type { GroupResult } from '../analysis/types';
+import type { Figure } from '../quantity/figure';
+import { formatPercent, formatQuantity } from '../quantity/write';
+import type { Check } from './check';
+import type { Finding } from './finding';
+import { originWords } from './pin-current';
+
+export const groupOverLimit: Check = {
+  code: 'group-over-limit',
+  title: 'Port above the sum its pins may carry',
+  severity: 'error',
+  why: 'Pins share bond wires and supply rails inside the chip; each may be within its own limit while their sum is not.',
+  run: (analysis) =>
+    [...analysis.groups.values()].flatMap((group) => [
+      ...judge(group, 'source', group.source, group.sourceLimit),
+      ...judge(group, 'sink', group.sink, group.sinkLimit),
+    ]),
+};
+
+function judge(
+  group: GroupResult,
+  way: 'source' | 'sink',
+  amps: number,
+  limit: Figure | null,
+): readonly Finding[] {
+  if (limit === null || !(amps > limit.min * (1 + 1e-9))) return [];
+  const most = formatQuantity(limit.min, 'A');
+  return [
+    {
+      code: 'group-over-limit',
+      severity: 'error',
+      at: `${group.chip.path}.pins`,
+      span: group.chip.keys.get('pins') ?? group.chip.nameSpan,
+      message: `The pins of ${group.key} together ${way} ${formatQuantity(amps, 'A')}, ${formatPercent(amps / limit.min - 1, 2)} above the ${most} allowed for them. Move a load to a pin of another group, or lighten it.`,
+      expected: `at most ${most}`,
+      actual: formatQuantity(amps, 'A'),
+      source: originWords(limit.origin),
+      related: group.pins.flatMap((name) => {
+        const pin = group.chip.pins.get(name);
+        return pin ? [{ span: pin.nameSpan, message: `${name} belongs to ${group.key}` }] : [];
+      }),
+    },
+  ];
+}

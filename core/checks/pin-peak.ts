@@ -1,0 +1,49 @@
+/**
+ * Peaks of a pin's current above its absolute maximum while its steady current is below: short, once each edge.
+ */
+import type { BoardAnalysis, PinResult } from '../analysis/types';
+import { nextPreferredUp } from '../quantity/preferred';
+import { formatQuantity } from '../quantity/write';
+import type { Check } from './check';
+import type { Finding } from './finding';
+import { originWords, steadyCurrent } from './pin-current';
+import { drivenRails, pinPlace } from './pin-place';
+
+export const pinPeak: Check = {
+  code: 'pin-peak',
+  title: 'Peaks above a pin’s absolute maximum',
+  severity: 'warning',
+  why: 'Most data sheets give one current for a pin and no time for it; peaks at each edge are common practice but nobody promises them.',
+  run: (analysis) => [...analysis.pins.values()].flatMap((pin) => judge(analysis, pin)),
+};
+
+function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
+  const limit = pin.data.absolute;
+  const peak = Math.max(pin.peakSource ?? 0, pin.peakSink ?? 0);
+  if (limit === undefined || !(peak > limit.min * (1 + 1e-9))) return [];
+  const steady = steadyCurrent(pin);
+  if (steady && steady.amps > limit.min * (1 + 1e-9)) return [];
+  const most = formatQuantity(limit.min, 'A');
+  const way = (pin.peakSource ?? 0) >= (pin.peakSink ?? 0) ? 'out of' : 'into';
+  const beside = steady ? `, while its ${steady.what} is ${formatQuantity(steady.amps, 'A')}` : '';
+  return [
+    {
+      code: 'pin-peak',
+      severity: 'warning',
+      ...pinPlace(analysis, pin),
+      message: `Peaks of ${formatQuantity(peak, 'A')} flow ${way} ${pin.key} at each edge, ${Number((peak / limit.min).toPrecision(2))} times its absolute maximum of ${most}${beside}. ${cure(pin, peak / limit.min)}`,
+      expected: `peaks up to ${most}`,
+      actual: formatQuantity(peak, 'A'),
+      source: originWords(limit.origin),
+      related: drivenRails(analysis, pin),
+    },
+  ];
+}
+
+/** The peak is a voltage over the resistance in its way: the missing resistance follows from the ratio. */
+function cure(pin: PinResult, ratio: number): string {
+  const present = Math.max(pin.highResistance?.typical ?? 0, pin.lowResistance?.typical ?? 0);
+  if (!(present > 0)) return 'A resistor in series with the drive bounds them.';
+  const proposed = nextPreferredUp(present * (ratio - 1), 'E12');
+  return `A resistor of about ${formatQuantity(proposed, 'ohm')} in series with the drive (\`series\`) bounds them; the rail pays for it.`;
+}

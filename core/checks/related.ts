@@ -1,0 +1,36 @@
+/** Second places that findings about rails point to. */
+import type { RailResult } from '../analysis/types';
+import type { Load, Rail } from '../model/board';
+import { formatQuantity } from '../quantity/write';
+import type { Related } from './finding';
+
+/** The load that draws most at the rail's typical voltage. */
+export function largestLoad(result: RailResult): readonly Related[] {
+  const volts = Math.abs(result.voltage?.typical ?? Number.NaN);
+  const loads = [...result.rail.loads.values()]
+    .map((load) => ({ load, current: currentOf(load, volts) }))
+    .filter((entry): entry is { load: Load; current: number } => entry.current > 0)
+    .sort((a, b) => b.current - a.current);
+  const first = loads[0];
+  if (first === undefined) return [];
+  const words = loads.length === 1 ? 'The load' : 'Largest load';
+  return [
+    {
+      span: first.load.nameSpan,
+      message: `${words}: ${first.load.name}, ${formatQuantity(first.current, 'A')}`,
+    },
+  ];
+}
+
+/** Where the rail itself is described, for a finding whose own place is elsewhere. */
+export function railHere(rail: Rail, message: string): Related {
+  return { span: rail.nameSpan, message };
+}
+
+/** Largest current of a load at `volts`, A; NaN when the file did not say. */
+function currentOf(load: Load, volts: number): number {
+  if (load.current) return Math.abs(load.current.max);
+  if (load.resistance) return volts / load.resistance.min;
+  if (load.power) return load.power.max / volts;
+  return Number.NaN;
+}
