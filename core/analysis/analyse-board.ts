@@ -10,7 +10,7 @@ import { chipResults, groupResults, overModes } from './chips';
 import { boardCurrents, type Currents } from './currents';
 import { isGap } from './gap';
 import { pinResults } from './pins';
-import { type RailVoltages, railVoltages } from './rail-voltages';
+import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
 import { supplyVoltage } from './supply-voltage';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
@@ -84,8 +84,8 @@ function clockResults(board: Board, solved: RailVoltages): Map<string, ClockResu
     const known = clock.pin && !clock.timer && !clock.inverseOf;
     results.set(clock.name, {
       clock,
-      frequency: known ? (clock.frequency ?? null) : null,
-      duty: known ? (clock.duty ?? null) : null,
+      frequency: known && clock.frequency ? plainBand(clock.frequency) : null,
+      duty: known && clock.duty ? plainBand(clock.duty) : null,
       high: voltage && !isGap(voltage) ? voltage.typical : null,
       low: voltage && !isGap(voltage) ? 0 : null,
     });
@@ -100,7 +100,8 @@ function supplyResults(board: Board, currents: Currents): Map<string, SupplyResu
     const rails = [...board.rails.values()].filter(
       (rail) => rail.origin?.kind === 'supply' && rail.origin.supply.name === supply.name,
     );
-    const voltage = supplyVoltage(supply);
+    const found = supplyVoltage(supply);
+    const voltage = found && plainBand(found);
     const current = overModes(modes, (mode) => {
       let sum = 0;
       for (const rail of rails) {

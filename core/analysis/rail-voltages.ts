@@ -32,7 +32,7 @@ export function railSolver(board: Board): RailVoltages & { readonly voltage: Rai
     if (!rail) return { because: `the rail ${name} is not known` };
     if (open.has(name)) return { because: `${name} depends on itself` };
     open.add(name);
-    const found = compute(rail);
+    const found = plain(compute(rail));
     open.delete(name);
     voltages.set(name, found);
     return found;
@@ -63,4 +63,13 @@ export function railSolver(board: Board): RailVoltages & { readonly voltage: Rai
     }
   };
   return { voltages, pumps, voltage };
+}
+
+function plain(voltage: Band | Gap): Band | Gap {
+  return isGap(voltage) ? voltage : plainBand(voltage);
+}
+
+/** Figures of the file carry spans and origins, which are no part of a result. */
+export function plainBand({ min, typical, max }: Band): Band {
+  return { min, typical, max };
 }

@@ -1,6 +1,7 @@
 /**
  * Phrases about computed results that checks and cards share, so that a number is never worded in two ways.
  */
+import type { Origin } from '../quantity/figure';
 import { formatQuantity } from '../quantity/write';
 import type { CornerEnd, CornerSetting } from './types';
 
@@ -24,4 +25,9 @@ export function volts(difference: number): string {
 /** ` in mode active`, or nothing on a board without modes. */
 export function inMode(mode: string | undefined): string {
   return mode === undefined ? '' : ` in mode ${mode}`;
+}
+
+/** Where a figure comes from, on one line. */
+export function originWords({ kind, note, conditions }: Origin): string {
+  return [kind, note, conditions].filter((part) => part !== undefined && part !== '').join('; ');
 }

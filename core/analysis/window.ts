@@ -3,9 +3,9 @@
  * zero, "strong" the side away from it, and both keep their sign when they are written.
  */
 
-import { isNegative } from '../analysis/sign';
-import type { BoardAnalysis, CornerEnd, RailResult } from '../analysis/types';
 import type { Figure } from '../quantity/figure';
+import { isNegative } from './sign';
+import type { CornerEnd, RailResult } from './types';
 
 export type Side = 'weak' | 'strong';
 
@@ -24,16 +24,13 @@ export interface Miss {
   readonly corner?: CornerEnd;
 }
 
-/** One miss for each rail whose voltage leaves the needed window on that side. */
-export function misses(analysis: BoardAnalysis, side: Side): readonly Miss[] {
-  return [...analysis.rails.values()].flatMap((result) => {
-    const needed = result.rail.needs?.voltage;
-    const found = needed && result.voltage && missOf(result, needed, side);
-    return found ? [found] : [];
-  });
+/** The rail's miss on that side of its needed window, if it has one. */
+export function missOf(result: RailResult, side: Side): Miss | undefined {
+  const needed = result.rail.needs?.voltage;
+  return needed && result.voltage ? judge(result, needed, side) : undefined;
 }
 
-function missOf(result: RailResult, needed: Figure, side: Side): Miss | undefined {
+function judge(result: RailResult, needed: Figure, side: Side): Miss | undefined {
   // One figure instead of a window asks for at least that much: every rail has some tolerance.
   if (side === 'strong' && needed.min === needed.max) return undefined;
   const negative = isNegative(needed);
