@@ -4,7 +4,7 @@
  */
 import type { Circuit } from './circuit';
 import { copyLines, moveLines, openLines, solveStage } from './stage';
-import { gamma, placeStep, Step, type Trajectory, trajectory } from './trajectory';
+import { gamma, grown, placeStep, Step, type Trajectory, trajectory } from './trajectory';
 
 /** `steps` equal backward-Euler steps in each segment, all lines at their opening. */
 export function coarseMesh(circuit: Circuit, steps: number): Trajectory {
@@ -41,7 +41,7 @@ export function fineMesh(
   settings: MeshSettings,
 ): Trajectory | undefined {
   const count = circuit.capacitors.count;
-  const path = trajectory(circuit, circuit.segments * (2 * settings.mostSteps + 3));
+  let path = trajectory(circuit, 64);
   const state = Float64Array.from(start);
   const rate = new Float64Array(count);
   let time = 0;
@@ -62,6 +62,8 @@ export function fineMesh(
       const final = length >= left * 0.999;
       if (final) length = left;
       else if (length > left / 2) length = left / 2;
+      // Two stages for this step and the probe of the next segment.
+      if (s + 3 > path.capacity) path = grown(circuit, path);
       placeStep(circuit, path, s, Step.sdirk, segment, time + done, length);
       const error = tryStep(circuit, path, s, state, rate, swing, settings);
       const growth = error > 0 ? 0.9 * Math.cbrt(1 / error) : 5;

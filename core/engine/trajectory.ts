@@ -63,6 +63,29 @@ export function trajectory(circuit: Circuit, capacity: number): Trajectory {
   };
 }
 
+/** The same path with room for twice as many stages. */
+export function grown(circuit: Circuit, path: Trajectory): Trajectory {
+  const larger = trajectory(circuit, 2 * path.capacity);
+  larger.count = path.count;
+  for (const key of plainArrays) larger[key].set(path[key]);
+  for (const key of ['i', 'u', 'g'] as const) larger.lines[key].set(path.lines[key]);
+  return larger;
+}
+
+const plainArrays = [
+  'kind',
+  'last',
+  'segment',
+  'length',
+  'reach',
+  'weight',
+  'time',
+  'volts',
+  'state',
+  'origin',
+  'loadVolts',
+] as const;
+
 /** Writes the fixed facts of a step's stages from index `at`; returns the index behind them. */
 export function placeStep(
   circuit: Circuit,
