@@ -35,7 +35,8 @@ export const preferredValues: Readonly<Record<Series, readonly number[]>> = {
 export function nearestPreferred(value: number, series: Series): number {
   const above = nextPreferredUp(value, series);
   const below = nextPreferredDown(value, series);
-  return value / below <= above / value ? below : above;
+  // The exact middle is not a double: a part in 10^12 either way still counts as a tie.
+  return value / below <= (above / value) * (1 + 1e-12) ? below : above;
 }
 
 /** The smallest preferred value that is not below `value`; NaN unless `value` is positive and finite. */

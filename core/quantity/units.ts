@@ -95,16 +95,30 @@ export const spellings: ReadonlyMap<string, Spelling> = new Map(
   ),
 );
 
-/** The right spelling of a unit that differs only in case or in a long word: `khz`, `Kohm`, `volts`. */
+/** The right spelling of a unit that differs only in case or in a long word: `khz`, `Kohm`, `microfarad`. */
 export function suggestSpelling(written: string, wanted: Unit): string | undefined {
-  const lower = written.toLowerCase().replace(/^(kilo|milli|micro|nano|pico|mega)/, (word) => word.charAt(0));
+  const lower = written.toLowerCase();
   const named = longNames.find(([name]) => lower.endsWith(name) || lower.endsWith(`${name}s`));
-  const short = named ? lower.slice(0, lower.lastIndexOf(named[0])) + named[1] : lower;
-  for (const [spelling, { unit }] of spellings) {
-    if (unit === wanted && spelling.toLowerCase() === short.toLowerCase()) return spelling;
-  }
-  return undefined;
+  const prefix = longPrefixes.find(([name]) => lower.startsWith(name));
+  const middle = written.slice(prefix?.[0].length ?? 0, named ? lower.lastIndexOf(named[0]) : undefined);
+  const short = (prefix?.[1] ?? '') + middle + (named?.[1] ?? '');
+  const alike = [...spellings].filter(
+    ([spelling, { unit }]) => unit === wanted && spelling.toLowerCase() === short.toLowerCase(),
+  );
+  // `MHZ` may be milli or mega by its letters alone: the one that changes fewest letters is meant.
+  const kept = (spelling: string) => [...spelling].filter((letter, index) => letter === short[index]).length;
+  return alike.map(([spelling]) => spelling).sort((a, b) => kept(b) - kept(a))[0];
 }
+
+const longPrefixes: readonly (readonly [string, string])[] = [
+  ['pico', 'p'],
+  ['nano', 'n'],
+  ['micro', 'u'],
+  ['milli', 'm'],
+  ['kilo', 'k'],
+  ['mega', 'M'],
+  ['giga', 'G'],
+];
 
 const longNames: readonly (readonly [string, string])[] = [
   ['volt', 'V'],
