@@ -36,6 +36,10 @@ export interface Circuit {
   readonly saturation: Float64Array;
   readonly slope: Float64Array;
   readonly diodeOhms: Float64Array;
+  /** Junctions of transistors: signed share of the current, 0 for a plain diode, and where it passes instead. */
+  readonly alpha: Float64Array;
+  readonly collector: Int32Array;
+  readonly baseEnd: Int32Array;
   readonly amps: Float64Array;
   readonly knee: Float64Array;
   readonly knownVolts: readonly Float64Array[];
@@ -51,6 +55,9 @@ export function prepare(network: Network): Circuit {
     .flat()
     .filter((e) => e.a >= 0 && e.b >= 0)
     .map((e) => [e.a, e.b] as const);
+  for (const { a, b, transfer } of network.diodes)
+    for (const end of transfer ? [a, b] : [])
+      if (end >= 0 && transfer!.terminal >= 0) edges.push([end, transfer!.terminal]);
   const place = orderNodes(nodes, edges);
   const first = Int32Array.from({ length: nodes }, (_, i) => i);
   for (const [a, b] of edges) {
@@ -98,6 +105,11 @@ export function prepare(network: Network): Circuit {
     saturation: Float64Array.from(network.diodes, (d) => d.saturation),
     slope: Float64Array.from(network.diodes, (d) => d.slope),
     diodeOhms: Float64Array.from(network.diodes, (d) => Math.max(d.ohms, leastOhms)),
+    alpha: Float64Array.from(network.diodes, ({ transfer }) =>
+      transfer ? (transfer.base === 'a' ? transfer.alpha : -transfer.alpha) : 0,
+    ),
+    collector: Int32Array.from(network.diodes, ({ transfer }) => (transfer ? index(transfer.terminal) : -1)),
+    baseEnd: Int32Array.from(network.diodes, ({ a, b, transfer }) => index(transfer?.base === 'b' ? b : a)),
     amps: Float64Array.from(network.loads, (l) => l.amps),
     knee: Float64Array.from(network.loads, (l) => l.knee),
     knownVolts,
@@ -132,4 +144,45 @@ export function stamp(
     matrix.lower[position] = matrix.lower[position]! - g;
     matrix.upper[position] = matrix.upper[position]! - g;
   }
+}
+
+/**
+ * Adds the current `j = gm * (v_a - v_b) + offset` that a transistor's junction `a`, `b` moves from its collector to
+ * its base end.
+ */
+export function stampTransfer(
+  matrix: Envelope,
+  rhs: Float64Array,
+  circuit: Circuit,
+  k: number,
+  g: number,
+  offset: number,
+  known: Float64Array,
+): void {
+  const alpha = circuit.alpha[k]!;
+  const a = circuit.diodes.a[k]!;
+  const b = circuit.diodes.b[k]!;
+  const from = circuit.collector[k]!;
+  const to = circuit.baseEnd[k]!;
+  stampRow(matrix, rhs, circuit.nodes, from, a, b, alpha * g, alpha * offset, known);
+  stampRow(matrix, rhs, circuit.nodes, to, a, b, -alpha * g, -alpha * offset, known);
+}
+
+function stampRow(
+  matrix: Envelope,
+  rhs: Float64Array,
+  nodes: number,
+  row: number,
+  a: number,
+  b: number,
+  gm: number,
+  offset: number,
+  known: Float64Array,
+): void {
+  if (row >= nodes) return;
+  rhs[row] = rhs[row]! - offset;
+  if (a < nodes) matrix.add(row, a, gm);
+  else rhs[row] = rhs[row]! - gm * known[a - nodes]!;
+  if (b < nodes) matrix.add(row, b, -gm);
+  else rhs[row] = rhs[row]! + gm * known[b - nodes]!;
 }

@@ -38,6 +38,16 @@ export class Envelope {
     return this.start[row]! + Math.min(i, j) - this.first[row]!;
   }
 
+  /** Adds to one entry, which must lie inside the envelope. */
+  add(row: number, column: number, value: number): void {
+    if (row === column) this.diagonal[row] = this.diagonal[row]! + value;
+    else {
+      const part = row > column ? this.lower : this.upper;
+      const at = this.position(row, column);
+      part[at] = part[at]! + value;
+    }
+  }
+
   copy(from: Envelope): void {
     this.lower.set(from.lower);
     this.upper.set(from.upper);

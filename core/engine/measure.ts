@@ -85,6 +85,15 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
         );
         book(a, i, s);
         book(b, -i, s);
+        if (branches === circuit.diodes && circuit.alpha[k] !== 0) {
+          const moved = circuit.alpha[k]! * i;
+          const from = circuit.collector[k]!;
+          const to = circuit.baseEnd[k]!;
+          const fall = path.volts[s * width + from]! - path.volts[s * width + to]!;
+          sum.loss += (path.weight[s]! / period) * fall * moved;
+          book(from, moved, s);
+          book(to, -moved, s);
+        }
       }
       losses += sum.loss;
       return finish(element.name, sum);

@@ -45,6 +45,20 @@ export interface Diode {
   /** Ideality times thermal voltage, V. */
   readonly slope: number;
   readonly ohms: number;
+  /** Makes it one junction of a transistor (J. J. Ebers, J. L. Moll, Proc. IRE 42, 1954; from memory: confirm). */
+  readonly transfer?: Transfer;
+}
+
+/**
+ * A share of a junction's current that passes at `terminal` instead of at the base: of a transistor's emitter
+ * junction the share `alpha` goes through its collector. `base` says which end of the junction the base is: `a`
+ * for npn, `b` for pnp.
+ */
+export interface Transfer {
+  readonly terminal: Terminal;
+  readonly base: 'a' | 'b';
+  /** 0..1 exclusive: gain / (gain + 1). */
+  readonly alpha: number;
 }
 
 /**
@@ -98,7 +112,9 @@ export function networkFault(network: Network): string | undefined {
     if (!(c.farads > 0 && Number.isFinite(c.farads)) || !(c.ohms >= 0))
       return `${c.name}: a capacitance must be above 0 F`;
   for (const d of network.diodes)
-    if (!(d.saturation > 0 && d.slope > 0 && d.ohms >= 0 && d.saturation * d.slope * d.ohms < Infinity))
+    if (d.transfer && !(terminal(d.transfer.terminal) && d.transfer.alpha > 0 && d.transfer.alpha < 1))
+      return `${d.name}: a transistor's gain must be above 0`;
+    else if (!(d.saturation > 0 && d.slope > 0 && d.ohms >= 0 && d.saturation * d.slope * d.ohms < Infinity))
       return `${d.name}: saturation current and slope must be above 0`;
   for (const l of network.loads)
     if (!(Number.isFinite(l.amps) && l.knee > 0)) return `${l.name}: a load current must be finite`;

@@ -70,10 +70,11 @@ export function parameterCurrent(
       );
       return;
     default:
-      add(
-        circuit.diodes.a[parameter.index]!,
-        circuit.diodes.b[parameter.index]!,
+      pushDiode(
+        circuit,
+        parameter.index,
         diodeChange(circuit, path, s, parameter.kind, parameter.index),
+        add,
       );
       return;
   }
@@ -154,6 +155,17 @@ function diodeChange(
   return -ohms * current * total * scale;
 }
 
+/** A change of a diode's current, and of what a transistor's junction moves from collector to base end. */
+function pushDiode(
+  circuit: Circuit,
+  k: number,
+  current: number,
+  add: (a: number, b: number, current: number) => void,
+): void {
+  add(circuit.diodes.a[k]!, circuit.diodes.b[k]!, current);
+  if (circuit.alpha[k] !== 0) add(circuit.collector[k]!, circuit.baseEnd[k]!, circuit.alpha[k]! * current);
+}
+
 /** A rise of a known potential by 1 V pushes the conductance of each element attached to it. */
 function knownCurrent(
   circuit: Circuit,
@@ -171,8 +183,13 @@ function knownCurrent(
     push(circuit.resistors, k, circuit.conductance[segment]![k]!);
   for (let k = 0; k < circuit.capacitors.count; k++)
     push(circuit.capacitors, k, 1 / (path.reach[s]! / circuit.farads[k]! + circuit.esr[k]!));
-  for (let k = 0; k < circuit.diodes.count; k++)
-    push(circuit.diodes, k, path.lines.g[s * circuit.diodes.count + k]!);
+  for (let k = 0; k < circuit.diodes.count; k++) {
+    const g = path.lines.g[s * circuit.diodes.count + k]!;
+    push(circuit.diodes, k, g);
+    const sign = (circuit.diodes.a[k] === known ? 1 : 0) - (circuit.diodes.b[k] === known ? 1 : 0);
+    if (sign !== 0 && circuit.alpha[k] !== 0)
+      add(circuit.collector[k]!, circuit.baseEnd[k]!, sign * circuit.alpha[k]! * g);
+  }
   for (let k = 0; k < circuit.loads.count; k++) {
     const v = path.loadVolts[s * circuit.loads.count + k]!;
     push(

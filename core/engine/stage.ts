@@ -3,7 +3,7 @@
  * every diode and load as a straight line, solved for voltages and, when asked, for their derivatives with
  * respect to the state at the start of the period and to parameters.
  */
-import { type Circuit, stamp } from './circuit';
+import { type Circuit, stamp, stampTransfer } from './circuit';
 import { moveLine, openingLine } from './diode';
 import { loadConductance, loadCurrent } from './load';
 import { type Parameter, parameterCurrent, parameterState } from './parameter';
@@ -50,8 +50,12 @@ export function solveStage(circuit: Circuit, path: Trajectory, s: number): boole
   }
   const d0 = s * diodes.count;
   const { i, u, g } = path.lines;
-  for (let k = 0; k < diodes.count; k++)
-    stamp(work, rhs, diodes, k, g[d0 + k]!, i[d0 + k]! - g[d0 + k]! * u[d0 + k]!, nodes, known);
+  for (let k = 0; k < diodes.count; k++) {
+    const slope = g[d0 + k]!;
+    const offset = i[d0 + k]! - slope * u[d0 + k]!;
+    stamp(work, rhs, diodes, k, slope, offset, nodes, known);
+    if (circuit.alpha[k] !== 0) stampTransfer(work, rhs, circuit, k, slope, offset, known);
+  }
   const l0 = s * loads.count;
   for (let k = 0; k < loads.count; k++) {
     const v = path.loadVolts[l0 + k]!;
