@@ -17,6 +17,8 @@ export interface SlowLimitInput {
  * Answers ohm. Undefined for values out of range or lists of the wrong length. The reservoir is taken as much
  * larger than the other capacitors. Every flying capacitor of a multiplier carries 1, coupling capacitor k of a ladder
  * n - k + 1; the smoothing column shares its charge so that the sum is smallest, which is what loops of capacitors do.
+ * Diodes conduct one way only: where their own resistance dominates, some turn off before a ladder has shared its
+ * charge, and the solved resistance is less, by 4 % with two stages and 7 % with four (compared with the engine).
  * Source: M. D. Seeman, S. R. Sanders, IEEE Trans. Power Electronics 23(2), 841-851, 2008 (from memory: confirm).
  * Worked: 3-stage multiplier, 1.05 uF, 20 kHz: 142.9 ohm; 3-stage ladder of equal capacitors: 16/(f C).
  */
