@@ -15,11 +15,12 @@ export function scalarNode(
   const quoted = style === 'single-quoted' || style === 'double-quoted';
   const closed = quoted && range.end - range.start > 1 && source[range.end - 1] === source[range.start];
   const inner = quoted ? span(range.start + 1, closed ? range.end - 1 : range.end) : range;
-  const written = source.slice(inner.start, inner.end);
+  // Of a text without its closing quote the parser leaves out the last character.
+  const written = source.slice(inner.start, quoted && !closed ? inner.end - 1 : inner.end);
   const offsets = written === decoded ? undefined : alignment(written, decoded, style);
   const place = (offset: number): number => {
     const clamped = Math.min(Math.max(offset, 0), decoded.length);
-    return inner.start + (offsets ? (offsets[clamped] ?? written.length) : clamped);
+    return Math.min(inner.start + (offsets ? (offsets[clamped] ?? written.length) : clamped), inner.end);
   };
   return {
     kind: 'scalar',
@@ -30,7 +31,7 @@ export function scalarNode(
     locate({ start, end }) {
       const first = place(start);
       // The end follows the last character, not the place of the next one: escapes and line ends lie between.
-      return span(first, end > start ? Math.max(first, endOf(end)) : first);
+      return span(first, end > start ? Math.max(first, Math.min(endOf(end), inner.end)) : first);
     },
   };
 
@@ -45,43 +46,61 @@ export function scalarNode(
 
 /** For each character of `decoded`, and its end, the offset in `written`. */
 function alignment(written: string, decoded: string, style: ScalarNode['style']): number[] {
+  if (style === 'double-quoted') {
+    const offsets = escapedOffsets(written);
+    // A broken escape is decoded by other rules: the loose way below still finds most of it.
+    if (offsets.length === decoded.length + 1) return offsets;
+  }
+  return looseOffsets(written, decoded, style);
+}
+
+/** Without escapes, decoding changes blanks and doubled quotes only: other characters follow in their order. */
+function looseOffsets(written: string, decoded: string, style: ScalarNode['style']): number[] {
   const offsets: number[] = [];
   let at = 0;
-  for (let i = 0; i < decoded.length; i++) {
-    const wanted = decoded[i] ?? '';
+  for (const wanted of decoded.split('')) {
     if (isBlank(wanted)) {
       offsets.push(at);
       if (isBlank(written[at] ?? '')) at += written.startsWith('\r\n', at) ? 2 : 1;
-      else if (style === 'double-quoted' && written[at] === '\\') at += escapeLength(written, at);
       continue;
     }
-    at = skipFolding(written, at, style);
+    while (isBlank(written[at] ?? '')) at++;
     offsets.push(at);
-    if (style === 'double-quoted' && written[at] === '\\') {
-      const length = escapeLength(written, at);
-      // One escape may stand for a pair of code units.
-      const pair =
-        /[\ud800-\udbff]/.test(wanted) && /^\\[xuU]/.test(written.slice(at, at + 2)) && length === 10;
-      if (pair) {
-        offsets.push(at);
-        i++;
-      }
-      at += length;
-    } else {
-      at += style === 'single-quoted' && written.startsWith("''", at) ? 2 : 1;
-    }
+    at += style === 'single-quoted' && written.startsWith("''", at) ? 2 : 1;
   }
-  offsets.push(Math.min(at, written.length));
+  offsets.push(at);
   return offsets.map((offset) => Math.min(offset, written.length));
 }
 
-function skipFolding(written: string, start: number, style: ScalarNode['style']): number {
-  let at = start;
-  for (;;) {
-    if (isBlank(written[at] ?? '')) at++;
-    else if (style === 'double-quoted' && /^\\\r?\n/.test(written.slice(at, at + 3))) at += 2;
-    else return at;
+/** The places of what a double-quoted text decodes to, by the rules of YAML 1.2.2, chapter 7.3.1. */
+function escapedOffsets(written: string): number[] {
+  const offsets: number[] = [];
+  for (let at = 0; at < written.length; ) {
+    const lineEnd = match(/\\\r?\n[ \t]*/y, written, at);
+    const blanks = match(/(?:[ \t]|\r?\n)+/y, written, at);
+    if (lineEnd) {
+      at += lineEnd.length;
+    } else if (written[at] === '\\') {
+      const length = escapeLength(written, at);
+      const code = length === 10 ? Number.parseInt(written.slice(at + 2, at + 10), 16) : 0;
+      offsets.push(...(code > 0xffff ? [at, at] : [at]));
+      at += length;
+    } else if (blanks) {
+      const breaks = blanks.split('\n').length - 1;
+      // A line break folds into a blank, several into one less; other blanks stay.
+      const length = breaks === 0 ? blanks.length : Math.max(1, breaks - 1);
+      for (let i = 0; i < length; i++) offsets.push(breaks === 0 ? at + i : at);
+      at += blanks.length;
+    } else {
+      offsets.push(at++);
+    }
   }
+  return [...offsets, written.length];
+}
+
+function match(pattern: RegExp, text: string, at: number): string | undefined {
+  pattern.lastIndex = at;
+  return pattern.exec(text)?.[0];
 }
 
 function isBlank(character: string): boolean {
