@@ -2,15 +2,26 @@
  * The façade: the only door through which the command line, the editor and library users reach the core.
  * `analyse` runs once per text; every other function reads its immutable result and never parses again.
  */
+import { analyseBoard } from './analysis/analyse-board';
+import type { BoardAnalysis } from './analysis/types';
+import { catalogue } from './catalog';
+import { runChecks, sortFindings } from './checks';
 import type { Finding } from './checks/finding';
 import type { Card } from './features/card';
+import { hoverCard as cardAt } from './features/hover';
+import { railAt as findRail, pumpRails as listPumpRails, type PumpRail } from './features/rails';
+import { type Sizing, sizeRail as size } from './features/size-rail';
+import { toReport } from './report/json';
+import { type LedgerOptions, ledgerText as writeLedger } from './report/ledger';
+import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
-import type { TextEdit } from './text/edit';
-import type { Span } from './text/span';
 
 export type { Finding, FindingCode, Fix, Related, Severity } from './checks/finding';
 export type { Card, Picture, Theme } from './features/card';
+export type { PumpRail } from './features/rails';
+export type { Sizing } from './features/size-rail';
 export type { Report } from './report/report';
+export { stripBom } from './text/bom';
 export { applyEdits, type TextEdit } from './text/edit';
 export type { Span } from './text/span';
 
@@ -20,76 +31,46 @@ export const toolVersion = '0.1.0';
 /** Everything known about one text, immutable. Spans are UTF-16 offsets into `text`. */
 export interface Analysis {
   readonly text: string;
+  /** In the order of the text. */
   readonly findings: readonly Finding[];
   readonly report: Report;
+  /** What the feature functions read; its shape may change between versions. */
+  readonly board: BoardAnalysis;
 }
-
-/** A pump rail, where its name stands, and a few words about it for a list to choose from. */
-export interface PumpRail {
-  readonly name: string;
-  readonly span: Span;
-  readonly detail: string;
-}
-
-/** The outcome of sizing: the edits that make the rail meet its needs, or the limit that stops it. */
-export type Sizing =
-  | {
-      readonly ok: true;
-      readonly rail: string;
-      readonly summary: string;
-      readonly details: readonly string[];
-      readonly edits: readonly TextEdit[];
-    }
-  | {
-      readonly ok: false;
-      readonly rail: string;
-      readonly reason: string;
-      readonly details: readonly string[];
-    };
 
 /**
  * Reads and computes a whole board. Never throws: what cannot be read or computed stands in the findings.
  * `text` comes without a byte-order mark; `options.file` is only a name to show.
  */
 export function analyse(text: string, options: { readonly file: string }): Analysis {
-  return {
-    text,
-    findings: [],
-    report: {
-      format: 1,
-      tool: `${toolName} ${toolVersion}`,
-      file: options.file,
-      board: null,
-      rails: {},
-      pins: {},
-      groups: {},
-      chips: {},
-      clocks: {},
-      drivers: {},
-      supplies: {},
-      parts: {},
-      balance: null,
-      findings: [],
-    },
-  };
+  const board = analyseBoard(text, options.file, catalogue);
+  const findings = sortFindings([...board.reading.findings, ...board.problems, ...runChecks(board)]);
+  return { text, findings, report: toReport(board, findings, `${toolName} ${toolVersion}`), board };
+}
+
+/** The board's ledger for a terminal: rails, pins, supplies and findings as aligned text. */
+export function ledgerText(analysis: Analysis, options: { readonly colour: boolean }): string {
+  const palette = options.colour ? colourPalette : plainPalette;
+  const settings: LedgerOptions = { palette };
+  return writeLedger(analysis.board, analysis.findings, settings);
 }
 
 /** The card about the thing at a text offset, or nothing. */
-export function hoverCard(_analysis: Analysis, _offset: number): Card | undefined {
-  return undefined;
+export function hoverCard(analysis: Analysis, offset: number): Card | undefined {
+  return cardAt(analysis.board, offset);
 }
 
 /** Rails that a charge pump feeds, in the order of the file. */
-export function pumpRails(_analysis: Analysis): readonly PumpRail[] {
-  return [];
+export function pumpRails(analysis: Analysis): readonly PumpRail[] {
+  return listPumpRails(analysis.board);
 }
 
 /** Name of the rail whose entry holds the offset. */
-export function railAt(_analysis: Analysis, _offset: number): string | undefined {
-  return undefined;
+export function railAt(analysis: Analysis, offset: number): string | undefined {
+  return findRail(analysis.board, offset);
 }
 
 /** Smallest preferred capacitors with which a pump rail meets its needs. */
-export function sizeRail(_analysis: Analysis, rail: string): Sizing {
-  return { ok: false, rail, reason: `There is no pump rail named ${rail}.`, details: [] };
+export function sizeRail(analysis: Analysis, rail: string): Sizing {
+  return size(analysis.board, rail, catalogue);
 }

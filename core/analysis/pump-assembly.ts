@@ -113,7 +113,7 @@ export function assemblePump(parts: PumpParts): PumpModel | undefined {
     if (input !== undefined) tie(input, { kind: 'volts', index: ~at.input }, 1);
     drives.forEach((d, k) => {
       const place = at.drives[k]!;
-      tie(d.high, { kind: 'volts', index: place.known, segment: k }, 1);
+      tie(d.high, { kind: 'volts', index: place.known, share: k === 0 ? [1, 0] : [0, 1] }, 1);
       tie(d.highOhms, { kind: 'ohms', index: place.resistor, segment: k });
       tie(d.lowOhms, { kind: 'ohms', index: place.resistor, segment: 1 - k });
       if (place.series !== undefined) tie(series, { kind: 'ohms', index: place.series });

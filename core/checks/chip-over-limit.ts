@@ -2,11 +2,11 @@
  * All pins of a chip together above what its supply pins may carry for them.
  */
 import type { ChipResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import type { Figure } from '../quantity/figure';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { originWords } from './pin-current';
 
 export const chipOverLimit: Check = {
   code: 'chip-over-limit',

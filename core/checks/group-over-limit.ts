@@ -2,11 +2,11 @@
  * The pins of one port or supply pin together above what the data sheet allows for that group.
  */
 import type { GroupResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import type { Figure } from '../quantity/figure';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { originWords } from './pin-current';
 
 export const groupOverLimit: Check = {
   code: 'group-over-limit',

@@ -2,7 +2,6 @@
  * The steady current of a pin in the form that its limits are set against: the largest of its averages and its rms.
  */
 import type { PinResult } from '../analysis/types';
-import type { Origin } from '../quantity/figure';
 import { formatQuantity } from '../quantity/write';
 
 export interface SteadyCurrent {
@@ -30,9 +29,4 @@ export function currentWords(pin: PinResult, { amps, what }: SteadyCurrent): str
       : `peaks ${formatQuantity(Math.max(pin.peakSource ?? 0, pin.peakSink ?? 0), 'A')}`,
   ].filter((part) => part !== '');
   return `${formatQuantity(amps, 'A')} ${what} (${rest.join(', ')})`;
-}
-
-/** Where a limit comes from, on one line. */
-export function originWords({ kind, note, conditions }: Origin): string {
-  return [kind, note, conditions].filter((part) => part !== undefined && part !== '').join('; ');
 }

@@ -2,10 +2,11 @@
  * More steady current than a pin survives: average or rms above the absolute maximum rating.
  */
 import type { BoardAnalysis, PinResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { currentWords, originWords, steadyCurrent } from './pin-current';
+import { currentWords, steadyCurrent } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
 export const pinOverAbsolute: Check = {

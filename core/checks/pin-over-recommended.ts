@@ -3,10 +3,11 @@
  * longer what the computation of the rail rests on.
  */
 import type { BoardAnalysis, PinResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { currentWords, originWords, steadyCurrent } from './pin-current';
+import { currentWords, steadyCurrent } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
 export const pinOverRecommended: Check = {

@@ -2,11 +2,12 @@
  * Peaks of a pin's current above its absolute maximum while its steady current is below: short, once each edge.
  */
 import type { BoardAnalysis, PinResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import { nextPreferredUp } from '../quantity/preferred';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { originWords, steadyCurrent } from './pin-current';
+import { steadyCurrent } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
 export const pinPeak: Check = {

@@ -1,19 +1,23 @@
 /**
  * A rail that is stronger than its loads bear: at typical values an error, at a corner only a warning that names it.
  */
+import { type Miss, missOf } from '../analysis/window';
 import { cornerWords, inMode, volts } from '../analysis/words';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
 import { railHere } from './related';
-import { type Miss, misses } from './window';
 
 export const railHigh: Check = {
   code: 'rail-high',
   title: 'Rail above what it may have',
   severity: 'error',
   why: 'A pump without regulation climbs towards its ideal voltage as soon as the load goes away; parts on it must survive that.',
-  run: (analysis) => misses(analysis, 'strong').map(toFinding),
+  run: (analysis) =>
+    [...analysis.rails.values()].flatMap((result) => {
+      const miss = missOf(result, 'strong');
+      return miss ? [toFinding(miss)] : [];
+    }),
 };
 
 function toFinding({ result, needed, limit, voltage, by, mode, corner }: Miss): Finding {

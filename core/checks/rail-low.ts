@@ -1,20 +1,24 @@
 /**
  * A rail that is weaker than its loads need: at typical values an error, at a corner only a warning that names it.
  */
+import { type Miss, missOf } from '../analysis/window';
 import { cornerWords, inMode, volts } from '../analysis/words';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
 import { pumpCure } from './pump-cure';
 import { largestLoad, railHere } from './related';
-import { type Miss, misses } from './window';
 
 export const railLow: Check = {
   code: 'rail-low',
   title: 'Rail below what it needs',
   severity: 'error',
   why: 'Amplifiers clip, gates are not fully driven and references drop out when their rail sags under load, first in the cold and with weak parts.',
-  run: (analysis) => misses(analysis, 'weak').map(toFinding),
+  run: (analysis) =>
+    [...analysis.rails.values()].flatMap((result) => {
+      const miss = missOf(result, 'weak');
+      return miss ? [toFinding(miss)] : [];
+    }),
 };
 
 function toFinding(miss: Miss): Finding {

@@ -2,10 +2,10 @@
  * More current out of a supply than it may give.
  */
 import type { BoardAnalysis, SupplyResult } from '../analysis/types';
+import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { originWords } from './pin-current';
 
 export const supplyOverLimit: Check = {
   code: 'supply-over-limit',

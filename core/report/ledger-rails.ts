@@ -1,0 +1,108 @@
+/**
+ * The ledger's table of rails: what each reaches over tolerance and temperature, against what it needs.
+ */
+
+import type { BoardAnalysis, RailResult } from '../analysis/types';
+import { missOf } from '../analysis/window';
+import { formatBand, formatPercent, formatQuantity } from '../quantity/write';
+import { windowStrip } from './bar';
+import type { Paint, Palette } from './paint';
+import { type Cell, type Column, tableLines } from './table';
+
+const columns: readonly Column[] = [
+  { head: '', align: 'left' },
+  { head: 'rail', align: 'left' },
+  { head: 'lowest', align: 'right' },
+  { head: 'typical', align: 'right' },
+  { head: 'highest', align: 'right' },
+  { head: 'needs', align: 'left' },
+  { head: '[window]', align: 'left' },
+  { head: 'spare', align: 'right' },
+  { head: 'ripple', align: 'right' },
+  { head: 'load', align: 'right' },
+  { head: 'eff.', align: 'right' },
+  { head: 'from', align: 'left' },
+];
+
+export function railSection(analysis: BoardAnalysis, palette: Palette): readonly string[] {
+  const results = [...analysis.rails.values()];
+  if (results.length === 0) return [];
+  const rows = results.map((result) => rowOf(result, palette));
+  const because = results.flatMap(({ rail, voltage, because: reason }) =>
+    voltage === null && reason !== undefined
+      ? [palette.faint(`  ${rail.name} is not computed: ${reason}`)]
+      : [],
+  );
+  return [palette.heading('Rails'), ...tableLines(columns, rows, palette.faint), ...because];
+}
+
+function rowOf(result: RailResult, palette: Palette): readonly Cell[] {
+  const { rail, voltage, ripple, headroom, efficiency, pump } = result;
+  const needed = rail.needs?.voltage;
+  const state = stateOf(result);
+  const paint = { good: palette.good, close: palette.close, bad: palette.bad, neutral: palette.faint }[state];
+  const mark = { good: '✓', close: '!', bad: '✗', neutral: '' }[state];
+  const current = pump?.heaviest.loadCurrent ?? result.current;
+  const rippleAllowed = rail.needs?.ripple?.max;
+  const noisy = ripple && rippleAllowed !== undefined && ripple.max > rippleAllowed;
+  return [
+    { text: mark, paint },
+    { text: rail.name, paint: palette.strong },
+    ...(voltage === null ? [empty, { text: '?', paint: palette.faint }, empty] : three(voltage)),
+    { text: needed ? formatBand(needed, 'V') : '' },
+    needed && voltage && needed.min < needed.max ? { text: windowStrip(needed, voltage), paint } : empty,
+    headroom === null ? empty : { text: formatQuantity(headroom, 'V', 2), paint },
+    ripple === null || pump === undefined
+      ? empty
+      : {
+          text: formatQuantity(pump.heaviest.ripple, 'V', 2),
+          ...(noisy ? { paint: noisyPaint(pump.heaviest.ripple > rippleAllowed, palette) } : {}),
+        },
+    { text: current === null ? '' : formatQuantity(current, 'A') },
+    { text: efficiency === null ? '' : formatPercent(efficiency, 2) },
+    { text: fromOf(result), paint: palette.faint },
+  ];
+}
+
+const empty: Cell = { text: '' };
+
+function noisyPaint(typical: boolean, palette: Palette): Paint {
+  return typical ? palette.bad : palette.close;
+}
+
+function three({ min, typical, max }: { min: number; typical: number; max: number }): readonly Cell[] {
+  const [low, middle, high] = [min, typical, max].map((value) => formatQuantity(value, 'V'));
+  // A band without width says the same thing three times.
+  if (min === max) return [empty, { text: middle ?? '' }, empty];
+  return [{ text: low ?? '' }, { text: middle ?? '' }, { text: high ?? '' }];
+}
+
+type State = 'good' | 'close' | 'bad' | 'neutral';
+
+function stateOf(result: RailResult): State {
+  const { needs } = result.rail;
+  if (result.pump?.points.some((point) => point.loadCurrent < 0.99 * point.askedCurrent)) return 'bad';
+  const misses = [missOf(result, 'weak'), missOf(result, 'strong')].filter((miss) => miss !== undefined);
+  const allowed = needs?.ripple?.max ?? Number.POSITIVE_INFINITY;
+  const { typical = 0, max = 0 } = result.ripple ?? {};
+  if (misses.some((miss) => miss.corner === undefined) || typical > allowed) return 'bad';
+  if (misses.length > 0 || max > allowed) return 'close';
+  return result.voltage && (needs?.voltage || needs?.ripple) ? 'good' : 'neutral';
+}
+
+function fromOf({ rail: { origin } }: RailResult): string {
+  switch (origin?.kind) {
+    case 'supply':
+      return `supply ${origin.supply.name}`;
+    case 'regulator':
+      return `regulator on ${origin.regulator.from?.name ?? '?'}`;
+    case 'filter':
+      return `filter on ${origin.filter.from?.name ?? '?'}`;
+    case 'pump': {
+      const { topology = 'pump', input } = origin.pump;
+      return input && input.name !== 'ground' ? `${topology} on ${input.name}` : topology;
+    }
+    default:
+      return '';
+  }
+}
