@@ -42,8 +42,12 @@ export interface Circuit {
   readonly baseEnd: Int32Array;
   readonly amps: Float64Array;
   readonly knee: Float64Array;
-  readonly knownVolts: readonly Float64Array[];
-  readonly base: readonly { readonly matrix: Envelope; readonly rhs: Float64Array }[];
+  /** Where each segment starts in the period, s. */
+  readonly segmentStart: Float64Array;
+  /** The resistors that end at a known potential. */
+  readonly knownResistors: Int32Array;
+  /** Matrix of all resistors, one per segment. */
+  readonly base: readonly Envelope[];
   readonly work: Envelope;
 }
 
@@ -79,14 +83,12 @@ export function prepare(network: Network): Circuit {
   const conductance = network.segments.map((_, s) =>
     Float64Array.from(network.resistors, (r) => 1 / Math.max(r.ohms[s]!, leastOhms)),
   );
-  const knownVolts = network.segments.map((_, s) => Float64Array.from(network.knowns, (k) => k.volts[s]!));
   const base = network.segments.map((_, s) => {
     const matrix = new Envelope(first);
-    const rhs = new Float64Array(nodes);
     matrix.diagonal.fill(nodeLeak);
     for (let r = 0; r < resistors.count; r++)
-      stamp(matrix, rhs, resistors, r, conductance[s]![r]!, 0, nodes, knownVolts[s]!);
-    return { matrix, rhs };
+      stampConductance(matrix, resistors, r, conductance[s]![r]!, nodes);
+    return matrix;
   });
   return {
     network,
@@ -112,7 +114,10 @@ export function prepare(network: Network): Circuit {
     baseEnd: Int32Array.from(network.diodes, ({ a, b, transfer }) => index(transfer?.base === 'b' ? b : a)),
     amps: Float64Array.from(network.loads, (l) => l.amps),
     knee: Float64Array.from(network.loads, (l) => l.knee),
-    knownVolts,
+    segmentStart: Float64Array.from(network.segments, (_, s) =>
+      network.segments.slice(0, s).reduce((sum, segment) => sum + segment.duration, 0),
+    ),
+    knownResistors: Int32Array.from(network.resistors.flatMap((r, k) => (r.a < 0 !== r.b < 0 ? [k] : []))),
     base,
     work,
   };
@@ -127,18 +132,41 @@ export function stamp(
   g: number,
   offset: number,
   nodes: number,
-  knownVolts: Float64Array,
+  volts: Float64Array,
+  at: number,
+): void {
+  stampConductance(matrix, branches, index, g, nodes);
+  stampSource(rhs, branches, index, g, offset, nodes, volts, at);
+}
+
+/** The right-hand side of a branch: its offset, and what flows to known potentials (`volts` from `at` on). */
+export function stampSource(
+  rhs: Float64Array,
+  branches: Branches,
+  index: number,
+  g: number,
+  offset: number,
+  nodes: number,
+  volts: Float64Array,
+  at: number,
 ): void {
   const a = branches.a[index]!;
   const b = branches.b[index]!;
-  if (a < nodes) {
-    matrix.diagonal[a] = matrix.diagonal[a]! + g;
-    rhs[a] = rhs[a]! - offset + (b >= nodes ? g * knownVolts[b - nodes]! : 0);
-  }
-  if (b < nodes) {
-    matrix.diagonal[b] = matrix.diagonal[b]! + g;
-    rhs[b] = rhs[b]! + offset + (a >= nodes ? g * knownVolts[a - nodes]! : 0);
-  }
+  if (a < nodes) rhs[a] = rhs[a]! - offset + (b >= nodes ? g * volts[at + b]! : 0);
+  if (b < nodes) rhs[b] = rhs[b]! + offset + (a >= nodes ? g * volts[at + a]! : 0);
+}
+
+function stampConductance(
+  matrix: Envelope,
+  branches: Branches,
+  index: number,
+  g: number,
+  nodes: number,
+): void {
+  const a = branches.a[index]!;
+  const b = branches.b[index]!;
+  if (a < nodes) matrix.diagonal[a] = matrix.diagonal[a]! + g;
+  if (b < nodes) matrix.diagonal[b] = matrix.diagonal[b]! + g;
   const position = branches.position[index]!;
   if (position >= 0) {
     matrix.lower[position] = matrix.lower[position]! - g;
@@ -157,15 +185,16 @@ export function stampTransfer(
   k: number,
   g: number,
   offset: number,
-  known: Float64Array,
+  volts: Float64Array,
+  at: number,
 ): void {
   const alpha = circuit.alpha[k]!;
   const a = circuit.diodes.a[k]!;
   const b = circuit.diodes.b[k]!;
   const from = circuit.collector[k]!;
   const to = circuit.baseEnd[k]!;
-  stampRow(matrix, rhs, circuit.nodes, from, a, b, alpha * g, alpha * offset, known);
-  stampRow(matrix, rhs, circuit.nodes, to, a, b, -alpha * g, -alpha * offset, known);
+  stampRow(matrix, rhs, circuit.nodes, from, a, b, alpha * g, alpha * offset, volts, at);
+  stampRow(matrix, rhs, circuit.nodes, to, a, b, -alpha * g, -alpha * offset, volts, at);
 }
 
 function stampRow(
@@ -177,12 +206,13 @@ function stampRow(
   b: number,
   gm: number,
   offset: number,
-  known: Float64Array,
+  volts: Float64Array,
+  at: number,
 ): void {
   if (row >= nodes) return;
   rhs[row] = rhs[row]! - offset;
   if (a < nodes) matrix.add(row, a, gm);
-  else rhs[row] = rhs[row]! - gm * known[a - nodes]!;
+  else rhs[row] = rhs[row]! - gm * volts[at + a]!;
   if (b < nodes) matrix.add(row, b, -gm);
-  else rhs[row] = rhs[row]! + gm * known[b - nodes]!;
+  else rhs[row] = rhs[row]! + gm * volts[at + b]!;
 }

@@ -4,6 +4,7 @@
 export type { ElementFigures, KnownFigures, Measures, NodeFigures } from './measure';
 export {
   type Capacitor,
+  type Course,
   type CurrentLoad,
   type Diode,
   type Known,

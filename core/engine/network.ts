@@ -12,10 +12,13 @@ export interface Segment {
   readonly duration: number;
 }
 
+/** A value that holds over a segment, or one that goes in a straight line from the first to the second. */
+export type Course = number | readonly [number, number];
+
 export interface Known {
   readonly name: string;
   /** Volt, one per segment. */
-  readonly volts: readonly number[];
+  readonly volts: readonly Course[];
 }
 
 export interface Resistor {
@@ -100,7 +103,7 @@ export function networkFault(network: Network): string | undefined {
   if (!network.segments.every((s) => s.duration > 0 && Number.isFinite(s.duration)))
     return 'a segment of the clock period has no length';
   for (const known of network.knowns)
-    if (known.volts.length !== segments || !known.volts.every(Number.isFinite))
+    if (known.volts.length !== segments || !known.volts.flat().every(Number.isFinite))
       return `${known.name}: a potential is missing or not finite`;
   const groups = [network.resistors, network.capacitors, network.diodes, network.loads];
   for (const element of groups.flat())
@@ -119,4 +122,9 @@ export function networkFault(network: Network): string | undefined {
   for (const l of network.loads)
     if (!(Number.isFinite(l.amps) && l.knee > 0)) return `${l.name}: a load current must be finite`;
   return undefined;
+}
+
+/** Value of a course at a share 0..1 of its segment. */
+export function courseAt(course: Course, share: number): number {
+  return typeof course === 'number' ? course : course[0] + share * (course[1] - course[0]);
 }

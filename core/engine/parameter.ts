@@ -3,12 +3,13 @@
  * natural logarithm), potentials in volt, the injected current in ampere.
  */
 import type { Circuit } from './circuit';
-import type { Terminal } from './network';
+import { type Course, courseAt, type Terminal } from './network';
 import type { Trajectory } from './trajectory';
 
 export type Parameter =
   | { readonly kind: 'ohms'; readonly index: number /** Only in this segment. */; readonly segment?: number }
-  | { readonly kind: 'volts'; readonly index: number; readonly segment?: number }
+  /** `share` is how far the potential follows in each segment; everywhere in full when left out. */
+  | { readonly kind: 'volts'; readonly index: number; readonly share?: readonly Course[] }
   | {
       readonly kind: 'farads' | 'esr' | 'saturation' | 'slope' | 'diode-ohms' | 'amps';
       readonly index: number;
@@ -42,8 +43,11 @@ export function parameterCurrent(
       return;
     }
     case 'volts': {
-      if (parameter.segment !== undefined && parameter.segment !== segment) return;
-      knownCurrent(circuit, path, s, nodes + parameter.index, add);
+      const share = followed(circuit, path, s, parameter.share);
+      if (share !== 0)
+        knownCurrent(circuit, path, s, nodes + parameter.index, (a, b, current) => {
+          add(a, b, share * current);
+        });
       return;
     }
     case 'farads':
@@ -92,8 +96,9 @@ export function parameterState(
   column: number,
 ): void {
   if (parameter.kind === 'volts') {
-    if (parameter.segment === undefined || parameter.segment === path.segment[s])
-      knownState(circuit, path, s, circuit.nodes + parameter.index, state, at, columns, column);
+    const share = followed(circuit, path, s, parameter.share);
+    if (share !== 0)
+      knownState(circuit, path, s, circuit.nodes + parameter.index, share, state, at, columns, column);
     return;
   }
   if (parameter.kind !== 'farads' && parameter.kind !== 'esr') return;
@@ -107,12 +112,26 @@ export function parameterState(
   state[index] = state[index]! + shift;
 }
 
+/** How far the potential follows its parameter at stage `s`, 0..1. */
+function followed(
+  circuit: Circuit,
+  path: Trajectory,
+  s: number,
+  share: readonly Course[] | undefined,
+): number {
+  if (!share) return 1;
+  const segment = path.segment[s]!;
+  const { duration } = circuit.network.segments[segment]!;
+  return courseAt(share[segment]!, (path.time[s]! - circuit.segmentStart[segment]!) / duration);
+}
+
 /** A capacitor that stands on the potential is pushed along with it. */
 function knownState(
   circuit: Circuit,
   path: Trajectory,
   s: number,
   known: number,
+  share: number,
   state: Float64Array,
   at: number,
   columns: number,
@@ -124,7 +143,7 @@ function knownState(
     if (sign === 0) continue;
     const reach = path.reach[s]! / circuit.farads[k]!;
     const index = at + k * columns + column;
-    state[index] = state[index]! + (sign * reach) / (reach + circuit.esr[k]!);
+    state[index] = state[index]! + (share * sign * reach) / (reach + circuit.esr[k]!);
   }
 }
 

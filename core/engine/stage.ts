@@ -3,7 +3,7 @@
  * every diode and load as a straight line, solved for voltages and, when asked, for their derivatives with
  * respect to the state at the start of the period and to parameters.
  */
-import { type Circuit, stamp, stampTransfer } from './circuit';
+import { type Circuit, stamp, stampSource, stampTransfer } from './circuit';
 import { moveLine, openingLine } from './diode';
 import { loadConductance, loadCurrent } from './load';
 import { type Parameter, parameterCurrent, parameterState } from './parameter';
@@ -36,25 +36,27 @@ export function derivatives(circuit: Circuit, stages: number, parameters: readon
 export function solveStage(circuit: Circuit, path: Trajectory, s: number): boolean {
   const { nodes, knowns, capacitors, diodes, loads, work } = circuit;
   const segment = path.segment[s]!;
-  const base = circuit.base[segment]!;
-  const known = circuit.knownVolts[segment]!;
   const at = s * (nodes + knowns);
   const volts = path.volts;
   const rhs = circuit.work.scratch;
-  work.copy(base.matrix);
-  rhs.set(base.rhs);
+  work.copy(circuit.base[segment]!);
+  rhs.fill(0);
+  for (let n = 0; n < circuit.knownResistors.length; n++) {
+    const k = circuit.knownResistors[n]!;
+    stampSource(rhs, circuit.resistors, k, circuit.conductance[segment]![k]!, 0, nodes, volts, at);
+  }
   const c0 = s * capacitors.count;
   for (let k = 0; k < capacitors.count; k++) {
     const g = 1 / (path.reach[s]! / circuit.farads[k]! + circuit.esr[k]!);
-    stamp(work, rhs, capacitors, k, g, -g * path.origin[c0 + k]!, nodes, known);
+    stamp(work, rhs, capacitors, k, g, -g * path.origin[c0 + k]!, nodes, volts, at);
   }
   const d0 = s * diodes.count;
   const { i, u, g } = path.lines;
   for (let k = 0; k < diodes.count; k++) {
     const slope = g[d0 + k]!;
     const offset = i[d0 + k]! - slope * u[d0 + k]!;
-    stamp(work, rhs, diodes, k, slope, offset, nodes, known);
-    if (circuit.alpha[k] !== 0) stampTransfer(work, rhs, circuit, k, slope, offset, known);
+    stamp(work, rhs, diodes, k, slope, offset, nodes, volts, at);
+    if (circuit.alpha[k] !== 0) stampTransfer(work, rhs, circuit, k, slope, offset, volts, at);
   }
   const l0 = s * loads.count;
   for (let k = 0; k < loads.count; k++) {
@@ -68,7 +70,8 @@ export function solveStage(circuit: Circuit, path: Trajectory, s: number): boole
       slope,
       loadCurrent(circuit.amps[k]!, circuit.knee[k]!, v) - slope * v,
       nodes,
-      known,
+      volts,
+      at,
     );
   }
   if (!work.factor()) return false;

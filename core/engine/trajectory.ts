@@ -8,6 +8,7 @@
  */
 import type { Circuit } from './circuit';
 import { type DiodeLines, diodeLines } from './diode';
+import { courseAt } from './network';
 
 export const gamma = 1 - Math.SQRT1_2;
 
@@ -107,7 +108,11 @@ export function placeStep(
     path.weight[s] =
       kind === Step.probe ? 0 : kind === Step.euler ? length : final ? gamma * length : (1 - gamma) * length;
     path.time[s] = start + (final ? length : gamma * length);
-    path.volts.set(circuit.knownVolts[segment]!, s * (circuit.nodes + circuit.knowns) + circuit.nodes);
+    const share =
+      (path.time[s]! - circuit.segmentStart[segment]!) / circuit.network.segments[segment]!.duration;
+    const known = s * (circuit.nodes + circuit.knowns) + circuit.nodes;
+    for (let k = 0; k < circuit.knowns; k++)
+      path.volts[known + k] = courseAt(circuit.network.knowns[k]!.volts[segment]!, share);
   }
   return at + stages;
 }

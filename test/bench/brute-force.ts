@@ -16,7 +16,7 @@ export function settle(network: Network, output: number, target: number, most: n
   const circuit = prepare(network);
   const count = circuit.capacitors.count;
   const state = new Float64Array(count);
-  const reach = Math.max(...network.knowns.flatMap((known) => known.volts.map(Math.abs)));
+  const reach = Math.max(...network.knowns.flatMap((known) => known.volts.flat().map(Math.abs)));
   const swing = new Float64Array(count).fill(reach / 10);
   let seed = coarseMesh(circuit, 1);
   let average = 0;

@@ -46,7 +46,7 @@ function moved(network: Network, parameter: Parameter, step: number): Network {
         ...network,
         knowns: network.knowns.map((known, k) =>
           k === parameter.index
-            ? { ...known, volts: known.volts.map((v, s) => (s === (parameter.segment ?? s) ? v + step : v)) }
+            ? { ...known, volts: known.volts.map((v) => (typeof v === 'number' ? v + step : v)) }
             : known,
         ),
       };
