@@ -23,7 +23,7 @@ export const benchShape = shape(
     ),
     voltage: row(quantity('V'), 'Measured voltage.', '5.62 V', needed),
     ripple: row(quantity('V', notNegative), 'Measured ripple, peak to peak.', '18 mV'),
-    note: row(text, 'How it was measured.', 'meter, board 3'),
+    note: row(text, 'How it was measured.', 'with a bench meter on board 3'),
   },
 );
 
@@ -39,7 +39,7 @@ function section(entry: Shape, example: string, computed?: typeof later) {
 }
 
 export const boardShape = shape('board file', 'The rails of one board.', {
-  board: row(text, 'Title of the board.', 'Orchard frost logger, rev C'),
+  board: row(text, 'Title of the board.', 'Weir gauge rev B'),
   conditions: row(map(conditionsShape), conditionsShape.doc, '{ ambient: -20..45 degC }'),
   supplies: section(supplyShape, '{ port: { standard: usb-2-configured } }'),
   chips: section(chipShape, '{ mcu: { part: rp2040, rail: v3 } }'),

@@ -4,7 +4,7 @@
 import { list, map, notNegative, positive, quantity, row, shape, table, text } from './shape';
 
 const later = { computed: false } as const;
-export const sourceRow = row(text, 'Where the figures of this entry come from.', 'data sheet, revision 4');
+export const sourceRow = row(text, 'Where the figures of this entry come from.', 'data sheet revision 4');
 
 export const testPointShape = shape('test point', "One line of a data sheet's output table.", {
   current: row(quantity('A', positive), 'Current of the pin, as a magnitude.', '4 mA', { required: true }),
