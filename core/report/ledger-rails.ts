@@ -4,7 +4,7 @@
 
 import type { BoardAnalysis, RailResult } from '../analysis/types';
 import { missOf } from '../analysis/window';
-import { formatBand, formatPercent, formatQuantity } from '../quantity/write';
+import { formatPercent, formatQuantity } from '../quantity/write';
 import { windowStrip } from './bar';
 import type { Paint, Palette } from './paint';
 import { type Cell, type Column, tableLines } from './table';
@@ -12,10 +12,10 @@ import { type Cell, type Column, tableLines } from './table';
 const columns: readonly Column[] = [
   { head: '', align: 'left' },
   { head: 'rail', align: 'left' },
-  { head: 'lowest', align: 'right' },
-  { head: 'typical', align: 'right' },
-  { head: 'highest', align: 'right' },
-  { head: 'needs', align: 'left' },
+  { head: 'low V', align: 'right' },
+  { head: 'typ V', align: 'right' },
+  { head: 'high V', align: 'right' },
+  { head: 'needs V', align: 'left' },
   { head: '[window]', align: 'left' },
   { head: 'spare', align: 'right' },
   { head: 'ripple', align: 'right' },
@@ -49,7 +49,7 @@ function rowOf(result: RailResult, palette: Palette): readonly Cell[] {
     { text: mark, paint },
     { text: rail.name, paint: palette.strong },
     ...(voltage === null ? [empty, { text: '?', paint: palette.faint }, empty] : three(voltage)),
-    { text: needed ? formatBand(needed, 'V') : '' },
+    { text: needed ? windowWords(needed) : '' },
     needed && voltage && needed.min < needed.max ? { text: windowStrip(needed, voltage), paint } : empty,
     headroom === null ? empty : { text: formatQuantity(headroom, 'V', 2), paint },
     ripple === null || pump === undefined
@@ -71,10 +71,22 @@ function noisyPaint(typical: boolean, palette: Palette): Paint {
 }
 
 function three({ min, typical, max }: { min: number; typical: number; max: number }): readonly Cell[] {
-  const [low, middle, high] = [min, typical, max].map((value) => formatQuantity(value, 'V'));
+  const [low, middle, high] = [min, typical, max].map(plainVolts);
   // A band without width says the same thing three times.
   if (min === max) return [empty, { text: middle ?? '' }, empty];
   return [{ text: low ?? '' }, { text: middle ?? '' }, { text: high ?? '' }];
+}
+
+/** Three digits and always as many of them, so that the points of a column stand beneath each other. */
+function plainVolts(value: number): string {
+  return Math.abs(value) < 1000 ? value.toPrecision(3) : String(Math.round(value));
+}
+
+/** One figure asks for at least that much, in magnitude. */
+function windowWords({ min, max }: { min: number; max: number }): string {
+  const short = (value: number) => String(Number(value.toPrecision(4)));
+  if (min === max) return min < 0 ? `<= ${short(min)}` : `>= ${short(min)}`;
+  return `${short(min)}..${short(max)}`;
 }
 
 type State = 'good' | 'close' | 'bad' | 'neutral';
