@@ -12,7 +12,7 @@ import { hoverCard as cardAt } from './features/hover';
 import { railAt as findRail, pumpRails as listPumpRails, type PumpRail } from './features/rails';
 import { type Sizing, sizeRail as size } from './features/size-rail';
 import { toReport } from './report/json';
-import { type LedgerOptions, ledgerText as writeLedger } from './report/ledger';
+import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
 
@@ -48,11 +48,18 @@ export function analyse(text: string, options: { readonly file: string }): Analy
   return { text, findings, report: toReport(board, findings, `${toolName} ${toolVersion}`), board };
 }
 
-/** The board's ledger for a terminal: rails, pins, supplies and findings as aligned text. */
-export function ledgerText(analysis: Analysis, options: { readonly colour: boolean }): string {
-  const palette = options.colour ? colourPalette : plainPalette;
-  const settings: LedgerOptions = { palette };
-  return writeLedger(analysis.board, analysis.findings, settings);
+/**
+ * The board's ledger for a terminal of `width` characters: rails, pins, supplies and findings as aligned text, the
+ * findings as `file:line:column severity code message`.
+ */
+export function ledgerText(
+  analysis: Analysis,
+  { colour, width }: { readonly colour: boolean; readonly width: number },
+): string {
+  return writeLedger(analysis.board, analysis.findings, {
+    palette: colour ? colourPalette : plainPalette,
+    width,
+  });
 }
 
 /** The card about the thing at a text offset, or nothing. */

@@ -15,11 +15,11 @@ const columns: readonly Column[] = [
   { head: 'peak', align: 'right' },
   { head: 'limit', align: 'right' },
   { head: 'use', align: 'right' },
-  { head: '', align: 'left' },
-  { head: 'drives', align: 'left' },
+  { head: '', align: 'left', spare: 2 },
+  { head: 'drives', align: 'left', spare: 1 },
 ];
 
-export function pinSection(analysis: BoardAnalysis, palette: Palette): readonly string[] {
+export function pinSection(analysis: BoardAnalysis, palette: Palette, width: number): readonly string[] {
   const rows = [
     ...[...analysis.pins.values()].map((pin) => pinRow(pin, palette)),
     ...[...analysis.groups.values()].map((group) =>
@@ -46,7 +46,7 @@ export function pinSection(analysis: BoardAnalysis, palette: Palette): readonly 
       ),
   ];
   if (rows.length === 0) return [];
-  return [palette.heading('Pins'), ...tableLines(columns, rows, palette.faint)];
+  return [palette.heading('Pins'), ...tableLines(columns, rows, palette.faint, width)];
 }
 
 function pinRow(pin: PinResult, palette: Palette): readonly Cell[] {

@@ -16,15 +16,15 @@ const columns: readonly Column[] = [
   { head: 'typ V', align: 'right' },
   { head: 'high V', align: 'right' },
   { head: 'needs V', align: 'left' },
-  { head: '[window]', align: 'left' },
+  { head: '[window]', align: 'left', spare: 3 },
   { head: 'spare', align: 'right' },
   { head: 'ripple', align: 'right' },
   { head: 'load', align: 'right' },
-  { head: 'eff.', align: 'right' },
-  { head: 'from', align: 'left' },
+  { head: 'eff.', align: 'right', spare: 2 },
+  { head: 'from', align: 'left', spare: 1 },
 ];
 
-export function railSection(analysis: BoardAnalysis, palette: Palette): readonly string[] {
+export function railSection(analysis: BoardAnalysis, palette: Palette, width: number): readonly string[] {
   const results = [...analysis.rails.values()];
   if (results.length === 0) return [];
   const rows = results.map((result) => rowOf(result, palette));
@@ -33,7 +33,7 @@ export function railSection(analysis: BoardAnalysis, palette: Palette): readonly
       ? [palette.faint(`  ${rail.name} is not computed: ${reason}`)]
       : [],
   );
-  return [palette.heading('Rails'), ...tableLines(columns, rows, palette.faint), ...because];
+  return [palette.heading('Rails'), ...tableLines(columns, rows, palette.faint, width), ...because];
 }
 
 function rowOf(result: RailResult, palette: Palette): readonly Cell[] {

@@ -10,20 +10,20 @@ import { type Cell, type Column, tableLines } from './table';
 const columns: readonly Column[] = [
   { head: 'supply', align: 'left' },
   { head: 'voltage', align: 'right' },
-  { head: 'least', align: 'right' },
+  { head: 'least', align: 'right', spare: 1 },
   { head: 'average', align: 'right' },
   { head: 'most', align: 'right' },
   { head: 'limit', align: 'right' },
   { head: 'use', align: 'right' },
-  { head: '', align: 'left' },
+  { head: '', align: 'left', spare: 2 },
   { head: 'power', align: 'right' },
 ];
 
-export function supplySection(analysis: BoardAnalysis, palette: Palette): readonly string[] {
+export function supplySection(analysis: BoardAnalysis, palette: Palette, width: number): readonly string[] {
   const results = [...analysis.supplies.values()];
   if (results.length === 0) return [];
   const rows = results.map((result) => rowOf(result, palette));
-  return [palette.heading('Supplies'), ...tableLines(columns, rows, palette.faint)];
+  return [palette.heading('Supplies'), ...tableLines(columns, rows, palette.faint, width)];
 }
 
 function rowOf(

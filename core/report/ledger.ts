@@ -12,20 +12,22 @@ import type { Palette } from './paint';
 
 export interface LedgerOptions {
   readonly palette: Palette;
+  /** Characters on a line; tables leave out what they can spare. */
+  readonly width: number;
 }
 
 /** `findings` are all of the board, in the order to print them. Ends in a line break. */
 export function ledgerText(
   analysis: BoardAnalysis,
   findings: readonly Finding[],
-  { palette }: LedgerOptions,
+  { palette, width }: LedgerOptions,
 ): string {
   const title = analysis.reading.board.title ?? 'Board without a title';
   const sections = [
     [`${palette.strong(title)}  ${palette.faint(analysis.file)}`],
-    railSection(analysis, palette),
-    pinSection(analysis, palette),
-    supplySection(analysis, palette),
+    railSection(analysis, palette, width),
+    pinSection(analysis, palette, width),
+    supplySection(analysis, palette, width),
     findingLines(analysis, findings, palette),
     [summary(findings, palette)],
   ];

@@ -1,0 +1,17 @@
+/**
+ * Everything that the command line asks of the machine, as one object, so that tests can stand in for it.
+ */
+
+export interface Io {
+  readonly cwd: string;
+  readonly env: Readonly<Record<string, string | undefined>>;
+  /** Is standard output a terminal, and how wide. */
+  readonly isTerminal: boolean;
+  readonly width: number | undefined;
+  out(text: string): void;
+  err(text: string): void;
+  /** Bytes of a file; rejects as Node's file system does. */
+  readFile(path: string): Promise<Uint8Array>;
+  isFile(path: string): Promise<boolean>;
+  readInput(): Promise<Uint8Array>;
+}
