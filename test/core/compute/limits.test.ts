@@ -72,6 +72,27 @@ describe('slow limit', () => {
       1e-3,
     );
   });
+  // Sipex SP682 data sheet, 2000, table of output resistance: switches of 84 ohm in all and 2/(f C) of two flying capacitors
+  // at 10 kHz (both read off the table's own numbers).
+  it.each([
+    [0.05e-6, 4085],
+    [0.1e-6, 2084],
+    [0.47e-6, 510],
+    [1e-6, 285],
+    [3.3e-6, 140],
+    [4.7e-6, 125],
+    [10e-6, 105],
+    [22e-6, 94],
+  ])("of two capacitors of %d F explains a data sheet's %d ohm", (farads, ohms) => {
+    const slow = slowLimit({
+      topology: 'multiplier',
+      stages: 2,
+      flyingF: [farads],
+      smoothingF: [],
+      frequencyHz: 1e4,
+    })!;
+    expectNear(84 + slow, ohms, 0.035);
+  });
   it('has no answer for a list of the wrong length or a value of zero', () => {
     expect(slowLimit({ topology: 'multiplier', stages: 3, ...equal, flyingF: [1e-6, 1e-6] })).toBeUndefined();
     expect(slowLimit({ topology: 'doubler', stages: 1, ...equal, flyingF: [0] })).toBeUndefined();

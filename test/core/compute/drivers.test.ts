@@ -1,0 +1,85 @@
+import { describe, expect, it } from 'vitest';
+import { crossingCharge, gateCurrent } from '../../../core/compute/gate-drive';
+import {
+  saturatingCurrent,
+  saturatingDrop,
+  saturatingOnResistance,
+} from '../../../core/compute/saturating-output';
+import { thermalVoltage } from '../../../core/compute/thermal-voltage';
+import { saturationVoltage, storageTime } from '../../../core/compute/transistor-saturation';
+import { expectNear } from '../../support/near';
+
+describe('saturating CMOS output', () => {
+  const output = { saturationA: 80e-3, saturationV: 2.5 };
+  // Shichman and Hodges 1968, worked by hand.
+  it('carries 28.8 mA at 0.5 V and drops 0.3349 V at 20 mA', () => {
+    expectNear(saturatingCurrent(output, 0.5), 28.8e-3, 1e-9);
+    expectNear(saturatingDrop(output, 20e-3), 0.3349, 2e-4);
+    expectNear(saturatingOnResistance(output), 15.63, 5e-4);
+  });
+  it('carries no more beyond saturation, where the drop is unknown', () => {
+    expect(saturatingCurrent(output, 4)).toBe(80e-3);
+    expect(saturatingDrop(output, 80e-3)).toBeUndefined();
+    expect(saturatingCurrent(output, -1)).toBeUndefined();
+  });
+});
+
+describe('saturated transistor', () => {
+  const is = 1e-14;
+  const vt = thermalVoltage(298.15)!;
+  const transistor = { gain: 200, reverseGain: 5, thermalV: vt, collectorOhm: 0 };
+  // Ebers and Moll 1954, both currents solved together for the two junction voltages.
+  it('keeps 31.20 mV at 10 mA and 69.46 mV at 50 mA with 1 mA of base current', () => {
+    expectNear(saturationVoltage(transistor, 10e-3, 1e-3), 31.2e-3, 5e-4);
+    expectNear(saturationVoltage(transistor, 50e-3, 1e-3), 69.46e-3, 5e-4);
+  });
+  // The equations themselves: junction exponentials from the currents, put back.
+  it('satisfies the transport equations at a point between', () => {
+    const [ic, ib] = [23e-3, 0.7e-3];
+    // ic = Is (E - C) - (Is/bR)(C - 1), ib = (Is/bF)(E - 1) + (Is/bR)(C - 1), linear in E and C.
+    const [a, b, c, d] = [is, -is - is / 5, is / 200, is / 5];
+    const [p, q] = [ic - is / 5, ib + is / 200 + is / 5];
+    const determinant = a * d - b * c;
+    const e = (p * d - b * q) / determinant;
+    const col = (a * q - c * p) / determinant;
+    expectNear(saturationVoltage(transistor, ic, ib), vt * Math.log(e / col), 1e-6);
+  });
+  it('has no answer when it does not saturate', () => {
+    expect(saturationVoltage(transistor, 0.25, 1e-3)).toBeUndefined();
+  });
+  // Charge control model worked by hand: 200 ns ln(2/1.05).
+  it('stays on for 128.9 ns', () => {
+    expectNear(storageTime(200e-9, 1e-3, -1e-3, 10e-3, 200), 128.9e-9, 5e-4);
+    expect(storageTime(200e-9, 1e-3, 0, 10e-3, 200)).toBeUndefined();
+  });
+});
+
+describe('MOSFET pair', () => {
+  it('takes charge times frequency at its gates', () => {
+    // Definition of charge: 5 nC at 100 kHz, 5 V: 0.5 mA and 2.5 mW.
+    expectNear(gateCurrent(5e-9, 100e3), 0.5e-3, 1e-12);
+    expectNear(gateCurrent(5e-9, 100e3)! * 5, 2.5e-3, 1e-12);
+  });
+  // Veendrick 1984: (beta/12)(VDD - 2 Vt)^3 tau f is 0.9 mW for 20 mA/V^2, 5 V, 1 V, 20 ns, 1 MHz.
+  it('burns the published short-circuit power', () => {
+    const pair = { beta: 20e-3, thresholdV: 1, supplyV: 5, rampS: 20e-9 };
+    expectNear(crossingCharge(pair), 90e-12, 1e-9);
+    expectNear(2 * crossingCharge(pair)! * 5 * 1e6, 0.9e-3, 1e-9);
+  });
+  // Plain quadrature of the saturated current of whichever transistor conducts less, over one linear ramp.
+  it('agrees with the integral of its current', () => {
+    const [beta, vt, vdd, tau] = [8e-3, 0.8, 3.3, 50e-9];
+    const steps = 20000;
+    let charge = 0;
+    for (let i = 0; i < steps; i++) {
+      const gate = ((i + 0.5) / steps) * vdd;
+      const over = Math.max(0, Math.min(gate, vdd - gate) - vt);
+      charge += (beta / 2) * over ** 2 * (tau / steps);
+    }
+    expectNear(crossingCharge({ beta, thresholdV: vt, supplyV: vdd, rampS: tau }), charge, 1e-5);
+  });
+  it('does not conduct below both thresholds together', () => {
+    expect(crossingCharge({ beta: 1e-3, thresholdV: 1, supplyV: 1.8, rampS: 1e-8 })).toBe(0);
+    expect(crossingCharge({ beta: 1e-3, thresholdV: 1, supplyV: 0, rampS: 1e-8 })).toBeUndefined();
+  });
+});
