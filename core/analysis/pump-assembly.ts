@@ -148,7 +148,7 @@ export function assemblePump(parts: PumpParts): PumpModel | undefined {
     });
     loads.forEach((load, k) => {
       const { index } = at.loads[k]!;
-      tie(load.variable, load.kind === 'resistance' ? { kind: 'ohms', index } : { kind: 'amps', index });
+      tie(load.variable, load.kind === 'resistance' ? { kind: 'ohms', index } : { kind: 'load', index });
     });
     return list;
   };

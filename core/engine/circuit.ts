@@ -6,7 +6,8 @@
  * reads both its terminals the same way.
  */
 import { Envelope } from './envelope';
-import { leastOhms, type Network, nodeLeak, type Terminal } from './network';
+import type { LoadLaw } from './load';
+import { courseAt, leastOhms, type Network, nodeLeak, type Terminal } from './network';
 import { orderNodes } from './ordering';
 
 /** Two-terminal elements of one kind: indices into the voltage array, and the place of their off-diagonal. */
@@ -40,12 +41,11 @@ export interface Circuit {
   readonly alpha: Float64Array;
   readonly collector: Int32Array;
   readonly baseEnd: Int32Array;
-  readonly amps: Float64Array;
-  readonly knee: Float64Array;
+  readonly laws: readonly LoadLaw[];
   /** Where each segment starts in the period, s. */
   readonly segmentStart: Float64Array;
-  /** The resistors that end at a known potential. */
-  readonly knownResistors: Int32Array;
+  /** The resistors that end at a known potential or have a drop: those with a right-hand side. */
+  readonly sources: Int32Array;
   /** Matrix of all resistors, one per segment. */
   readonly base: readonly Envelope[];
   readonly work: Envelope;
@@ -112,12 +112,15 @@ export function prepare(network: Network): Circuit {
     ),
     collector: Int32Array.from(network.diodes, ({ transfer }) => (transfer ? index(transfer.terminal) : -1)),
     baseEnd: Int32Array.from(network.diodes, ({ a, b, transfer }) => index(transfer?.base === 'b' ? b : a)),
-    amps: Float64Array.from(network.loads, (l) => l.amps),
-    knee: Float64Array.from(network.loads, (l) => l.knee),
+    laws: network.loads.map((load) => ({
+      power: 'watts' in load,
+      size: 'watts' in load ? load.watts : load.amps,
+      knee: load.knee,
+    })),
+    sources: Int32Array.from(network.resistors.flatMap((r, k) => (r.drop || r.a < 0 !== r.b < 0 ? [k] : []))),
     segmentStart: Float64Array.from(network.segments, (_, s) =>
       network.segments.slice(0, s).reduce((sum, segment) => sum + segment.duration, 0),
     ),
-    knownResistors: Int32Array.from(network.resistors.flatMap((r, k) => (r.a < 0 !== r.b < 0 ? [k] : []))),
     base,
     work,
   };
@@ -215,4 +218,12 @@ function stampRow(
   else rhs[row] = rhs[row]! - gm * volts[at + a]!;
   if (b < nodes) matrix.add(row, b, -gm);
   else rhs[row] = rhs[row]! + gm * volts[at + b]!;
+}
+
+/** Drop of resistor `k` at a moment of the period, V. */
+export function dropAt(circuit: Circuit, k: number, segment: number, time: number): number {
+  const { drop } = circuit.network.resistors[k]!;
+  if (!drop) return 0;
+  const { duration } = circuit.network.segments[segment]!;
+  return courseAt(drop[segment]!, (time - circuit.segmentStart[segment]!) / duration);
 }

@@ -10,6 +10,7 @@ export {
   type Known,
   type Network,
   networkFault,
+  type PowerLoad,
   type Resistor,
   type Segment,
   type Terminal,

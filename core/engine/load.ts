@@ -1,13 +1,34 @@
 /**
- * Loads that draw a constant current while they can: linearised about the voltage they see.
+ * Loads that are no resistors: a current that holds while it can, or a constant power. Linearised about the voltage
+ * that they see.
  */
 
-/** Current at voltage `v`, A. */
-export function loadCurrent(amps: number, knee: number, v: number): number {
-  return v > 0 ? -amps * Math.expm1(-v / knee) : (amps * v) / knee;
+/** `size` is ampere, or watt for a load of constant power; `knee` as in the network's description. */
+export interface LoadLaw {
+  readonly power: boolean;
+  readonly size: number;
+  readonly knee: number;
 }
 
-/** Slope of the current at voltage `v`, S. */
-export function loadConductance(amps: number, knee: number, v: number): number {
-  return (amps / knee) * (v > 0 ? Math.exp(-v / knee) : 1);
+/** Current at voltage `v`, A. */
+export function loadCurrent({ power, size, knee }: LoadLaw, v: number): number {
+  if (power) return v > knee ? size / v : (size * v) / (knee * knee);
+  return v > 0 ? -size * Math.expm1(-v / knee) : (size * v) / knee;
+}
+
+/** Slope of the current at voltage `v`, S. Negative for a constant power above its knee. */
+export function loadConductance({ power, size, knee }: LoadLaw, v: number): number {
+  if (power) return v > knee ? -size / (v * v) : size / (knee * knee);
+  return (size / knee) * (v > 0 ? Math.exp(-v / knee) : 1);
+}
+
+/**
+ * Error of the straight line about `old` when the voltage turns out as `v`, seen as a voltage: in the flat part of the
+ * curve a move of any size changes nothing, so the current's error is what counts.
+ */
+export function lineError(law: LoadLaw, old: number, v: number): number {
+  const unit = { ...law, size: 1 };
+  const off = loadCurrent(unit, v) - loadCurrent(unit, old) - loadConductance(unit, old) * (v - old);
+  const scale = law.power ? Math.max(v, law.knee) ** 2 : law.knee;
+  return scale * Math.abs(off);
 }

@@ -1,7 +1,7 @@
 /**
  * What a solved period says about every node and element: averages, extremes, losses, and the energy balance.
  */
-import type { Branches, Circuit } from './circuit';
+import { type Branches, type Circuit, dropAt } from './circuit';
 import { loadCurrent } from './load';
 import { nodeLeak } from './network';
 import { Step, type Trajectory } from './trajectory';
@@ -101,7 +101,9 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
   const resistors = collect(
     network.resistors,
     circuit.resistors,
-    (s, k, across) => circuit.conductance[path.segment[s]!]![k]! * across,
+    (s, k, across) =>
+      circuit.conductance[path.segment[s]!]![k]! *
+      (across - dropAt(circuit, k, path.segment[s]!, path.time[s]!)),
   );
   const count = circuit.capacitors.count;
   const capacitors = collect(
@@ -117,7 +119,7 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
     (s, k) => path.lines.i[s * circuit.diodes.count + k]!,
   );
   const loads = collect(network.loads, circuit.loads, (_s, k, across) =>
-    loadCurrent(circuit.amps[k]!, circuit.knee[k]!, across),
+    loadCurrent(circuit.laws[k]!, across),
   );
   const nodeFigures = network.nodeNames.map((name, n) => {
     const sum = newSum();

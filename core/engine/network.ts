@@ -27,6 +27,8 @@ export interface Resistor {
   readonly b: Terminal;
   /** Ohm, one per segment, above 0: a pin's resistance changes with its level. */
   readonly ohms: readonly number[];
+  /** Volts that must stand across it before current flows from a to b: a fixed drop in series. One per segment. */
+  readonly drop?: readonly Course[];
 }
 
 export interface Capacitor {
@@ -78,6 +80,20 @@ export interface CurrentLoad {
   readonly knee: number;
 }
 
+/**
+ * A load that takes a constant power: `watts / v` from `knee` upward, falling in proportion to v below it. It may have
+ * two operating points; the iteration starts at `start` volt, so that the higher one is found when it exists.
+ */
+export interface PowerLoad {
+  readonly name: string;
+  readonly a: Terminal;
+  readonly b: Terminal;
+  readonly watts: number;
+  /** Lowest voltage at which it still takes its power, V, above 0. */
+  readonly knee: number;
+  readonly start: number;
+}
+
 export interface Network {
   /** One clock period, in order. */
   readonly segments: readonly Segment[];
@@ -86,7 +102,7 @@ export interface Network {
   readonly resistors: readonly Resistor[];
   readonly capacitors: readonly Capacitor[];
   readonly diodes: readonly Diode[];
-  readonly loads: readonly CurrentLoad[];
+  readonly loads: readonly (CurrentLoad | PowerLoad)[];
 }
 
 /** Floor of resistances that must not vanish, ohm. */
@@ -109,7 +125,9 @@ export function networkFault(network: Network): string | undefined {
   for (const element of groups.flat())
     if (!terminal(element.a) || !terminal(element.b)) return `${element.name}: a terminal leads nowhere`;
   for (const r of network.resistors)
-    if (r.ohms.length !== segments || !r.ohms.every((x) => x > 0 && Number.isFinite(x)))
+    if (r.drop && !(r.drop.length === segments && r.drop.flat().every(Number.isFinite)))
+      return `${r.name}: a drop is missing or not finite`;
+    else if (r.ohms.length !== segments || !r.ohms.every((x) => x > 0 && Number.isFinite(x)))
       return `${r.name}: a resistance must be above 0 ohm`;
   for (const c of network.capacitors)
     if (!(c.farads > 0 && Number.isFinite(c.farads)) || !(c.ohms >= 0))
@@ -120,7 +138,8 @@ export function networkFault(network: Network): string | undefined {
     else if (!(d.saturation > 0 && d.slope > 0 && d.ohms >= 0 && d.saturation * d.slope * d.ohms < Infinity))
       return `${d.name}: saturation current and slope must be above 0`;
   for (const l of network.loads)
-    if (!(Number.isFinite(l.amps) && l.knee > 0)) return `${l.name}: a load current must be finite`;
+    if (!(Number.isFinite('amps' in l ? l.amps : l.watts + l.start) && l.knee > 0))
+      return `${l.name}: a load must be finite`;
   return undefined;
 }
 

@@ -2,7 +2,8 @@
  * What the output may be differentiated by. Part values are taken in relative terms (per unit of the
  * natural logarithm), potentials in volt, the injected current in ampere.
  */
-import type { Circuit } from './circuit';
+import { type Circuit, dropAt } from './circuit';
+import { loadConductance, loadCurrent } from './load';
 import { type Course, courseAt, type Terminal } from './network';
 import type { Trajectory } from './trajectory';
 
@@ -11,9 +12,11 @@ export type Parameter =
   /** `share` is how far the potential follows in each segment; everywhere in full when left out. */
   | { readonly kind: 'volts'; readonly index: number; readonly share?: readonly Course[] }
   | {
-      readonly kind: 'farads' | 'esr' | 'saturation' | 'slope' | 'diode-ohms' | 'amps';
+      readonly kind: 'farads' | 'esr' | 'saturation' | 'slope' | 'diode-ohms' | 'load';
       readonly index: number;
     }
+  /** A resistor's drop, V. */
+  | { readonly kind: 'drop'; readonly index: number; readonly share?: readonly Course[] }
   /** A current drawn from `a` and returned to `b`. */
   | { readonly kind: 'draw'; readonly a: Terminal; readonly b: Terminal };
 
@@ -39,7 +42,8 @@ export function parameterCurrent(
       const { a, b } = circuit.resistors;
       const k = parameter.index;
       const across = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
-      add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * across);
+      const drop = dropAt(circuit, k, segment, path.time[s]!);
+      add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * (across - drop));
       return;
     }
     case 'volts': {
@@ -50,6 +54,13 @@ export function parameterCurrent(
         });
       return;
     }
+    case 'drop': {
+      const { a, b } = circuit.resistors;
+      const k = parameter.index;
+      const share = followed(circuit, path, s, parameter.share);
+      add(a[k]!, b[k]!, -circuit.conductance[segment]![k]! * share);
+      return;
+    }
     case 'farads':
     case 'esr': {
       const k = parameter.index;
@@ -58,12 +69,11 @@ export function parameterCurrent(
       add(circuit.capacitors.a[k]!, circuit.capacitors.b[k]!, g * factor * current);
       return;
     }
-    case 'amps': {
+    case 'load': {
       const { a, b } = circuit.loads;
       const k = parameter.index;
       const v = path.volts[v0 + a[k]!]! - path.volts[v0 + b[k]!]!;
-      const knee = circuit.knee[k]!;
-      add(a[k]!, b[k]!, circuit.amps[k]! * (v > 0 ? -Math.expm1(-v / knee) : v / knee));
+      add(a[k]!, b[k]!, loadCurrent(circuit.laws[k]!, v));
       return;
     }
     case 'draw':
@@ -211,10 +221,6 @@ function knownCurrent(
   }
   for (let k = 0; k < circuit.loads.count; k++) {
     const v = path.loadVolts[s * circuit.loads.count + k]!;
-    push(
-      circuit.loads,
-      k,
-      (circuit.amps[k]! / circuit.knee[k]!) * (v > 0 ? Math.exp(-v / circuit.knee[k]!) : 1),
-    );
+    push(circuit.loads, k, loadConductance(circuit.laws[k]!, v));
   }
 }

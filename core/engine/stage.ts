@@ -3,9 +3,9 @@
  * every diode and load as a straight line, solved for voltages and, when asked, for their derivatives with
  * respect to the state at the start of the period and to parameters.
  */
-import { type Circuit, stamp, stampSource, stampTransfer } from './circuit';
+import { type Circuit, dropAt, stamp, stampSource, stampTransfer } from './circuit';
 import { moveLine, openingLine } from './diode';
-import { loadConductance, loadCurrent } from './load';
+import { lineError, loadConductance, loadCurrent } from './load';
 import { type Parameter, parameterCurrent, parameterState } from './parameter';
 import type { Trajectory } from './trajectory';
 
@@ -41,9 +41,11 @@ export function solveStage(circuit: Circuit, path: Trajectory, s: number): boole
   const rhs = circuit.work.scratch;
   work.copy(circuit.base[segment]!);
   rhs.fill(0);
-  for (let n = 0; n < circuit.knownResistors.length; n++) {
-    const k = circuit.knownResistors[n]!;
-    stampSource(rhs, circuit.resistors, k, circuit.conductance[segment]![k]!, 0, nodes, volts, at);
+  for (let n = 0; n < circuit.sources.length; n++) {
+    const k = circuit.sources[n]!;
+    const g = circuit.conductance[segment]![k]!;
+    const drop = dropAt(circuit, k, segment, path.time[s]!);
+    stampSource(rhs, circuit.resistors, k, g, -g * drop, nodes, volts, at);
   }
   const c0 = s * capacitors.count;
   for (let k = 0; k < capacitors.count; k++) {
@@ -61,18 +63,8 @@ export function solveStage(circuit: Circuit, path: Trajectory, s: number): boole
   const l0 = s * loads.count;
   for (let k = 0; k < loads.count; k++) {
     const v = path.loadVolts[l0 + k]!;
-    const slope = loadConductance(circuit.amps[k]!, circuit.knee[k]!, v);
-    stamp(
-      work,
-      rhs,
-      loads,
-      k,
-      slope,
-      loadCurrent(circuit.amps[k]!, circuit.knee[k]!, v) - slope * v,
-      nodes,
-      volts,
-      at,
-    );
+    const slope = loadConductance(circuit.laws[k]!, v);
+    stamp(work, rhs, loads, k, slope, loadCurrent(circuit.laws[k]!, v) - slope * v, nodes, volts, at);
   }
   if (!work.factor()) return false;
   work.solve(rhs, 0);
@@ -147,10 +139,7 @@ export function moveLines(circuit: Circuit, path: Trajectory, s: number): number
     const v = path.volts[at + loads.a[k]!]! - path.volts[at + loads.b[k]!]!;
     const old = path.loadVolts[s * loads.count + k]!;
     path.loadVolts[s * loads.count + k] = v;
-    // In the flat part of the curve a move of any size changes nothing; judge by the current's error.
-    const knee = circuit.knee[k]!;
-    const slope = loadConductance(1, knee, old);
-    const error = knee * Math.abs(loadCurrent(1, knee, v) - loadCurrent(1, knee, old) - slope * (v - old));
+    const error = lineError(circuit.laws[k]!, old, v);
     if (!(error <= worst)) worst = error;
   }
   return worst;
@@ -167,7 +156,10 @@ export function openLines(circuit: Circuit, path: Trajectory, s: number): void {
       circuit.slope[k]!,
       circuit.diodeOhms[k]!,
     );
-  for (let k = 0; k < loads.count; k++) path.loadVolts[s * loads.count + k] = 20 * circuit.knee[k]!;
+  for (let k = 0; k < loads.count; k++) {
+    const load = circuit.network.loads[k]!;
+    path.loadVolts[s * loads.count + k] = 'start' in load ? load.start : 20 * load.knee;
+  }
 }
 
 /** Copies the lines of stage `from` of one path to stage `to` of another. */

@@ -1,8 +1,8 @@
 /**
  * From a pump's values to the network that the engine solves, and where to find its parts again.
  */
-import type { Capacitor, CurrentLoad, Diode, Known, Network, Resistor, Terminal } from '../engine';
-import { type CapacitorValues, loadKnee, type PumpValues } from './values';
+import type { Capacitor, CurrentLoad, Diode, Known, Network, PowerLoad, Resistor, Terminal } from '../engine';
+import { type CapacitorValues, idealVoltage, loadKnee, type PumpValues } from './values';
 
 /** Places of the pump's parts in the network: indices into its lists. */
 export interface PumpNetwork {
@@ -98,7 +98,7 @@ class Sheet {
   readonly #resistors: Resistor[] = [];
   readonly #capacitors: Capacitor[] = [];
   readonly #diodes: Diode[] = [];
-  readonly #loads: CurrentLoad[] = [];
+  readonly #loads: (CurrentLoad | PowerLoad)[] = [];
 
   constructor(pump: PumpValues) {
     this.pump = pump;
@@ -137,7 +137,18 @@ class Sheet {
   load(name: string, output: Terminal, load: PumpValues['loads'][number]): PumpNetwork['loads'][number] {
     const [a, b] = this.pump.negative ? [ground, output] : [output, ground];
     if (load.kind === 'resistance') return { kind: 'resistor', index: this.#resistor(name, a, b, load.ohms) };
-    return { kind: 'load', index: this.#loads.push({ name, a, b, amps: load.amps, knee: loadKnee }) - 1 };
+    const made =
+      load.kind === 'current'
+        ? { name, a, b, amps: load.amps, knee: loadKnee }
+        : {
+            name,
+            a,
+            b,
+            watts: load.watts,
+            knee: load.knee,
+            start: Math.max(Math.abs(idealVoltage(this.pump)), load.knee),
+          };
+    return { kind: 'load', index: this.#loads.push(made) - 1 };
   }
 
   network(): Network {

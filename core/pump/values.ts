@@ -24,7 +24,9 @@ export interface DriveValues {
 
 export type LoadValues =
   | { readonly name: string; readonly kind: 'resistance'; readonly ohms: number }
-  | { readonly name: string; readonly kind: 'current'; readonly amps: number };
+  | { readonly name: string; readonly kind: 'current'; readonly amps: number }
+  /** `knee`: the lowest voltage at which it still takes its power, V. */
+  | { readonly name: string; readonly kind: 'power'; readonly watts: number; readonly knee: number };
 
 export interface PumpValues {
   readonly topology: 'chain' | 'ladder';

@@ -19,6 +19,10 @@ const circuits: Record<string, PumpValues> = {
       { name: 'r', kind: 'resistance', ohms: 10e3 },
     ],
   }),
+  'doubler with a load of constant power': pump({
+    drives: [{ high: 5, low: 0, highOhms: 40, lowOhms: 40 }],
+    loads: [{ name: 'p', kind: 'power', watts: 5e-3, knee: 1 }],
+  }),
   inverter: pump({ negative: true, input: 0, loads: [{ name: 'r', kind: 'resistance', ohms: 4700 }] }),
 };
 
@@ -54,8 +58,24 @@ function moved(network: Network, parameter: Parameter, step: number): Network {
       return { ...network, capacitors: scaled(network.capacitors, parameter.index, 'farads') };
     case 'esr':
       return { ...network, capacitors: scaled(network.capacitors, parameter.index, 'ohms') };
-    case 'amps':
-      return { ...network, loads: scaled(network.loads, parameter.index, 'amps') };
+    case 'load':
+      return {
+        ...network,
+        loads: network.loads.map((l, k) => {
+          if (k !== parameter.index) return l;
+          const factor = Math.exp(step);
+          return 'amps' in l ? { ...l, amps: l.amps * factor } : { ...l, watts: l.watts * factor };
+        }),
+      };
+    case 'drop':
+      return {
+        ...network,
+        resistors: network.resistors.map((r, k) =>
+          k === parameter.index
+            ? { ...r, drop: network.segments.map((_, n) => ((r.drop?.[n] ?? 0) as number) + step) }
+            : r,
+        ),
+      };
     case 'saturation':
       return { ...network, diodes: scaled(network.diodes, parameter.index, 'saturation') };
     case 'slope':
@@ -72,6 +92,7 @@ function every(network: Network): Parameter[] {
       { kind: 'ohms', index, segment: 0 },
       { kind: 'ohms', index, segment: 1 },
       { kind: 'ohms', index },
+      { kind: 'drop', index },
     ]),
     ...all(network.knowns, (index) => [{ kind: 'volts', index }]),
     ...all(network.capacitors, (index) => [
@@ -83,7 +104,7 @@ function every(network: Network): Parameter[] {
       { kind: 'slope', index },
       ...(network.diodes[index]!.ohms > 0 ? [{ kind: 'diode-ohms', index } as const] : []),
     ]),
-    ...all(network.loads, (index) => [{ kind: 'amps', index }]),
+    ...all(network.loads, (index) => [{ kind: 'load', index }]),
   ];
 }
 
@@ -104,7 +125,7 @@ describe('derivatives of the output', () => {
         return { average: node.average, ripple: node.max - node.min };
       };
       parameters.forEach((parameter, k) => {
-        const step = parameter.kind === 'volts' ? 1e-2 : 2e-2;
+        const step = parameter.kind === 'volts' || parameter.kind === 'drop' ? 1e-2 : 2e-2;
         const up = average(step, parameter);
         const down = average(-step, parameter);
         const label = `${name}: ${JSON.stringify(parameter)}`;
