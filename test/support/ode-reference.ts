@@ -5,6 +5,7 @@
  * that stands on ground, so one set of equations serves both.
  */
 import { createRequire } from 'node:module';
+import { fallingRoot } from './falling-root';
 import { kneeV, type SimplePump } from './simple-pump';
 
 export interface Reference {
@@ -246,43 +247,4 @@ function throughDiode(is: number, slopeV: number, ohm: number, volts: number): n
     if (Math.abs(step) < 1e-14 * Math.max(1, Math.abs(x))) break;
   }
   return is * Math.expm1(x);
-}
-
-/** Root of a falling function, by bracketing around the last one and false position with a bisection guard. */
-function fallingRoot(f: (x: number) => number, start: number): number {
-  let width = 0.01;
-  let left = start - width;
-  let right = start + width;
-  let atLeft = f(left);
-  let atRight = f(right);
-  while (atLeft < 0) {
-    width *= 4;
-    right = left;
-    atRight = atLeft;
-    left -= width;
-    atLeft = f(left);
-  }
-  width = 0.01;
-  while (atRight > 0) {
-    width *= 4;
-    left = right;
-    atLeft = atRight;
-    right += width;
-    atRight = f(right);
-  }
-  for (let i = 0; i < 200 && right - left > 1e-13 * Math.max(1, Math.abs(left)); i++) {
-    const straight = (left * atRight - right * atLeft) / (atRight - atLeft);
-    // Every third step halves, so that one slow end cannot hold the bracket open.
-    const x = i % 3 === 2 || !(straight > left && straight < right) ? (left + right) / 2 : straight;
-    const value = f(x);
-    if (value === 0) return x;
-    if (value > 0) {
-      left = x;
-      atLeft = value;
-    } else {
-      right = x;
-      atRight = value;
-    }
-  }
-  return (left + right) / 2;
 }
