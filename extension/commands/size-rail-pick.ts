@@ -2,7 +2,8 @@
  * The two lists of "Size this rail": which rail, and whether to write the proposal.
  */
 import * as vscode from 'vscode';
-import type { PumpRail, Sizing } from '../../core/index';
+import type { PumpRail, Sizing, TextEdit } from '../../core/index';
+import { toRange } from '../convert';
 
 export async function pickRail(rails: readonly PumpRail[]): Promise<string | undefined> {
   const picked = await vscode.window.showQuickPick(
@@ -13,7 +14,10 @@ export async function pickRail(rails: readonly PumpRail[]): Promise<string | und
 }
 
 /** Shows the proposal with its reasons; true when the user wants it written. */
-export function confirmSizing(sizing: Sizing & { ok: true }): Promise<boolean> {
+export function confirmSizing(
+  document: vscode.TextDocument,
+  sizing: Sizing & { ok: true },
+): Promise<boolean> {
   const write = { label: '$(edit) Write it into the file', detail: sizing.summary };
   const leave = { label: '$(close) Leave the file as it is' };
   const pick = vscode.window.createQuickPick();
@@ -22,8 +26,8 @@ export function confirmSizing(sizing: Sizing & { ok: true }): Promise<boolean> {
   pick.items = [
     write,
     leave,
-    ...(sizing.details.length > 0 ? [{ label: 'Why', kind: vscode.QuickPickItemKind.Separator }] : []),
-    ...sizing.details.map((line) => ({ label: plainLabel(line) })),
+    ...section('Changes', changes(document, sizing.edits)),
+    ...section('Why', sizing.details),
   ];
   return new Promise((resolve) => {
     pick.onDidAccept(() => {
@@ -38,6 +42,23 @@ export function confirmSizing(sizing: Sizing & { ok: true }): Promise<boolean> {
       pick.dispose();
     });
     pick.show();
+  });
+}
+
+/** Lines to read, under a heading; none without its lines. */
+function section(heading: string, lines: readonly string[]): vscode.QuickPickItem[] {
+  if (lines.length === 0) return [];
+  return [
+    { label: heading, kind: vscode.QuickPickItemKind.Separator },
+    ...lines.map((line) => ({ label: plainLabel(line) })),
+  ];
+}
+
+function changes(document: vscode.TextDocument, edits: readonly TextEdit[]): string[] {
+  return edits.map(({ span, text }) => {
+    const range = toRange(document, span);
+    const before = document.getText(range);
+    return `line ${range.start.line + 1}: ${before === '' ? 'adds' : `${before} →`} ${text.trim()}`;
   });
 }
 

@@ -18,65 +18,50 @@ export interface SizeRailOptions {
 
 /** The command's body: a rail by name, or by the cursor, or picked from a list. Answers with the outcome. */
 export function sizeRailHandler(analyses: Analyses, showLog: () => void, log: (line: string) => void) {
-  return async (rail?: unknown, given?: SizeRailOptions): Promise<Sizing | undefined> => {
-    const options = given ?? {};
+  return async (rail?: unknown, options: SizeRailOptions = {}): Promise<Sizing | undefined> => {
     const document = await findDocument(options.uri);
     if (document === undefined) {
-      void vscode.window.showInformationMessage('Open a rails.yaml first: its rails are sized there.');
+      tell('Open a rails.yaml first: its rails are sized there.');
       return undefined;
     }
     const name = typeof rail === 'string' ? rail : await railToSize(analyses, document);
-    if (name === undefined) return undefined;
-    const sizing = await propose(analyses, document, name);
-    if (sizing === undefined || options.apply === false) return sizing?.sizing;
+    const analysis = name === undefined ? undefined : await analyses.of(document);
+    if (name === undefined || analysis === undefined) return undefined;
+    const core = await analyses.loadCore();
+    const sizing = core.sizeRail(analysis, name);
+    if (options.apply === false) return sizing;
 
-    for (const line of [headline(sizing.sizing), ...sizing.sizing.details]) log(`${name}: ${line}`);
-    if (!sizing.sizing.ok) {
-      if (options.apply === undefined) void tellWhy(sizing.sizing, showLog);
-      return sizing.sizing;
-    }
-    if (sizing.sizing.edits.length === 0) {
-      if (options.apply === undefined)
-        void vscode.window.showInformationMessage(`${name}: ${sizing.sizing.summary}`);
-      return sizing.sizing;
-    }
-    if (options.apply === undefined) {
-      const first = sizing.sizing.edits[0]!;
-      vscode.window.visibleTextEditors
-        .find((editor) => editor.document === document)
-        ?.revealRange(toRange(document, first.span), vscode.TextEditorRevealType.InCenterIfOutsideViewport);
-      if (!(await confirmSizing(sizing.sizing))) return sizing.sizing;
-    }
-    await write(document, sizing);
-    return sizing.sizing;
+    for (const line of [headline(sizing), ...sizing.details]) log(`${name}: ${line}`);
+    if (options.apply === undefined && !(await agreed(document, sizing, showLog))) return sizing;
+    if (sizing.ok && sizing.edits.length > 0) await write(document, analysis.text, sizing);
+    return sizing;
   };
 }
 
-interface Proposal {
-  readonly sizing: Sizing;
-  readonly version: number;
+/** Shows the outcome to the user; true when there is something to write and it shall be written. */
+async function agreed(document: vscode.TextDocument, sizing: Sizing, showLog: () => void): Promise<boolean> {
+  const [first] = sizing.ok ? sizing.edits : [];
+  if (!sizing.ok || first === undefined) {
+    void tellOutcome(sizing, showLog);
+    return false;
+  }
+  vscode.window.visibleTextEditors
+    .find((editor) => editor.document === document)
+    ?.revealRange(toRange(document, first.span), vscode.TextEditorRevealType.InCenterIfOutsideViewport);
+  return confirmSizing(document, sizing);
 }
 
-async function propose(
-  analyses: Analyses,
+/** The spans of the edits hold for the text that was sized, and for no other. */
+async function write(
   document: vscode.TextDocument,
-  rail: string,
-): Promise<Proposal | undefined> {
-  const analysis = await analyses.of(document);
-  if (analysis === undefined) return undefined;
-  const { version } = document;
-  const core = await analyses.loadCore();
-  return { sizing: core.sizeRail(analysis, rail), version };
-}
-
-async function write(document: vscode.TextDocument, { sizing, version }: Proposal): Promise<void> {
-  if (!sizing.ok) return;
-  // The spans of the edits hold for the text that was sized, and for no other.
-  const stale = document.version !== version;
+  sized: string,
+  sizing: Sizing & { ok: true },
+): Promise<void> {
+  const stale = document.getText() !== sized;
   const written = !stale && (await vscode.workspace.applyEdit(toWorkspaceEdit(document, sizing.edits)));
-  if (written) vscode.window.setStatusBarMessage(`${sizing.rail}: ${sizing.summary}`, 6000);
+  if (written) vscode.window.setStatusBarMessage(sizing.summary, 6000);
   else
-    void vscode.window.showInformationMessage(
+    tell(
       `${sizing.rail} was not changed: ${stale ? 'the file changed meanwhile' : 'the editor refused the change'}.`,
     );
 }
@@ -100,17 +85,18 @@ async function railToSize(analyses: Analyses, document: vscode.TextDocument): Pr
     const here = core.railAt(analysis, document.offsetAt(editor.selection.active));
     if (rails.some((rail) => rail.name === here)) return here;
   }
-  if (rails.length === 0)
-    void vscode.window.showInformationMessage(
-      'This board has no rail that a charge pump feeds, so there is nothing to size.',
-    );
+  if (rails.length === 0) tell('No rail of this board is fed by a charge pump, so there is nothing to size.');
   return rails.length > 1 ? pickRail(rails) : rails[0]?.name;
 }
 
-async function tellWhy(sizing: Sizing & { ok: false }, showLog: () => void): Promise<void> {
+async function tellOutcome(sizing: Sizing, showLog: () => void): Promise<void> {
   const more = sizing.details.length > 0 ? ['Show details'] : [];
-  const answer = await vscode.window.showInformationMessage(`${sizing.rail}: ${sizing.reason}`, ...more);
-  if (answer !== undefined) showLog();
+  if ((await vscode.window.showInformationMessage(headline(sizing), ...more)) !== undefined) showLog();
+}
+
+/** Only ever the answer to a command that the user gave. */
+function tell(message: string): void {
+  void vscode.window.showInformationMessage(message);
 }
 
 function headline(sizing: Sizing): string {
