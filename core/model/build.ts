@@ -11,6 +11,7 @@ import type { MapNode, Node, SyntaxIssue } from '../syntax/node';
 import { parseText } from '../syntax/parse';
 import { stripBom } from '../text/bom';
 import { covers, type Span, touches } from '../text/span';
+import { besides } from '../text/visible';
 import type { Board } from './board';
 import type { Context, ReadQuantity, ReadReference } from './context';
 import { report } from './context';
@@ -69,7 +70,7 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
     board: board.board,
     catalogue: board.catalogue,
     ownParts: board.ownParts,
-    findings: settle([...context.findings, ...railCycles(board.board)], issues),
+    findings: settle(text, [...context.findings, ...railCycles(board.board)], issues),
     quantities,
     references,
     nodeAt: (offset) => locate(text, root, offset),
@@ -197,7 +198,7 @@ function syntaxFinding(text: string, root: Node | undefined, issue: SyntaxIssue)
 }
 
 /** By place; and where the text itself is broken, nothing is said about what it might mean. */
-function settle(findings: readonly Finding[], issues: readonly SyntaxIssue[]): Finding[] {
+function settle(text: string, findings: readonly Finding[], issues: readonly SyntaxIssue[]): Finding[] {
   const broken = issues.filter(({ kind }) => kind === 'broken').map(({ span }) => span);
   const kept = findings.filter(
     ({ code, span }) =>
@@ -205,7 +206,10 @@ function settle(findings: readonly Finding[], issues: readonly SyntaxIssue[]): F
       code === 'rail-cycle' ||
       !broken.some((hole) => covers(hole, span) || covers(span, hole)),
   );
-  return kept.sort((a, b) => a.span.start - b.span.start || a.span.end - b.span.end);
+  const seen = kept.map((finding) =>
+    finding.span.end > finding.span.start ? finding : { ...finding, span: besides(text, finding.span.start) },
+  );
+  return seen.sort((a, b) => a.span.start - b.span.start || a.span.end - b.span.end);
 }
 
 function byPlace<T extends { readonly span: Span }>(items: readonly T[]): T[] {

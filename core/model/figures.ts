@@ -140,8 +140,11 @@ function brokenLimit(found: Figure, value: QuantityValue, signed: boolean): stri
   if (above !== undefined && min <= above)
     return `must be greater than ${written(above)}, but ${written(min)} is not.`;
   if (least !== undefined && min < least) {
-    const cure = least === 0 ? ' Write the magnitude; the direction follows from the place.' : '';
-    return `must not be below ${written(least)}, but ${written(min)} is.${percent ? '' : cure}`;
+    const cure =
+      least === 0 && (unit === 'A' || unit === 'W')
+        ? ' Write the magnitude; the direction follows from the place.'
+        : '';
+    return `must not be below ${written(least)}, but ${written(min)} is.${cure}`;
   }
   if (most !== undefined && max > most) {
     const cure =

@@ -3,8 +3,8 @@
  * Never throws; a half-typed or broken text gives what is readable, and issues.
  */
 import { type Document, parseDocument } from 'yaml';
-import type { Span } from '../text/span';
 import { span } from '../text/span';
+import { visible } from '../text/visible';
 import { convert } from './convert';
 import type { SyntaxIssue, SyntaxTree } from './node';
 import { syntaxSentence } from './sentences';
@@ -18,7 +18,7 @@ const mostIssues = 100;
 export function parseText(text: string): SyntaxTree {
   if (text.length > longestText) {
     const message = 'The file is longer than 256 kB and is not read.';
-    return { issues: [{ kind: 'broken', span: visible(text, 0, 0), message }] };
+    return { issues: [{ kind: 'broken', span: visible(text, span(0, 0)), message }] };
   }
   let document: Document.Parsed;
   try {
@@ -32,35 +32,19 @@ export function parseText(text: string): SyntaxTree {
   } catch {
     // The library overflows the stack on some deeply nested texts.
     const message = 'The file is nested too deeply to be read.';
-    return { issues: [{ kind: 'broken', span: visible(text, 0, 0), message }] };
+    return { issues: [{ kind: 'broken', span: visible(text, span(0, 0)), message }] };
   }
   const broken = [
     ...document.errors.map((error) => ({ error, kind: 'broken' as const })),
     ...document.warnings.map((error) => ({ error, kind: 'warning' as const })),
   ].map(({ error, kind }): SyntaxIssue => {
-    const place = visible(text, error.pos[0], error.pos[1]);
+    const place = visible(text, span(error.pos[0], error.pos[1]));
     const message = syntaxSentence(error.code, error.message, text.slice(place.start, place.end));
     return { kind, span: place, message };
   });
   const { root, issues } = convert(text, document.contents);
   const all = unique([...broken, ...issues]).slice(0, mostIssues);
   return root ? { root, issues: all } : { issues: all };
-}
-
-/** The part of a stretch that can be underlined: inside the text, on one line, at least one character wide. */
-function visible(text: string, from: number, to: number): Span {
-  let start = Math.min(Math.max(from, 0), text.length);
-  const breakAt = text.slice(start, to).search(/[\r\n]/);
-  let end = Math.min(Math.max(breakAt < 0 ? to : start + breakAt, start), text.length);
-  if (end > start) return span(start, end);
-  const next = text[start];
-  if (next !== undefined && next !== '\n' && next !== '\r') end = start + 1;
-  else {
-    while (start > 0 && /\s/.test(text[start - 1] ?? '')) start--;
-    end = start;
-    if (start > 0) start--;
-  }
-  return span(start, end);
 }
 
 function unique(issues: readonly SyntaxIssue[]): SyntaxIssue[] {

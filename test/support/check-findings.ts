@@ -31,14 +31,19 @@ export function checkFindings(text: string, options: CheckOptions = {}): BoardRe
     );
     return at < 0 ? { place: mark.place, message: mark.message } : actual[at];
   });
-  const byPlace = (a: { place: string } | undefined, b: { place: string } | undefined) =>
-    (a?.place ?? '').localeCompare(b?.place ?? '');
+  const byPlace = (a: Shown | undefined, b: Shown | undefined) =>
+    `${a?.place} ${a?.message}`.localeCompare(`${b?.place} ${b?.message}`);
   expect([...actual].sort(byPlace)).toEqual([...matched].sort(byPlace));
   return reading;
 }
 
+interface Shown {
+  readonly place: string;
+  readonly message: string;
+}
+
 /** `3:5-9 wrong-unit`, the end column exclusive, or with its line when it lies on another one. */
-function shown(text: string, { code, span, message }: Finding): { place: string; message: string } {
+function shown(text: string, { code, span, message }: Finding): Shown {
   const lines = lineIndex(text.replace(/^\ufeff/, ''));
   const start = lines.position(span.start);
   const end = lines.position(span.end);
@@ -46,7 +51,7 @@ function shown(text: string, { code, span, message }: Finding): { place: string;
   return { place: `${start.line}:${start.column}-${last} ${code}`, message };
 }
 
-function marks(text: string): { place: string; message: string }[] {
+function marks(text: string): Shown[] {
   let line = 0;
   return text.split(/\r?\n/).flatMap((content, index) => {
     const mark = /^( *)#( *)(\^+) ([a-z-]+)(?:: (.*))?$/.exec(content);

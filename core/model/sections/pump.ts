@@ -20,6 +20,9 @@ export function pumpOf(slot: Slot | undefined): Pump | undefined {
   const topology = choiceOf(fields.at('topology'));
   checkInput(slot, fields, topology?.name);
   checkReservoir(slot, fields, topology?.name);
+  // In the order in which people write them: what is assumed is said at the first capacitor without a kind.
+  const flying = capacitorsOf(fields.at('flying'));
+  const smoothing = capacitorsOf(fields.at('smoothing'));
   return {
     span: fields.span,
     keys: fields.keys,
@@ -36,8 +39,8 @@ export function pumpOf(slot: Slot | undefined): Pump | undefined {
         ? 'negative'
         : 'positive',
     drive: driveOf(fields.at('drive')),
-    flying: capacitorsOf(fields.at('flying')),
-    smoothing: capacitorsOf(fields.at('smoothing')),
+    flying,
+    smoothing,
     diodes: diodesOf(fields.at('diode')),
   };
 }
