@@ -5,11 +5,13 @@ import type { Origin } from '../quantity/figure';
 import { formatQuantity } from '../quantity/write';
 import type { CornerEnd, CornerSetting } from './types';
 
-/** `lowest ambient (-20 degC), highest mcu.GP15 high resistance (75 ohm)`; empty when nothing has a band. */
+/**
+ * `lowest ambient (-20 degC), highest mcu.GP15 high resistance (75 ohm)`: the most influential settings, with
+ * `mainly` before them where others are left out; empty when nothing has a band.
+ */
 export function cornerWords(end: CornerEnd, most = 3): string {
-  const shown = end.settings.slice(0, most).map(settingWords);
-  const left = end.settings.length - shown.length;
-  return left > 0 ? `${shown.join(', ')} and ${left} more` : shown.join(', ');
+  const shown = end.settings.slice(0, most).map(settingWords).join(', ');
+  return end.settings.length > most ? `mainly ${shown}` : shown;
 }
 
 export function settingWords({ label, value, unit, end }: CornerSetting): string {

@@ -43,6 +43,9 @@ function sentenceAboutLoss(losses: PumpLosses): string {
 }
 
 function sentenceAboutRemedy(pump: Pump, losses: PumpLosses, missingV: number): string {
+  const diode = diodeRemedy(pump, losses);
+  // The diodes first where they are the trouble: no capacitor gives back what the cold takes.
+  if (losses.largest === 'diodes' && diode !== undefined && diode.winsV >= missingV) return `${diode.words}.`;
   const flying = flyingRemedy(pump, losses, missingV);
   if (flying !== undefined) return flying;
   const { capacitanceWinsV, resistanceWinsV } = losses;
@@ -50,7 +53,6 @@ function sentenceAboutRemedy(pump: Pump, losses: PumpLosses, missingV: number): 
   if (resistanceWinsV >= 1.1 * missingV) {
     return `${useless}; a stronger drive (pin setting, pins in parallel, a driver stage) can win up to ${volts(resistanceWinsV)}.`;
   }
-  const diode = diodeRemedy(pump, losses);
   if (diode !== undefined && diode.winsV + resistanceWinsV >= missingV) return `${useless}; ${diode.words}.`;
   return `${useless} and a stronger drive ${volts(resistanceWinsV)}: it takes another stage, a higher input or a lighter load.`;
 }

@@ -4,7 +4,7 @@
  * drawn by magnitude and labelled with their sign.
  */
 import type { PumpResult, RailResult } from '../../analysis/types';
-import { formatBand, formatQuantity } from '../../quantity/write';
+import { formatBand } from '../../quantity/write';
 import type { Picture, Theme } from '../card';
 import { type Inks, inks } from './inks';
 import { type Attributes, element, label, svgDocument } from './svg';
@@ -35,7 +35,7 @@ export function voltsPicture(result: RailResult, pump: PumpResult, theme: Theme)
   const most = Math.max(...steps.map((step) => step.to), spread[1], edges?.[1] ?? 0) * 1.02;
   const x = (volts: number) => labelWidth + (Math.max(0, volts) / most) * chartWidth;
   const bottom = top + steps.length * rowHeight;
-  const height = bottom + 18;
+  const height = bottom + 20;
 
   const parts = [
     hatch(ink),
@@ -54,7 +54,7 @@ export function voltsPicture(result: RailResult, pump: PumpResult, theme: Theme)
     spread[1] - spread[0] > 0.002 * most
       ? label(
           labelWidth,
-          bottom + 13,
+          bottom + 14,
           `├─┤ ${formatBand(signed(pump, spread), 'V')} over tolerance and temperature`,
           { fill: ink.faint, 'font-size': 11 },
         )
@@ -83,16 +83,23 @@ function stepsOf(pump: PumpResult): readonly Step[] {
       kind: 'loss',
       from: Math.min(level, next),
       to: Math.max(level, next),
-      value: `${drop.volts < 0 ? '+' : '\u2212'}${formatQuantity(Math.abs(drop.volts), 'V', 2)}`,
+      value: signedVolts(ideal < 0 ? drop.volts : -drop.volts, size, true),
     };
     level = next;
     return step;
   });
   return [
-    { name: 'ideal', kind: 'ideal', from: 0, to: size, value: formatQuantity(ideal, 'V') },
+    { name: 'ideal', kind: 'ideal', from: 0, to: size, value: signedVolts(ideal, size) },
     ...lossSteps,
-    { name: 'output', kind: 'output', from: 0, to: Math.abs(voltage), value: formatQuantity(voltage, 'V') },
+    { name: 'output', kind: 'output', from: 0, to: Math.abs(voltage), value: signedVolts(voltage, size) },
   ];
+}
+
+/** With as many decimals in every row, so that a column adds up by eye. */
+function signedVolts(value: number, scale: number, always = false): string {
+  const decimals = scale < 1 ? 3 : scale < 100 ? 2 : 1;
+  const sign = value < 0 ? '\u2212' : always ? '+' : '';
+  return `${sign}${Math.abs(value).toFixed(decimals)} V`;
 }
 
 function spreadOf(pump: PumpResult): readonly [number, number] {
@@ -192,8 +199,9 @@ function whisker(
   ink: Inks,
 ): string {
   const [left, right] = [x(spread[0]), x(spread[1])];
-  const middle = y + barHeight / 2;
-  const d = `M${left.toFixed(1)},${y - 2} v${barHeight + 4} M${right.toFixed(1)},${y - 2} v${barHeight + 4} M${left.toFixed(1)},${middle} H${right.toFixed(1)}`;
+  // Beneath the bar: no line shows on every fill.
+  const middle = y + barHeight + 5;
+  const d = `M${left.toFixed(1)},${middle - 3.5} v7 M${right.toFixed(1)},${middle - 3.5} v7 M${left.toFixed(1)},${middle} H${right.toFixed(1)}`;
   return element('path', { d, stroke: ink.text, 'stroke-width': 1.6, fill: 'none' });
 }
 
