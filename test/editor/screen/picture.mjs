@@ -33,7 +33,7 @@ export async function drawPicture({ program, profile, open, board, core, file })
     const bottom = Math.max(shape.y + shape.height, name.y + linesBelow * name.height * 1.2) + margin;
     await page.screenshot({
       path: file,
-      clip: { x: 48, y: top, width: shape.x + shape.width + margin - 48, height: bottom - top },
+      clip: { x: 48, y: top, width: shape.x + shape.width - 48, height: bottom - top },
     });
   } finally {
     await context.close();
