@@ -15,7 +15,7 @@ export function keyCard(place: Place): Card | undefined {
   return {
     span: place.span,
     title: String(key),
-    answer: schema.row.doc,
+    answer: plain(schema.row.doc),
     state: 'neutral',
     head: ['', ''],
     rows: rowsOf(schema.row),
@@ -31,7 +31,7 @@ function optionCard(place: Place, row: Row): Card | undefined {
   return {
     span: place.span,
     title: `${String(place.path.at(-1))}: ${option.name}`,
-    answer: option.doc,
+    answer: plain(option.doc),
     state: 'neutral',
     head: [],
     rows: [],
@@ -51,4 +51,9 @@ function rowsOf(row: Row): readonly (readonly string[])[] {
 
 function optionsOf(row: Row): readonly Option[] {
   return row.values.flatMap((value) => (value.kind === 'choice' ? value.options : []));
+}
+
+/** A card has no code font: the quotes of the sentence would stand there as they are. */
+function plain(doc: string): string {
+  return doc.replace(/`/g, '');
 }

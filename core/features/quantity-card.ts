@@ -1,8 +1,9 @@
 /**
- * The card of a quantity in the file: what it was read as.
+ * The card of a quantity in the file: what it was read as, and what a part's own tolerance makes of it.
  */
 import type { BoardAnalysis } from '../analysis/types';
 import { schemaAt } from '../format';
+import type { Capacitor } from '../model/board';
 import type { ReadQuantity } from '../model/context';
 import type { Figure } from '../quantity/figure';
 import { unitFacts } from '../quantity/units';
@@ -11,43 +12,75 @@ import type { Card } from './card';
 
 export function quantityCard(analysis: BoardAnalysis, quantity: ReadQuantity): Card {
   const { figure, span, path, expression } = quantity;
-  const place = analysis.reading.nodeAt(span.start);
   const written = analysis.text.slice(span.start, span.end).trim();
-  const schema = schemaAt(place.path);
-  const { what } = unitFacts[figure.unit];
-  const banded = figure.min !== figure.max;
+  const schema = schemaAt(analysis.reading.nodeAt(span.start).path);
+  const doc = schema?.row?.doc.replace(/`/g, '');
   return {
     span,
-    title: `${path} · ${what.replace(/^an? /, '')}`,
-    answer: `${wholeValue(figure)}${expression ? ', the value of the expression' : ''}.`,
+    title: `${path} · ${whatOf(figure)}`,
+    answer: `${whole(figure)}${expression ? ', the value of the expression' : ''}.`,
     state: 'neutral',
-    head: banded ? ['lowest', 'typical', 'highest'] : ['', ''],
-    rows: banded
-      ? [[figure.min, figure.typical, figure.max].map((value) => one(value, figure))]
-      : [['read from', written]],
+    ...tableOf(quantity, written),
     origins: [
-      ...(banded ? [`Read from ${written}.`] : []),
-      ...(figure.min === figure.max ? [] : middle(figure)),
-      ...(schema?.row ? [schema.row.doc] : []),
+      ...(isWindow(path) || figure.min === figure.max ? [] : [middle(figure)]),
+      ...kindTolerance(analysis, figure),
+      ...(doc === undefined ? [] : [doc]),
     ],
   };
 }
 
-function wholeValue(figure: Figure): string {
-  return figure.unit === '1' && figure.max <= 1 && figure.min !== figure.max
-    ? `${formatPercent(figure.min)} to ${formatPercent(figure.max)}`
-    : figure.unit === '1' && figure.max <= 1
-      ? formatPercent(figure.typical)
-      : formatBand(figure, figure.unit);
+function tableOf({ figure, path }: ReadQuantity, written: string): Pick<Card, 'head' | 'rows'> {
+  const { min, typical, max } = figure;
+  if (min === max) return { head: ['', ''], rows: [['read from', written]] };
+  const values = isWindow(path) ? [min, max] : [min, typical, max];
+  const head = isWindow(path) ? ['', 'lowest', 'highest'] : ['', 'lowest', 'typical', 'highest'];
+  return { head, rows: [[written, ...values.map((value) => one(value, figure))]] };
+}
+
+/** What a rail needs is a window, in which typical has no meaning. */
+function isWindow(path: string): boolean {
+  return /\.needs\.[^.]+$/.test(path);
+}
+
+function isShare({ unit, max }: Figure): boolean {
+  return unit === '1' && max <= 1;
+}
+
+function whatOf(figure: Figure): string {
+  return isShare(figure) ? 'share' : unitFacts[figure.unit].what.replace(/^an? /, '');
+}
+
+function whole(figure: Figure): string {
+  if (!isShare(figure)) return formatBand(figure, figure.unit);
+  const { min, max } = figure;
+  return min === max ? formatPercent(min) : `${formatPercent(min)} to ${formatPercent(max)}`;
 }
 
 function one(value: number, figure: Figure): string {
-  return figure.unit === '1' && figure.max <= 1 ? formatPercent(value) : formatQuantity(value, figure.unit);
+  return isShare(figure) ? formatPercent(value) : formatQuantity(value, figure.unit);
 }
 
-function middle({ min, typical, max, unit }: Figure): readonly string[] {
-  const centre = (min + max) / 2;
-  return Math.abs(typical - centre) < 1e-9 * Math.abs(max - min)
-    ? [`Typical is the middle, ${formatQuantity(typical, unit)}; the corners take the ends.`]
-    : ['The corners take the ends.'];
+function middle({ min, typical, max }: Figure): string {
+  const centred = Math.abs(typical - (min + max) / 2) < 1e-9 * Math.abs(max - min);
+  return centred ? 'Typical is the middle; the corners take the ends.' : 'The corners take the ends.';
+}
+
+/** A capacitor's value without a tolerance of its own takes that of its kind. */
+function kindTolerance(analysis: BoardAnalysis, { span }: Figure): readonly string[] {
+  const owner = capacitors(analysis).find(({ value }) => value?.span?.start === span?.start);
+  const tolerance = owner?.kind.data?.tolerance;
+  if (!owner || !tolerance || owner.toleranceGiven) return [];
+  const name = owner.kind.ref?.name ?? owner.kind.data?.key ?? '';
+  const assumed = owner.kind.assumed ? ', which is assumed' : '';
+  return [
+    `The corners take ${formatPercent(tolerance.min)} to +${formatPercent(tolerance.max)} of kind ${name}${assumed}.`,
+  ];
+}
+
+function capacitors({ rails }: BoardAnalysis): readonly Capacitor[] {
+  return [...rails.values()].flatMap(({ rail: { origin } }) => {
+    if (origin?.kind !== 'pump') return [];
+    const { flying, smoothing, reservoir } = origin.pump;
+    return [...flying, ...smoothing, ...(reservoir ? [reservoir] : [])];
+  });
 }

@@ -140,5 +140,10 @@ function pumpRows({ rail }: RailResult, pump: PumpResult): readonly (readonly st
 }
 
 function three(band: Band): readonly string[] {
-  return [band.min, band.typical, band.max].map((value) => formatQuantity(value, 'V'));
+  return [band.min, band.typical, band.max].map(voltsOrLess);
+}
+
+/** A solver's rounding error is no ripple. */
+function voltsOrLess(value: number): string {
+  return value !== 0 && Math.abs(value) < 1e-6 ? 'below 1 µV' : formatQuantity(value, 'V');
 }

@@ -80,7 +80,7 @@ function partLines(analysis: BoardAnalysis, pump: Pump): readonly string[] {
     const { highResistance, lowResistance } = pin;
     if (highResistance && lowResistance)
       lines.push(
-        `${pin.key}: ${formatBand(highResistance, 'ohm', 2)} high, ${formatBand(lowResistance, 'ohm', 2)} low; ${originWords(highResistance.origin)}.`,
+        `${pin.key}: ${formatBand(highResistance, 'ohm', 2)} high, ${formatBand(lowResistance, 'ohm', 2)} low (${highResistance.origin.kind}).`,
       );
   }
   return lines;
