@@ -54,13 +54,14 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
   const context: Context = {
     text,
     catalogue,
-    names: namesOf(root),
+    ...namesOf(root),
     partPlaces: new Map(),
     findings: issues.map((issue) => syntaxFinding(text, root, issue)),
     quantities: [],
     references: [],
     quiet: false,
     said: new Set(),
+    comparisons: { left: 100_000 },
   };
   const board = boardOf(context, root);
   const quantities = byPlace(context.quantities);
@@ -152,19 +153,24 @@ function ambientOf(slot: Slot | undefined): Figure {
 }
 
 /** Names of all sections, known before anything is read, so that entries may stand in any order. */
-function namesOf(root: Node | undefined): Context['names'] {
+function namesOf(root: Node | undefined): Pick<Context, 'names' | 'nameLists'> {
   const section = (name: NameSpace): ReadonlyMap<string, Span> => {
     const node = root?.kind === 'map' ? find(root, name) : undefined;
     if (node?.kind !== 'map') return new Map();
     return new Map(node.entries.map((entry) => [entry.key.text, entry.key.span]));
   };
+  const names = bySection(section);
+  return { names, nameLists: bySection((name) => [...names[name].keys()]) };
+}
+
+function bySection<T>(value: (name: NameSpace) => T): Readonly<Record<NameSpace, T>> {
   return {
-    supplies: section('supplies'),
-    chips: section('chips'),
-    clocks: section('clocks'),
-    drivers: section('drivers'),
-    rails: section('rails'),
-    modes: section('modes'),
+    supplies: value('supplies'),
+    chips: value('chips'),
+    clocks: value('clocks'),
+    drivers: value('drivers'),
+    rails: value('rails'),
+    modes: value('modes'),
   };
 }
 

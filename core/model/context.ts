@@ -5,6 +5,7 @@ import type { Catalogue } from '../catalog/part';
 import type { Finding, FindingCode, Severity } from '../checks/finding';
 import type { NameSpace } from '../format';
 import type { Figure } from '../quantity/figure';
+import { closest } from '../text/closest';
 import type { Span } from '../text/span';
 
 /** A quantity of the file: a hover on it shows what it was read as. */
@@ -32,6 +33,8 @@ export interface Context {
   /** With the file's own `parts` in it. */
   readonly catalogue: Catalogue;
   readonly names: Readonly<Record<NameSpace, ReadonlyMap<string, Span>>>;
+  /** The same names as lists, for findings that name what there is. */
+  readonly nameLists: Readonly<Record<NameSpace, readonly string[]>>;
   /** Where the file's own parts have their names, by entry. */
   readonly partPlaces: ReadonlyMap<unknown, Span>;
   readonly findings: Finding[];
@@ -41,6 +44,20 @@ export interface Context {
   readonly quiet: boolean;
   /** What was already said once for the whole file. */
   readonly said: Set<string>;
+  /** How many more words may be compared for guesses: a file full of unknown names must not take seconds. */
+  readonly comparisons: { left: number };
+}
+
+/** What was probably meant by `word`; undefined when nothing is near, or when too much was guessed already. */
+export function guess(context: Context, word: string, candidates: readonly string[]): string | undefined {
+  if (context.comparisons.left < candidates.length) return undefined;
+  context.comparisons.left -= candidates.length;
+  return closest(word, candidates);
+}
+
+/** Names as data of a finding, cut where no reader would go on. */
+export function nameList(names: readonly string[]): string {
+  return names.slice(0, 40).join(', ');
 }
 
 export type FindingDetails = Partial<Omit<Finding, 'code' | 'severity' | 'at' | 'span' | 'message'>>;

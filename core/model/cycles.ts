@@ -7,7 +7,9 @@ import type { Board, PinRef, Rail, Ref } from './board';
 
 /** One finding for each group of rails that stand on one another. */
 export function railCycles(board: Board): Finding[] {
-  const edges = new Map([...board.rails.values()].map((rail) => [rail.name, dependencies(board, rail)]));
+  const edges = peeled(
+    new Map([...board.rails.values()].map((rail) => [rail.name, dependencies(board, rail)])),
+  );
   const found: Finding[] = [];
   const done = new Set<string>();
   for (const start of board.rails.values()) {
@@ -47,6 +49,26 @@ function finding(board: Board, cycle: readonly Edge[]): Finding {
       message: `\`${edge.from}\` stands on \`${edge.to}\`${edge.through}.`,
     })),
   };
+}
+
+/** Without the rails that stand on nothing doubtful: what is left contains all circles, and mostly nothing else. */
+function peeled(edges: ReadonlyMap<string, readonly Edge[]>): ReadonlyMap<string, readonly Edge[]> {
+  const standing = new Map<string, Edge[]>();
+  for (const edge of [...edges.values()].flat()) {
+    const above = standing.get(edge.to);
+    if (above) above.push(edge);
+    else standing.set(edge.to, [edge]);
+  }
+  const open = new Map([...edges].map(([name, below]) => [name, below.length]));
+  const sound = [...open].flatMap(([name, count]) => (count === 0 ? [name] : []));
+  for (let next = sound.pop(); next !== undefined; next = sound.pop()) {
+    for (const { from } of standing.get(next) ?? []) {
+      const left = (open.get(from) ?? 0) - 1;
+      open.set(from, left);
+      if (left === 0) sound.push(from);
+    }
+  }
+  return new Map([...edges].filter(([name]) => (open.get(name) ?? 0) > 0));
 }
 
 /** The shortest way from a rail back to itself. */

@@ -4,9 +4,9 @@
  */
 import type { Row, Shape } from '../format';
 import type { MapEntry, MapNode, Node } from '../syntax/node';
-import { closest, listNames } from '../text/closest';
+import { listNames } from '../text/closest';
 import type { Span } from '../text/span';
-import { type Context, report, reportNotComputed } from './context';
+import { type Context, guess, nameList, report, reportNotComputed } from './context';
 
 /** A value of the file with everything that reading it needs. */
 export interface Slot {
@@ -105,10 +105,10 @@ function reportUnknownKey(
   const written = context.text.slice(place.span.start, place.span.end);
   const known = Object.keys(shape.keys);
   const free = known.filter((key) => !map.entries.some((entry) => entry.key.text === key));
-  const meant = closest(written, free);
+  const meant = guess(context, written, free);
   const cure = meant ? `did you mean \`${meant}\`?` : `a ${shape.name} has ${listNames(known, 14)}.`;
   report(context, 'unknown-key', place, `\`${written}\` is no key of a ${shape.name}: ${cure}`, {
-    expected: known.join(', '),
+    expected: nameList(known),
     actual: written,
     ...(meant && { fixes: [replacement(place.span, meant)] }),
   });

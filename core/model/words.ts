@@ -2,11 +2,11 @@
  * Words out of the file: texts, choices, names of entries, pins.
  */
 import type { NameSpace, Value } from '../format';
-import { closest, listNames } from '../text/closest';
+import { listNames } from '../text/closest';
 import type { Span } from '../text/span';
 import { span } from '../text/span';
 import type { PinRef, Ref } from './board';
-import { type Context, report, reportNotComputed } from './context';
+import { type Context, guess, nameList, report, reportNotComputed } from './context';
 import { textSpan } from './figures';
 import { replacement, type Slot } from './slot';
 
@@ -38,7 +38,7 @@ export function choiceOf(slot: Slot | undefined): Ref | undefined {
   const chosen = options.find((option) => option.name === ref.name);
   if (!chosen) {
     const names = options.map((option) => option.name);
-    const meant = closest(ref.name, names);
+    const meant = guess(slot.context, ref.name, names);
     const cure = meant ? `did you mean \`${meant}\`?` : `it is one of ${listNames(names)}.`;
     const key = slot.context.text.slice(slot.keySpan.start, slot.keySpan.end);
     report(
@@ -47,7 +47,7 @@ export function choiceOf(slot: Slot | undefined): Ref | undefined {
       { path: slot.path, span: ref.span },
       `\`${key}\` cannot be \`${ref.name}\`: ${cure}`,
       {
-        expected: names.join(', '),
+        expected: nameList(names),
         actual: ref.name,
         ...(meant && { fixes: [replacement(ref.span, meant)] }),
       },
@@ -82,7 +82,7 @@ export function checkName(
   const target = context.names[space].get(ref.name);
   context.references.push({ span: ref.span, path, to: space, name: ref.name, ...(target && { target }) });
   if (target) return;
-  const known = [...spaces.flatMap((candidate) => [...context.names[candidate].keys()]), ...also];
+  const known = [...spaces.flatMap((candidate) => context.nameLists[candidate]), ...also];
   const what = spaces.map((candidate) => singular[candidate]).join(' or ');
   reportUnknownName(context, path, ref, what, known);
 }
@@ -95,7 +95,7 @@ export function reportUnknownName(
   what: string,
   known: readonly string[],
 ): void {
-  const meant = closest(ref.name, known);
+  const meant = guess(context, ref.name, known);
   const list =
     known.length > 0
       ? `There ${known.length === 1 ? 'is' : 'are'} ${listNames(known, 10)}.`
@@ -107,7 +107,7 @@ export function reportUnknownName(
     { path, span: ref.span },
     `No ${what} \`${ref.name}\`${meant ? ':' : '.'}${question} ${list}`,
     {
-      expected: known.join(', '),
+      expected: nameList(known),
       actual: ref.name,
       ...(meant && { fixes: [replacement(ref.span, meant)] }),
     },

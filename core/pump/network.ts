@@ -1,44 +1,45 @@
 /**
  * From a pump's values to the network that the engine solves, and where to find its parts again.
  */
-import type { Capacitor, CurrentLoad, Diode, Known, Network, PowerLoad, Resistor, Terminal } from '../engine';
-import { type CapacitorValues, idealVoltage, loadKnee, type PumpValues } from './values';
+import type { Network, Terminal } from '../engine';
+import { addDrive, type DrivePlace } from './drive';
+import { clockPhases, type Phase } from './phases';
+import { ground, type LoadPlace, type RailPlace, Sheet } from './sheet';
+import type { PumpValues } from './values';
 
 /** Places of the pump's parts in the network: indices into its lists. */
 export interface PumpNetwork {
   readonly network: Network;
+  /** What each segment is for the first clock. */
+  readonly phases: readonly Phase[];
   readonly output: Terminal;
   readonly ground: Terminal;
-  readonly input: Terminal;
-  /** Known potentials and resistors that stand for each drive. */
-  readonly drives: readonly { readonly known: number; readonly resistor: number; readonly series?: number }[];
+  readonly rails: readonly RailPlace[];
+  readonly drives: readonly DrivePlace[];
   readonly flying: readonly number[];
   readonly smoothing: readonly number[];
   readonly reservoir?: number;
   readonly diodes: readonly number[];
-  /** Index among the resistors or among the current loads. */
-  readonly loads: readonly { readonly kind: 'resistor' | 'load'; readonly index: number }[];
+  readonly loads: readonly LoadPlace[];
 }
 
-const ground = ~0;
-const input = ~1;
-
-export function pumpNetwork(pump: PumpValues): PumpNetwork {
-  const sheet = new Sheet(pump);
-  const drives = pump.drives.map((_, d) => sheet.drive(d));
-  const parts = pump.topology === 'ladder' ? ladder(sheet, drives[0]!.node) : chain(sheet, drives);
+/** Undefined when the clock's edges leave no room for its levels. */
+export function pumpNetwork(pump: PumpValues): PumpNetwork | undefined {
+  const phases = clockPhases(pump);
+  if (!phases) return undefined;
+  const sheet = new Sheet(pump, phases);
+  const drives = pump.drives.map((drive, d) => addDrive(sheet, drive, d));
+  const input = pump.input === undefined ? ground : sheet.rails[pump.input]!.terminal;
+  const parts = pump.topology === 'ladder' ? ladder(sheet, input, drives[0]!) : chain(sheet, input, drives);
   const reservoir = pump.reservoir && sheet.capacitor('reservoir', parts.output, ground, pump.reservoir);
-  const loads = pump.loads.map((load) => sheet.load(load.name, parts.output, load));
+  const loads = pump.loads.map((load) => sheet.load(parts.output, load));
   return {
     network: sheet.network(),
+    phases: phases.phases,
     output: parts.output,
     ground,
-    input,
-    drives: drives.map(({ known, resistor, series }) => ({
-      known,
-      resistor,
-      ...(series === undefined ? {} : { series }),
-    })),
+    rails: sheet.rails,
+    drives,
     flying: parts.flying,
     smoothing: parts.smoothing,
     ...(reservoir === undefined ? {} : { reservoir }),
@@ -55,116 +56,39 @@ interface Parts {
 }
 
 /** Diodes in a row from the input to the output; each node between them is pumped by a capacitor. */
-function chain(sheet: Sheet, drives: readonly { node: Terminal }[]): Parts {
+function chain(sheet: Sheet, input: Terminal, drives: readonly DrivePlace[]): Parts {
   const { pump } = sheet;
   const flying: number[] = [];
   const diodes: number[] = [];
-  let from: Terminal = input;
+  let from = input;
   for (let k = 0; k <= pump.stages; k++) {
     const to = sheet.node(k === pump.stages ? 'output' : `pumped ${k + 1}`);
     diodes.push(sheet.diode(k, from, to));
     if (k < pump.stages)
-      flying.push(sheet.capacitor(`flying ${k + 1}`, to, drives[k % drives.length]!.node, pump.flying[k]!));
+      flying.push(sheet.capacitor(`flying ${k + 1}`, to, drives[k % drives.length]!.output, pump.flying[k]!));
     from = to;
   }
   return { output: from, flying, smoothing: [], diodes };
 }
 
 /** Half-wave ladder: a coupling column on the drive, a smoothing column on ground, diodes between them. */
-function ladder(sheet: Sheet, drive: Terminal): Parts {
+function ladder(sheet: Sheet, input: Terminal, drive: DrivePlace): Parts {
   const { pump } = sheet;
-  const parts: Parts = { output: ground, flying: [], smoothing: [], diodes: [] };
-  let coupled = drive;
-  let smooth: Terminal = input;
+  const flying: number[] = [];
+  const smoothing: number[] = [];
+  const diodes: number[] = [];
+  let coupled = drive.output;
+  let smooth = input;
   let foot: Terminal = ground;
   for (let k = 0; k < pump.stages; k++) {
     const pumped = sheet.node(`pumped ${k + 1}`);
     const held = sheet.node(k === pump.stages - 1 ? 'output' : `held ${k + 1}`);
-    parts.diodes.push(sheet.diode(2 * k, smooth, pumped), sheet.diode(2 * k + 1, pumped, held));
-    parts.flying.push(sheet.capacitor(`flying ${k + 1}`, pumped, coupled, pump.flying[k]!));
-    parts.smoothing.push(sheet.capacitor(`smoothing ${k + 1}`, held, foot, pump.smoothing[k]!));
+    diodes.push(sheet.diode(2 * k, smooth, pumped), sheet.diode(2 * k + 1, pumped, held));
+    flying.push(sheet.capacitor(`flying ${k + 1}`, pumped, coupled, pump.flying[k]!));
+    smoothing.push(sheet.capacitor(`smoothing ${k + 1}`, held, foot, pump.smoothing[k]!));
     coupled = pumped;
     smooth = held;
     foot = held;
   }
-  return { ...parts, output: smooth };
-}
-
-/** Collects the elements; a negative pump has every diode and load the other way round. */
-class Sheet {
-  readonly pump: PumpValues;
-  readonly #nodes: string[] = [];
-  readonly #knowns: Known[];
-  readonly #resistors: Resistor[] = [];
-  readonly #capacitors: Capacitor[] = [];
-  readonly #diodes: Diode[] = [];
-  readonly #loads: (CurrentLoad | PowerLoad)[] = [];
-
-  constructor(pump: PumpValues) {
-    this.pump = pump;
-    this.#knowns = [
-      { name: 'ground', volts: [0, 0] },
-      { name: 'input', volts: [pump.input, pump.input] },
-    ];
-  }
-
-  node(name: string): Terminal {
-    return this.#nodes.push(name) - 1;
-  }
-
-  drive(d: number) {
-    const { high, low, highOhms, lowOhms } = this.pump.drives[d]!;
-    const name = `drive ${d + 1}`;
-    const first = <T>(a: T, b: T) => (d === 0 ? [a, b] : [b, a]);
-    const known = this.#knowns.push({ name, volts: first(high, low) }) - 1;
-    const node = this.node(name);
-    const resistor = this.#resistors.push({ name, a: ~known, b: node, ohms: first(highOhms, lowOhms) }) - 1;
-    if (this.pump.series <= 0) return { known, node, resistor };
-    const behind = this.node(`behind series ${d + 1}`);
-    const series = this.#resistor(`series ${d + 1}`, node, behind, this.pump.series);
-    return { known, node: behind, resistor, series };
-  }
-
-  capacitor(name: string, a: Terminal, b: Terminal, values: CapacitorValues): number {
-    return this.#capacitors.push({ name, a, b, ...values }) - 1;
-  }
-
-  diode(position: number, from: Terminal, to: Terminal): number {
-    const [a, b] = this.pump.negative ? [to, from] : [from, to];
-    return this.#diodes.push({ name: `diode ${position + 1}`, a, b, ...this.pump.diodes[position]! }) - 1;
-  }
-
-  load(name: string, output: Terminal, load: PumpValues['loads'][number]): PumpNetwork['loads'][number] {
-    const [a, b] = this.pump.negative ? [ground, output] : [output, ground];
-    if (load.kind === 'resistance') return { kind: 'resistor', index: this.#resistor(name, a, b, load.ohms) };
-    const made =
-      load.kind === 'current'
-        ? { name, a, b, amps: load.amps, knee: loadKnee }
-        : {
-            name,
-            a,
-            b,
-            watts: load.watts,
-            knee: load.knee,
-            start: Math.max(Math.abs(idealVoltage(this.pump)), load.knee),
-          };
-    return { kind: 'load', index: this.#loads.push(made) - 1 };
-  }
-
-  network(): Network {
-    const { duty, frequency } = this.pump;
-    return {
-      segments: [{ duration: duty / frequency }, { duration: (1 - duty) / frequency }],
-      nodeNames: this.#nodes,
-      knowns: this.#knowns,
-      resistors: this.#resistors,
-      capacitors: this.#capacitors,
-      diodes: this.#diodes,
-      loads: this.#loads,
-    };
-  }
-
-  #resistor(name: string, a: Terminal, b: Terminal, ohms: number): number {
-    return this.#resistors.push({ name, a, b, ohms: [ohms, ohms] }) - 1;
-  }
+  return { output: smooth, flying, smoothing, diodes };
 }

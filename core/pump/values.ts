@@ -14,12 +14,54 @@ export interface DiodeValues {
   readonly ohms: number;
 }
 
-/** What the pump's drive terminal is connected to: two levels behind their resistances. */
-export interface DriveValues {
-  readonly high: number;
-  readonly low: number;
+/** A rail that the pump stands on or is driven from, as the pump sees it. */
+export interface RailValues {
+  readonly name: string;
+  /** Voltage when the pump draws nothing, V. */
+  readonly volts: number;
+  /** Source resistance, ohm; 0 for a rail that does not give way. */
+  readonly ohms: number;
+}
+
+/** An output that switches between its rail and ground: a pin, a gate, a timer, a MOSFET pair. */
+export interface OutputValues {
+  /** Index into the pump's rails. */
+  readonly rail: number;
+  /** What the high level stays below the rail even without load, V. */
+  readonly highDrop: number;
   readonly highOhms: number;
+  /** What the low level stays above ground even without load, V. */
+  readonly lowVolts: number;
   readonly lowOhms: number;
+}
+
+/** Ebers-Moll transistor with ohmic resistances. */
+export interface TransistorValues {
+  readonly saturation: number;
+  readonly slope: number;
+  readonly gain: number;
+  readonly reverseGain: number;
+  readonly baseOhms: number;
+  readonly collectorOhms: number;
+  readonly emitterOhms: number;
+}
+
+/** A stage of two transistors between a clock and the pump. */
+export interface DriverValues {
+  /** `push-pull`: common emitters, inverting. `follower`: common collectors, not inverting. */
+  readonly kind: 'push-pull' | 'follower';
+  readonly rail: number;
+  readonly npn: TransistorValues;
+  readonly pnp: TransistorValues;
+  /** Resistor of each base, ohm; for `shared` one resistor to both bases joined. A follower has none (0). */
+  readonly base: { readonly npn: number; readonly pnp: number } | { readonly shared: number };
+}
+
+export interface DriveValues {
+  readonly clock: OutputValues;
+  /** True when the clock's output is high while the first drive's is low. */
+  readonly opposite: boolean;
+  readonly driver?: DriverValues;
 }
 
 export type LoadValues =
@@ -33,12 +75,16 @@ export interface PumpValues {
   /** 1 or more. A doubler is a chain of one stage, an inverter a negative chain of one. */
   readonly stages: number;
   readonly negative: boolean;
-  /** Potential that the first diode starts from, V; 0 for ground. */
-  readonly input: number;
+  readonly rails: readonly RailValues[];
+  /** Rail that the first diode starts from, as an index; absent for ground. */
+  readonly input?: number;
   readonly frequency: number;
-  /** Share of the period in which the first drive is high, 0..1 exclusive. */
+  /** Share of the period in which the first clock is high, taken at the middle of its edges, 0..1 exclusive. */
   readonly duty: number;
-  /** One drive, or two of which the second is high while the first is low. */
+  /** Length of the edges, s; 0 for none. */
+  readonly rise: number;
+  readonly fall: number;
+  /** One drive, or two of opposite phase for a chain whose stages take turns. */
   readonly drives: readonly DriveValues[];
   /** Resistor between drive and capacitors, ohm; 0 for none. */
   readonly series: number;
@@ -57,14 +103,23 @@ export interface PumpValues {
  */
 export const loadKnee = 0.2;
 
-/** Output voltage without load and with perfect parts, V. */
+/** Rail that decides the swing of a drive: the driver's, or the clock's own. */
+export function swingRail(pump: PumpValues, drive: DriveValues): RailValues {
+  return pump.rails[drive.driver?.rail ?? drive.clock.rail]!;
+}
+
+/** True when the pump's terminal goes up while the first clock is high. */
+export function inPhase(drive: DriveValues): boolean {
+  return drive.opposite === (drive.driver?.kind === 'push-pull');
+}
+
+/** Output voltage without load and with perfect parts, every drive swinging from ground to its rail, V. */
 export function idealVoltage(pump: PumpValues): number {
   const sign = pump.negative ? -1 : 1;
-  const swing = (k: number) => {
-    const drive = pump.drives[k % pump.drives.length];
-    return drive ? drive.high - drive.low : 0;
-  };
-  let sum = pump.input;
-  for (let k = 0; k < pump.stages; k++) sum += sign * swing(pump.topology === 'ladder' ? 0 : k);
+  let sum = pump.input === undefined ? 0 : pump.rails[pump.input]!.volts;
+  for (let k = 0; k < pump.stages; k++) {
+    const drive = pump.drives[pump.topology === 'ladder' ? 0 : k % pump.drives.length]!;
+    sum += sign * swingRail(pump, drive).volts;
+  }
   return sum;
 }

@@ -13,7 +13,7 @@ export function closest(word: string, candidates: Iterable<string>): string | un
   let bestDistance = limit + 0.75;
   for (const candidate of candidates) {
     if (Math.abs(candidate.length - word.length) > limit) continue;
-    const plain = editDistance(wanted, candidate.toLowerCase());
+    const plain = editDistance(wanted, candidate.toLowerCase(), limit);
     const distance = plain + (candidate === word || plain > 0 ? 0 : 0.5);
     if (distance < bestDistance) {
       best = candidate;
@@ -23,8 +23,11 @@ export function closest(word: string, candidates: Iterable<string>): string | un
   return best;
 }
 
-/** Optimal string alignment distance: how many single edits lead from `a` to `b`. */
-export function editDistance(a: string, b: string): number {
+/**
+ * Optimal string alignment distance: how many single edits lead from `a` to `b`. Beyond `limit` the exact count
+ * does not matter, and any number above it may come back.
+ */
+export function editDistance(a: string, b: string, limit = Number.POSITIVE_INFINITY): number {
   let beforeLast: number[] = [];
   let last = Array.from({ length: b.length + 1 }, (_, j) => j);
   for (let i = 1; i <= a.length; i++) {
@@ -37,6 +40,8 @@ export function editDistance(a: string, b: string): number {
       }
       row.push(cost);
     }
+    // A swap reaches back two rows: both must be beyond the limit before nothing can come of it.
+    if (Math.min(...row) > limit && Math.min(...last) > limit) return limit + 1;
     beforeLast = last;
     last = row;
   }

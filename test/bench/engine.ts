@@ -2,21 +2,21 @@
  * Speed and accuracy of the engine: ratios, measured side by side in one run.
  */
 import { type Network, type Solved, solve } from '../../core/engine';
-import { pumpNetwork } from '../../core/pump/network';
 import type { PumpValues } from '../../core/pump/values';
-import { capacitor, pump, siliconDiode } from '../support/circuits';
+import { capacitor, fromGround, networkOf, pinDrive, pump, siliconDiode } from '../support/circuits';
 import { randomNumbers, randomPump } from '../support/random-circuits';
 import { settle } from './brute-force';
 import { bestTime, table } from './table';
 
-const drive = { high: 5, low: 0, highOhms: 40, lowOhms: 45 };
+const drive = pinDrive(40, 45);
+const opposite = pinDrive(40, 45, true);
 const diode = { ...siliconDiode, ohms: 0.6 };
 const many = <T>(count: number, value: T): T[] => Array.from({ length: count }, () => value);
 
 const chain = (stages: number, farads: number): PumpValues =>
   pump({
     stages,
-    drives: stages > 1 ? [drive, drive] : [drive],
+    drives: stages > 1 ? [drive, opposite] : [drive],
     flying: many(stages, capacitor(farads, 0.01)),
     diodes: many(stages + 1, diode),
   });
@@ -35,7 +35,7 @@ const reference: readonly (readonly [string, PumpValues])[] = [
   ['doubler, slow limit', chain(1, 0.1e-6)],
   ['doubler, between the limits', chain(1, 1e-6)],
   ['doubler, fast limit', { ...chain(1, 1e-6), frequency: 100e3 }],
-  ['inverter', { ...chain(1, 1e-6), negative: true, input: 0 }],
+  ['inverter', fromGround({ ...chain(1, 1e-6), negative: true })],
   ['3-stage multiplier', chain(3, 1e-6)],
   ['4-stage ladder', ladder(4)],
   ['8-stage ladder', ladder(8)],
@@ -48,10 +48,10 @@ function must(network: Network, tolerance?: number): Solved {
 }
 
 export function benchEngine(): string {
-  const doubler = pumpNetwork(reference[1]![1]);
+  const doubler = networkOf(reference[1]![1]);
   const unit = bestTime(() => must(doubler.network));
   const rows = reference.map(([name, values]) => {
-    const { network, output } = pumpNetwork(values);
+    const { network, output } = networkOf(values);
     const exact = must(network, 1e-7).nodes[output]!.average;
     const solved = must(network);
     const found = solved.nodes[output]!.average;
@@ -89,10 +89,10 @@ export function benchEngine(): string {
 }
 
 export function benchGrowth(): string {
-  const first = bestTime(() => must(pumpNetwork(ladder(1)).network));
+  const first = bestTime(() => must(networkOf(ladder(1)).network));
   const rows = [1, 2, 3, 4, 6, 8, 10].map((stages) => {
-    const multiplier = bestTime(() => must(pumpNetwork(chain(stages, 1e-6)).network));
-    const tower = bestTime(() => must(pumpNetwork(ladder(stages)).network));
+    const multiplier = bestTime(() => must(networkOf(chain(stages, 1e-6)).network));
+    const tower = bestTime(() => must(networkOf(ladder(stages)).network));
     return [String(stages), (multiplier / first).toFixed(1), (tower / first).toFixed(1)];
   });
   return table(['stages', 'multiplier, time / 1-stage ladder', 'ladder, time / 1-stage ladder'], rows);
@@ -104,7 +104,7 @@ export function benchRandom(count: number): string {
   const coarse: number[] = [];
   const fine: number[] = [];
   for (let n = 0; n < count; n++) {
-    const solved = solve(pumpNetwork(randomPump(random)).network);
+    const solved = solve(networkOf(randomPump(random)).network);
     if (solved.converged) {
       coarse.push(solved.counts.coarse);
       fine.push(solved.counts.fine);

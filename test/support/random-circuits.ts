@@ -2,6 +2,7 @@
  * Random pumps over the ranges that the engine must stand: fixed seed, so that a failure can be had again.
  */
 import type { PumpValues } from '../../core/pump/values';
+import { pinDrive } from './circuits';
 
 /** Numbers from 0 to 1 by a 32-bit mixing generator (xorshift and multiply; from memory). */
 export function randomNumbers(seed: number): () => number {
@@ -27,7 +28,8 @@ export function randomPump(random: () => number): PumpValues {
   const negative = chance(0.4);
   const volts = 2 + 13 * random();
   const ohms = within(5, 500);
-  const drive = { high: volts, low: 0, highOhms: ohms * (0.7 + 0.6 * random()), lowOhms: ohms };
+  const highOhms = ohms * (0.7 + 0.6 * random());
+  const drive = pinDrive(highOhms, ohms);
   const diode = {
     saturation: within(1e-14, 1e-5),
     slope: (1 + random()) * 0.0258,
@@ -42,10 +44,13 @@ export function randomPump(random: () => number): PumpValues {
     topology: ladder ? 'ladder' : 'chain',
     stages,
     negative,
-    input: negative || chance(0.3) ? 0 : volts,
+    rails: [{ name: 'supply', volts, ohms: 0 }],
+    ...(negative || chance(0.3) ? {} : { input: 0 }),
     frequency: within(10, 1e6),
     duty: 0.1 + 0.8 * random(),
-    drives: !ladder && stages > 1 ? [drive, drive] : [drive],
+    rise: 0,
+    fall: 0,
+    drives: !ladder && stages > 1 ? [drive, pinDrive(highOhms, ohms, true)] : [drive],
     series: chance(0.2) ? within(1, 1000) : 0,
     flying: column,
     smoothing: ladder ? column : [],

@@ -1,8 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { type Network, type Parameter, solve } from '../../../core/engine';
-import { pumpNetwork } from '../../../core/pump/network';
 import type { PumpValues } from '../../../core/pump/values';
-import { capacitor, pump, siliconDiode } from '../../support/circuits';
+import { capacitor, fromGround, networkOf, pinDrive, pump, siliconDiode } from '../../support/circuits';
 
 // The outside reference is the definition of a derivative: a central difference of two independent solutions.
 const circuits: Record<string, PumpValues> = {
@@ -10,7 +9,8 @@ const circuits: Record<string, PumpValues> = {
   'doubler, fast, with series resistances': pump({
     frequency: 50e3,
     duty: 0.3,
-    drives: [{ high: 3.3, low: 0, highOhms: 57, lowOhms: 42 }],
+    drives: [pinDrive(57, 42)],
+    rails: [{ name: 'v3', volts: 3.3, ohms: 0.4 }],
     flying: [capacitor(2.2e-6, 0.02)],
     diodes: [0, 1].map(() => ({ ...siliconDiode, ohms: 0.6 })),
     reservoir: capacitor(10e-6, 0.5),
@@ -20,10 +20,10 @@ const circuits: Record<string, PumpValues> = {
     ],
   }),
   'doubler with a load of constant power': pump({
-    drives: [{ high: 5, low: 0, highOhms: 40, lowOhms: 40 }],
+    drives: [pinDrive(40)],
     loads: [{ name: 'p', kind: 'power', watts: 5e-3, knee: 1 }],
   }),
-  inverter: pump({ negative: true, input: 0, loads: [{ name: 'r', kind: 'resistance', ohms: 4700 }] }),
+  inverter: fromGround(pump({ negative: true, loads: [{ name: 'r', kind: 'resistance', ohms: 4700 }] })),
 };
 
 /** The network with one quantity moved: relative for parts, in volt for potentials. */
@@ -111,7 +111,7 @@ function every(network: Network): Parameter[] {
 describe('derivatives of the output', () => {
   for (const [name, values] of Object.entries(circuits)) {
     it(`agree with central differences: ${name}`, () => {
-      const { network, output, ground } = pumpNetwork(values);
+      const { network, output, ground } = networkOf(values);
       const port = { a: output, b: ground };
       const parameters = every(network);
       // Meshes of the two solutions differ; a tight tolerance keeps that below the difference itself.

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { solve } from '../../../core/engine';
-import { pumpNetwork } from '../../../core/pump/network';
 import { idealVoltage } from '../../../core/pump/values';
+import { networkOf } from '../../support/circuits';
 import { randomNumbers, randomPump } from '../../support/random-circuits';
 
 // References: Kirchhoff's laws and conservation of energy; no pump of diodes exceeds its ideal voltage.
@@ -11,7 +11,7 @@ describe('random pumps', () => {
     let unsolved = 0;
     for (let n = 0; n < 300; n++) {
       const values = randomPump(random);
-      const { network, output, ground } = pumpNetwork(values);
+      const { network, output, ground } = networkOf(values);
       const solved = solve(network, {
         port: { a: output, b: ground },
         parameters: [{ kind: 'draw', a: output, b: ground }],
@@ -24,7 +24,7 @@ describe('random pumps', () => {
       }
       const out = solved.nodes[output]!;
       const ideal = idealVoltage(values);
-      const reach = Math.abs(values.drives[0]!.high) * values.stages + Math.abs(values.input);
+      const reach = values.rails[0]!.volts * (values.stages + 1);
       expect(solved.balance, label).toBeLessThan(1e-3);
       expect(Number.isFinite(out.average) && Number.isFinite(solved.derivatives.average[0]!), label).toBe(
         true,

@@ -78,7 +78,7 @@ test('a good file with random edits', () => {
       for (const { at, cut, put } of edits) text = text.slice(0, at) + put + text.slice(at + cut);
       expectSpansInside(readBoard(text, smallCatalogue));
     }),
-    { numRuns: 800 },
+    { numRuns: 300 },
   );
 });
 
@@ -86,7 +86,7 @@ test('any text', () => {
   const text = fc.oneof(fc.string({ unit: 'binary', maxLength: 200 }), fc.string({ maxLength: 200 }));
   fc.assert(
     fc.property(text, (written) => expectSpansInside(readBoard(written, smallCatalogue))),
-    { numRuns: 800 },
+    { numRuns: 300 },
   );
 });
 
@@ -118,7 +118,7 @@ test('any tree of known keys with any values', () => {
   })).node;
   fc.assert(
     fc.property(tree, (text) => expectSpansInside(readBoard(text, smallCatalogue))),
-    { numRuns: 800 },
+    { numRuns: 300 },
   );
 });
 
