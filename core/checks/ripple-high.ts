@@ -6,7 +6,7 @@ import { cornerWords, inMode } from '../analysis/words';
 import type { Capacitor } from '../model/board';
 import type { Figure } from '../quantity/figure';
 import { nextPreferredUp } from '../quantity/preferred';
-import { formatQuantity } from '../quantity/write';
+import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
 import { largestLoad, railHere } from './related';
@@ -41,18 +41,21 @@ function toFinding(
   const { name, path, nameSpan } = result.rail;
   const words = corner && cornerWords(corner);
   const when = corner ? ` at the corner${words ? `: ${words}` : ''}` : inMode(point.mode);
-  const times = Number((ripple / allowed.max).toPrecision(2));
   return {
     code: 'ripple-high',
     severity: corner ? 'warning' : 'error',
     at: `${path}.needs.ripple`,
     span: allowed.span ?? nameSpan,
-    message: `${name} has ${formatQuantity(ripple, 'V')} of ripple${when}, ${times} times the ${formatQuantity(allowed.max, 'V')} it may have. ${cure(result, ripple, point, allowed.max)}`,
+    message: `${name} has ${formatQuantity(ripple, 'V')} of ripple${when}, ${excess(ripple / allowed.max)} the ${formatQuantity(allowed.max, 'V')} it may have. ${cure(result, ripple, point, allowed.max)}`,
     expected: `at most ${formatQuantity(allowed.max, 'V')} peak to peak`,
     actual: formatQuantity(ripple, 'V'),
     source: 'needs.ripple of this rail',
     related: [railHere(result.rail, `${name} is made here`), ...largestLoad(result)],
   };
+}
+
+function excess(ratio: number): string {
+  return ratio < 2 ? `${formatPercent(ratio - 1, 2)} more than` : `${Number(ratio.toPrecision(2))} times`;
 }
 
 /** The step that the load current makes in the ESR stays whatever the capacitance: say so when it is most of the ripple. */

@@ -1,0 +1,29 @@
+import { describe, it } from 'vitest';
+import { bench } from '../../support/bench-board';
+import { checkRule, checkSilent } from '../../support/check-rule';
+
+describe('not-computed', () => {
+  it('says once for a board with pumps which figures of the report are empty', () => {
+    const pump =
+      'pump: { topology: doubler, input: v5, drive: tick, diode: schottky-signal, flying: { value: 1 uF, kind: x7r }, reservoir: { value: 1 uF, kind: x7r } }';
+    checkRule(
+      'not-computed',
+      `${bench}
+  up:
+    ${pump}
+#   ^^^^ information not-computed: startTime and dischargeTime of rails
+    loads: { lamp: 2 mA }
+  more:
+    ${pump}
+    loads: { lamp: 2 mA }
+`,
+    );
+  });
+
+  it('is silent on a board without', () => {
+    checkSilent(
+      'not-computed',
+      'supplies: { lab: { voltage: 5 V } }\nrails: { v5: { supply: lab, loads: { x: 1 mA } } }\n',
+    );
+  });
+});
