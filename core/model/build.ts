@@ -4,19 +4,19 @@
  */
 import type { Catalogue } from '../catalog/part';
 import type { Finding } from '../checks/finding';
-import { boardShape, conditionsShape, type NameSpace, type Row } from '../format';
+import { boardShape, conditionsShape, type Row } from '../format';
 import { type Figure, figure } from '../quantity/figure';
 import { locate, type Place } from '../syntax/locate';
-import type { MapNode, Node, SyntaxIssue } from '../syntax/node';
+import type { Node } from '../syntax/node';
 import { parseText } from '../syntax/parse';
 import { stripBom } from '../text/bom';
-import { covers, type Span, touches } from '../text/span';
-import { besides } from '../text/visible';
+import { type Span, touches } from '../text/span';
 import type { Board } from './board';
 import type { Context, ReadQuantity, ReadReference } from './context';
 import { report } from './context';
 import { railCycles } from './cycles';
 import { figureOf } from './figures';
+import { namesOf } from './names';
 import { readParts } from './parts';
 import { present } from './present';
 import { chipsOf } from './sections/chips';
@@ -25,7 +25,8 @@ import { driversOf } from './sections/drivers';
 import { railsOf } from './sections/rails';
 import { benchOf, includesOf, waiversOf } from './sections/reality';
 import { modesOf, suppliesOf } from './sections/supplies';
-import { join, openMap, type Slot } from './slot';
+import { settle, syntaxFinding } from './settle';
+import { openMap, type Slot } from './slot';
 import { refOf } from './words';
 
 export interface BoardReading {
@@ -152,32 +153,6 @@ function ambientOf(slot: Slot | undefined): Figure {
   return figureOf(fields?.at('ambient')) ?? usualAmbient;
 }
 
-/** Names of all sections, known before anything is read, so that entries may stand in any order. */
-function namesOf(root: Node | undefined): Pick<Context, 'names' | 'nameLists'> {
-  const section = (name: NameSpace): ReadonlyMap<string, Span> => {
-    const node = root?.kind === 'map' ? find(root, name) : undefined;
-    if (node?.kind !== 'map') return new Map();
-    return new Map(node.entries.map((entry) => [entry.key.text, entry.key.span]));
-  };
-  const names = bySection(section);
-  return { names, nameLists: bySection((name) => [...names[name].keys()]) };
-}
-
-function bySection<T>(value: (name: NameSpace) => T): Readonly<Record<NameSpace, T>> {
-  return {
-    supplies: value('supplies'),
-    chips: value('chips'),
-    clocks: value('clocks'),
-    drivers: value('drivers'),
-    rails: value('rails'),
-    modes: value('modes'),
-  };
-}
-
-function find(map: MapNode, key: string): Node | undefined {
-  return map.entries.find((entry) => entry.key.text === key)?.value;
-}
-
 /** `drive` names clocks and drivers alike, so that no two of them may share a name. */
 function reportSharedNames(context: Context, clocks: Board['clocks'], drivers: Board['drivers']): void {
   for (const driver of drivers.values()) {
@@ -187,35 +162,6 @@ function reportSharedNames(context: Context, clocks: Board['clocks'], drivers: B
     const related = [{ span: clock.nameSpan, message: 'The clock is here.' }];
     report(context, 'duplicate-name', { path: driver.path, span: driver.nameSpan }, message, { related });
   }
-}
-
-function syntaxFinding(text: string, root: Node | undefined, issue: SyntaxIssue): Finding {
-  const { kind, span, message, related } = issue;
-  // A second key is not in the tree: the first one has the same path.
-  const { path } = locate(text, root, (related ?? issue).span.start);
-  const base: Finding = {
-    code: kind === 'duplicate-key' ? 'duplicate-name' : 'syntax',
-    severity: kind === 'warning' ? 'warning' : 'error',
-    at: path.reduce<string>(join, ''),
-    span,
-    message,
-  };
-  return related ? { ...base, related: [related] } : base;
-}
-
-/** By place; and where the text itself is broken, nothing is said about what it might mean. */
-function settle(text: string, findings: readonly Finding[], issues: readonly SyntaxIssue[]): Finding[] {
-  const broken = issues.filter(({ kind }) => kind === 'broken').map(({ span }) => span);
-  const kept = findings.filter(
-    ({ code, span }) =>
-      code === 'syntax' ||
-      code === 'rail-cycle' ||
-      !broken.some((hole) => covers(hole, span) || covers(span, hole)),
-  );
-  const seen = kept.map((finding) =>
-    finding.span.end > finding.span.start ? finding : { ...finding, span: besides(text, finding.span.start) },
-  );
-  return seen.sort((a, b) => a.span.start - b.span.start || a.span.end - b.span.end);
 }
 
 function byPlace<T extends { readonly span: Span }>(items: readonly T[]): T[] {

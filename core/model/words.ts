@@ -82,7 +82,8 @@ export function checkName(
   const target = context.names[space].get(ref.name);
   context.references.push({ span: ref.span, path, to: space, name: ref.name, ...(target && { target }) });
   if (target) return;
-  const known = [...spaces.flatMap((candidate) => context.nameLists[candidate]), ...also];
+  const lists = spaces.map((candidate) => context.nameLists[candidate]);
+  const known = ([] as string[]).concat(...lists, also);
   const what = spaces.map((candidate) => singular[candidate]).join(' or ');
   reportUnknownName(context, path, ref, what, known);
 }
