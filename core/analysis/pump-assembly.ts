@@ -1,24 +1,23 @@
 /**
- * From the board's description of a pump to its model: every capacitor, diode, pin, load and rail it stands on
+ * From the board's description of a pump to its model: every capacitor, diode, drive, load and rail it stands on
  * becomes a variable, and the engine's parameters are tied to them.
  */
 import type { DiodeData } from '../catalog/part';
-import { saturationAtTemperature, temperatureLaws } from '../compute/diode-saturation-temperature';
-import { referenceTemperature, thermalVoltage } from '../compute/thermal-voltage';
 import type { Capacitor, Pump, Rail } from '../model/board';
-import type { PumpNetwork } from '../pump/network';
-import type { DiodeValues, PumpValues } from '../pump/values';
-import { type Band, exactly, type Unit } from '../quantity/figure';
-import type { Contribution, PumpModel, Variable } from './pump-model';
+import type { LoadValues, PumpValues } from '../pump/values';
+import type { Band } from '../quantity/figure';
+import { activeIn } from './board-modes';
+import type { DriveSource } from './drive-source';
+import { Book, type Point } from './pump-book';
+import { addDriveVariables } from './pump-drives';
+import type { PumpModel } from './pump-model';
+import { type CapacitorPart, capacitorPart, type DiodePart, diodePart } from './pump-parts';
 
-/** What drives one terminal of the pump. */
-export interface DriveSource {
-  /** `mcu.GP15`. */
-  readonly label: string;
-  readonly path: string;
-  readonly high: { readonly railName: string; readonly band: Band };
-  readonly highOhms: Band;
-  readonly lowOhms: Band;
+/** A rail as the pump sees it: voltage without the pump's own current, and source resistance. */
+export interface RailSource {
+  readonly name: string;
+  readonly band: Band;
+  readonly ohms?: Band;
 }
 
 export interface PumpParts {
@@ -27,137 +26,93 @@ export interface PumpParts {
   readonly mode: string | undefined;
   readonly stages: number;
   readonly ambient: Band;
-  readonly input: { readonly railName: string; readonly band: Band } | undefined;
+  /** Every rail that the pump stands on or is driven from, each once. */
+  readonly rails: readonly RailSource[];
+  /** Name among `rails`; absent for ground. */
+  readonly input: string | undefined;
   readonly drives: readonly DriveSource[];
   readonly clock: {
     readonly label: string;
     readonly path: string;
     readonly frequency: Band;
     readonly duty: Band;
+    readonly rise: number;
+    readonly fall: number;
   };
 }
 
-/** Constants of the model; undefined when a part of the pump has no usable value. */
+/** Undefined when a part of the pump has no usable value. */
 export function assemblePump(parts: PumpParts): PumpModel | undefined {
   const { rail, pump, stages } = parts;
   const book = new Book();
   const ladder = pump.topology === 'ladder';
   const ambient = book.add('ambient', 'conditions.ambient', 'K', parts.ambient);
-  const input = parts.input && book.rail(parts.input.railName, parts.input.band);
-  const drives = parts.drives.map((drive) => ({
-    high: book.rail(drive.high.railName, drive.high.band),
-    highOhms: book.add(`${drive.label} high resistance`, drive.path, 'ohm', drive.highOhms),
-    lowOhms: book.add(`${drive.label} low resistance`, drive.path, 'ohm', drive.lowOhms),
-  }));
-  const frequency = book.add(`${parts.clock.label} frequency`, parts.clock.path, 'Hz', parts.clock.frequency);
-  const duty = book.add(`${parts.clock.label} duty`, parts.clock.path, '1', parts.clock.duty);
+  const rails = parts.rails.map((source, k) => addRail(book, source, k));
+  const railIndex = (name: string) => parts.rails.findIndex((source) => source.name === name);
   const series = pump.series && book.add('series resistor', `${rail.path}.pump.series`, 'ohm', pump.series);
+  const drives = parts.drives.map((source, k) =>
+    addDriveVariables(book, source, k, railIndex, ambient, series),
+  );
+  const { clock } = parts;
+  const frequency = book.add(`${clock.label} frequency`, clock.path, 'Hz', clock.frequency);
+  const duty = book.add(`${clock.label} duty`, clock.path, '1', clock.duty);
+
+  const known = new Map<Capacitor, CapacitorPart | undefined>();
+  const capacitor = (label: string, item: Capacitor) => {
+    if (!known.has(item)) known.set(item, capacitorPart(book, label, item));
+    return known.get(item);
+  };
   const column = (name: string, list: readonly Capacitor[]) =>
     Array.from({ length: stages }, (_, k) => {
-      const capacitor = list.length === 1 ? list[0] : list[k];
-      return capacitor && book.capacitor(stages > 1 ? `${name} ${k + 1}` : name, capacitor);
+      const item = list.length === 1 ? list[0] : list[k];
+      return item && capacitor(list.length === 1 ? name : `${name} ${k + 1}`, item);
     });
-  const flying = column('flying capacitor', pump.flying);
+  const flying = all(column('flying capacitor', pump.flying));
   const smoothing = ladder
-    ? column('smoothing capacitor', pump.smoothing.length > 0 ? pump.smoothing : pump.flying)
+    ? all(column('smoothing capacitor', pump.smoothing.length > 0 ? pump.smoothing : pump.flying))
     : [];
-  const reservoir = pump.reservoir && book.capacitor('reservoir capacitor', pump.reservoir);
-  const positions = ladder ? 2 * stages : stages + 1;
-  const diodes = Array.from({ length: positions }, (_, k) => {
-    const diode = pump.diodes.length === 1 ? pump.diodes[0] : pump.diodes[k];
-    return diode?.data && book.diode(diode.ref?.name ?? `diode ${k + 1}`, diode.path, diode.data);
+  const reservoir = pump.reservoir && capacitor('reservoir capacitor', pump.reservoir);
+  const diodes = all(pumpDiodes(book, pump, ladder ? 2 * stages : stages + 1, ambient));
+  const loads = addLoads(book, parts);
+  if (!flying || !smoothing || !diodes) return undefined;
+  if (pump.reservoir ? !reservoir : !ladder) return undefined;
+
+  book.ties((p, at, tie) => {
+    flying.forEach((part, k) => {
+      part.tie(p, at.flying[k]!, frequency, tie);
+    });
+    smoothing.forEach((part, k) => {
+      part.tie(p, at.smoothing[k]!, frequency, tie);
+    });
+    if (at.reservoir !== undefined) reservoir?.tie(p, at.reservoir, frequency, tie);
+    diodes.forEach((part, k) => {
+      part.tie(p, at.diodes[k]!, tie);
+    });
   });
-  const loads = bookLoads(book, parts);
-  if ([...flying, ...smoothing, ...diodes].includes(undefined)) return undefined;
-  if (pump.reservoir && !reservoir) return undefined;
-  if (!ladder && !reservoir) return undefined;
-  type Known<T> = Exclude<T, undefined>;
-  const known = <T>(list: readonly T[]) => list as readonly Known<T>[];
 
-  const values = (p: readonly number[]): PumpValues => {
-    const capacitor = (c: CapacitorVariables) => ({
-      farads: p[c.farads]!,
-      ohms: c.ohms === undefined ? 0 : p[c.ohms]!,
-    });
-    return {
-      topology: ladder ? 'ladder' : 'chain',
-      stages,
-      negative: pump.topology === 'inverter' || pump.polarity === 'negative',
-      input: input === undefined ? 0 : p[input]!,
-      frequency: p[frequency]!,
-      duty: p[duty]!,
-      drives: drives.map((d) => ({
-        high: p[d.high]!,
-        low: 0,
-        highOhms: p[d.highOhms]!,
-        lowOhms: p[d.lowOhms]!,
-      })),
-      series: series === undefined ? 0 : p[series]!,
-      flying: known(flying).map(capacitor),
-      smoothing: known(smoothing).map(capacitor),
-      ...(reservoir ? { reservoir: capacitor(reservoir) } : {}),
-      diodes: known(diodes).map((d) => diodeAt(d, p, p[ambient]!)),
-      loads: loads.map((load) =>
-        load.kind === 'resistance'
-          ? { name: load.name, kind: 'resistance', ohms: p[load.variable]! }
-          : { name: load.name, kind: 'current', amps: p[load.variable]! },
-      ),
-    };
-  };
-
-  const contributions = (p: readonly number[], at: PumpNetwork): Contribution[] => {
-    const list: Contribution[] = [];
-    const tie = (variable: number | undefined, parameter: Contribution['parameter'], weight?: number) => {
-      if (variable !== undefined) list.push({ variable, parameter, weight: weight ?? 1 / p[variable]! });
-    };
-    if (input !== undefined) tie(input, { kind: 'volts', index: ~at.input }, 1);
-    drives.forEach((d, k) => {
-      const place = at.drives[k]!;
-      tie(d.high, { kind: 'volts', index: place.known, share: k === 0 ? [1, 0] : [0, 1] }, 1);
-      tie(d.highOhms, { kind: 'ohms', index: place.resistor, segment: k });
-      tie(d.lowOhms, { kind: 'ohms', index: place.resistor, segment: 1 - k });
-      if (place.series !== undefined) tie(series, { kind: 'ohms', index: place.series });
-    });
-    const capacitor = (c: CapacitorVariables, index: number) => {
-      tie(c.farads, { kind: 'farads', index });
-      tie(c.ohms, { kind: 'esr', index });
-      // Stretching time acts like shrinking every capacitor.
-      tie(frequency, { kind: 'farads', index });
-    };
-    known(flying).forEach((c, k) => {
-      capacitor(c, at.flying[k]!);
-    });
-    known(smoothing).forEach((c, k) => {
-      capacitor(c, at.smoothing[k]!);
-    });
-    if (reservoir && at.reservoir !== undefined) capacitor(reservoir, at.reservoir);
-    known(diodes).forEach((d, k) => {
-      const index = at.diodes[k]!;
-      tie(d.saturation, { kind: 'saturation', index });
-      tie(d.resistance, { kind: 'diode-ohms', index });
-      // Ideality and temperature act on slope and saturation at once; the law is smooth, a small step serves.
-      for (const variable of [d.ideality, ambient]) {
-        const step = 1e-4 * p[variable]!;
-        const moved = [...p];
-        moved[variable] = p[variable]! + step;
-        const before = diodeAt(d, p, p[ambient]!);
-        const after = diodeAt(d, moved, moved[ambient]!);
-        tie(variable, { kind: 'saturation', index }, Math.log(after.saturation / before.saturation) / step);
-        tie(variable, { kind: 'slope', index }, Math.log(after.slope / before.slope) / step);
-      }
-    });
-    loads.forEach((load, k) => {
-      const { index } = at.loads[k]!;
-      tie(load.variable, load.kind === 'resistance' ? { kind: 'ohms', index } : { kind: 'load', index });
-    });
-    return list;
-  };
-
-  const name = rail.name;
+  const values = (p: Point): PumpValues => ({
+    topology: ladder ? 'ladder' : 'chain',
+    stages,
+    negative: pump.topology === 'inverter' || pump.polarity === 'negative',
+    rails: rails.map((read) => read(p)),
+    ...(parts.input === undefined ? {} : { input: railIndex(parts.input) }),
+    frequency: p[frequency]!,
+    duty: p[duty]!,
+    rise: clock.rise,
+    fall: clock.fall,
+    drives: drives.map((read) => read(p)),
+    series: series === undefined ? 0 : p[series]!,
+    flying: flying.map((part) => part.values(p)),
+    smoothing: smoothing.map((part) => part.values(p)),
+    ...(reservoir ? { reservoir: reservoir.values(p) } : {}),
+    diodes: diodes.map((part) => part.values(p)),
+    loads: loads.map((read) => read(p)),
+  });
+  const { name } = rail;
   return {
     variables: book.variables,
     values,
-    contributions,
+    contributions: (p, at) => book.contributions(p, at),
     keys: {
       flying: flying.map((_, k) => `${name}.flying[${k}]`),
       smoothing: smoothing.map((_, k) => `${name}.smoothing[${k}]`),
@@ -167,53 +122,79 @@ export function assemblePump(parts: PumpParts): PumpModel | undefined {
   };
 }
 
-interface CapacitorVariables {
-  readonly farads: number;
-  readonly ohms: number | undefined;
+/** The list when every entry is there. */
+function all<T>(list: readonly (T | undefined)[]): readonly T[] | undefined {
+  const present = list.filter((item): item is T => item !== undefined);
+  return present.length === list.length ? present : undefined;
 }
 
-interface DiodeVariables {
-  readonly saturation: number;
-  readonly ideality: number;
-  readonly resistance: number;
-  readonly kind: DiodeData['kind'];
+function addRail(book: Book, { name, band, ohms }: RailSource, k: number) {
+  const volts = book.rail(name, band);
+  const resistance =
+    ohms && ohms.max > 0
+      ? book.add(`rail ${name} source resistance`, `rails.${name}`, 'ohm', ohms)
+      : undefined;
+  book.ties((_p, at, tie) => {
+    const place = at.rails[k]!;
+    tie(volts, { kind: 'volts', index: place.known }, 1);
+    if (place.resistor !== undefined) tie(resistance, { kind: 'ohms', index: place.resistor });
+  });
+  return (p: Point) => ({
+    name,
+    volts: p[volts]!,
+    ohms: resistance === undefined ? 0 : p[resistance]!,
+  });
 }
 
-function diodeAt(d: DiodeVariables, p: readonly number[], kelvin: number): DiodeValues {
-  const ideality = p[d.ideality]!;
-  const saturation = p[d.saturation]!;
-  const law = temperatureLaws[d.kind];
-  return {
-    saturation:
-      saturationAtTemperature(saturation, ideality, law, referenceTemperature, kelvin) ?? saturation,
-    slope: ideality * (thermalVoltage(kelvin) ?? Number.NaN),
-    ohms: p[d.resistance]!,
-  };
+function pumpDiodes(book: Book, pump: Pump, count: number, ambient: number): (DiodePart | undefined)[] {
+  const known = new Map<DiodeData, DiodePart>();
+  return Array.from({ length: count }, (_, k) => {
+    const diode = pump.diodes.length === 1 ? pump.diodes[0] : pump.diodes[k];
+    if (!diode?.data) return undefined;
+    const part =
+      known.get(diode.data) ??
+      diodePart(book, diode.ref?.name ?? `diode ${k + 1}`, diode.path, diode.data, ambient);
+    known.set(diode.data, part);
+    return part;
+  });
 }
 
-function bookLoads(book: Book, { rail, mode }: PumpParts) {
-  const loads: { name: string; kind: 'resistance' | 'current'; variable: number }[] = [];
-  for (const load of rail.loads.values()) {
-    if (mode !== undefined && load.modes && !load.modes.some((m) => m.name === mode)) continue;
-    if (load.resistance && load.resistance.min > 0)
-      loads.push({
-        name: load.name,
-        kind: 'resistance',
-        variable: book.add(`load ${load.name}`, load.path, 'ohm', load.resistance),
-      });
-    if (load.current && load.current.typical !== 0)
-      loads.push({
-        name: load.name,
-        kind: 'current',
-        variable: book.add(`load ${load.name}`, load.path, 'A', magnitude(load.current)),
-      });
-  }
-  if (rail.bleeder && rail.bleeder.min > 0)
-    loads.push({
-      name: 'bleeder',
-      kind: 'resistance',
-      variable: book.add('bleeder', `${rail.path}.bleeder`, 'ohm', rail.bleeder),
+/** Below half a volt nothing that regulates its own power still runs (common practice, no source). */
+const leastPowerVoltage = 0.5;
+
+function addLoads(book: Book, { rail, mode }: PumpParts): ((p: Point) => LoadValues)[] {
+  const loads: ((p: Point) => LoadValues)[] = [];
+  const add = (label: string, path: string, unit: 'ohm' | 'A' | 'W', band: Band) => {
+    const variable = book.add(label, path, unit, band);
+    const k = loads.length;
+    book.ties((_p, at, tie) => {
+      const { index } = at.loads[k]!;
+      tie(variable, unit === 'ohm' ? { kind: 'ohms', index } : { kind: 'load', index });
     });
+    return variable;
+  };
+  for (const load of rail.loads.values()) {
+    if (!activeIn(mode, load.modes)) continue;
+    const { name, path } = load;
+    const label = `load ${name}`;
+    if (load.resistance && load.resistance.min > 0) {
+      const variable = add(label, path, 'ohm', load.resistance);
+      loads.push((p) => ({ name, kind: 'resistance', ohms: p[variable]! }));
+    }
+    if (load.current && load.current.typical !== 0) {
+      const variable = add(label, path, 'A', magnitude(load.current));
+      loads.push((p) => ({ name, kind: 'current', amps: p[variable]! }));
+    }
+    if (load.power && load.power.typical > 0) {
+      const variable = add(label, path, 'W', load.power);
+      const knee = Math.max(Math.abs(load.least?.typical ?? 0), leastPowerVoltage);
+      loads.push((p) => ({ name, kind: 'power', watts: p[variable]!, knee }));
+    }
+  }
+  if (rail.bleeder && rail.bleeder.min > 0) {
+    const variable = add('bleeder', `${rail.path}.bleeder`, 'ohm', rail.bleeder);
+    loads.push((p) => ({ name: 'bleeder', kind: 'resistance', ohms: p[variable]! }));
+  }
   return loads;
 }
 
@@ -221,63 +202,4 @@ function bookLoads(book: Book, { rail, mode }: PumpParts) {
 function magnitude(band: Band): Band {
   if (band.typical >= 0) return band;
   return { min: -band.max, typical: -band.typical, max: -band.min };
-}
-
-/** Collects variables; a rail or a part that serves twice is one variable, since it cannot sit at both ends. */
-class Book {
-  readonly variables: Variable[] = [];
-  readonly #rails = new Map<string, number>();
-  readonly #capacitors = new Map<Capacitor, CapacitorVariables>();
-  readonly #diodes = new Map<DiodeData, DiodeVariables>();
-
-  add(label: string, path: string, unit: Unit, { min, typical, max }: Band): number {
-    return this.variables.push({ label, path, unit, band: { min, typical, max } }) - 1;
-  }
-
-  rail(name: string, band: Band): number {
-    const known = this.#rails.get(name);
-    if (known !== undefined) return known;
-    const index = this.add(`rail ${name}`, `rails.${name}`, 'V', band);
-    this.#rails.set(name, index);
-    return index;
-  }
-
-  capacitor(label: string, capacitor: Capacitor): CapacitorVariables | undefined {
-    const { value, esr } = capacitor;
-    if (!value || !(value.min > 0)) return undefined;
-    const known = this.#capacitors.get(capacitor);
-    if (known) return known;
-    const tolerance = capacitor.toleranceGiven ? undefined : capacitor.kind.data?.tolerance;
-    const band = tolerance
-      ? {
-          min: value.typical * (1 + tolerance.min),
-          typical: value.typical,
-          max: value.typical * (1 + tolerance.max),
-        }
-      : value;
-    const made = {
-      farads: this.add(label, capacitor.path, 'F', band),
-      ohms: esr && esr.min > 0 ? this.add(`${label} ESR`, capacitor.path, 'ohm', esr) : undefined,
-    };
-    this.#capacitors.set(capacitor, made);
-    return made;
-  }
-
-  diode(label: string, path: string, data: DiodeData): DiodeVariables {
-    const known = this.#diodes.get(data);
-    if (known) return known;
-    const made = {
-      kind: data.kind,
-      saturation: this.add(`${label} saturation current`, path, 'A', data.saturation),
-      ideality: this.add(`${label} ideality`, path, '1', data.ideality),
-      resistance: this.add(
-        `${label} resistance`,
-        path,
-        'ohm',
-        data.resistance.min > 0 ? data.resistance : exactly(1e-3),
-      ),
-    };
-    this.#diodes.set(data, made);
-    return made;
-  }
 }

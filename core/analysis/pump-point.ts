@@ -1,11 +1,14 @@
 /**
  * One operating point of a pump: its network solved, and the solution put into the words of the trade.
  */
-import { type ElementFigures, type Solved, solve } from '../engine';
+import { type Solved, solve } from '../engine';
+import type { DrivePlace } from '../pump/drive';
 import { type PumpNetwork, pumpNetwork } from '../pump/network';
 import { idealVoltage, type PumpValues } from '../pump/values';
+import { driverFigures } from './driver-figures';
+import { pumpDrops } from './pump-drops';
 import { hasBand, type PumpModel } from './pump-model';
-import type { CapacitorFigures, DiodeFigures, Drop, PumpPoint } from './types';
+import type { CapacitorFigures, DiodeFigures, DriveFigures, PumpPoint } from './types';
 
 export interface SolvedPoint {
   readonly point: PumpPoint;
@@ -26,6 +29,7 @@ export function solvePoint(
 ): SolvedPoint | NoPoint {
   const values = model.values(at);
   const network = pumpNetwork(values);
+  if (!network) return { reason: 'the edges of its clock leave no room for its levels' };
   const contributions = model.contributions(at, network);
   const solved = solve(network.network, {
     port: { a: network.output, b: network.ground },
@@ -68,6 +72,7 @@ function describe(
   );
   const resistance = Math.abs(solved.derivatives.average[0]!);
   const sign = values.negative ? -1 : 1;
+  const drivers = values.drives.map((_, k) => driverFigures(values, network, solved, k));
   const powerOut = sum(loads.map((load) => load.loss));
   const powerIn = sum(solved.knowns.map((known) => known.power));
   return {
@@ -78,24 +83,20 @@ function describe(
     ripple: output.max - output.min,
     loadCurrent,
     askedCurrent,
-    inputCurrent: values.input === 0 ? 0 : solved.knowns[~network.input]!.average,
+    // The first diode is the only way from the input rail.
+    inputCurrent: values.input === undefined ? 0 : sign * solved.diodes[network.diodes[0]!]!.average,
     powerIn,
     powerOut,
     ideal: idealVoltage(values),
     openCircuit: output.average + sign * resistance * loadCurrent,
     outputResistance: resistance,
-    drops: drops(values, network, solved, loadCurrent, powerIn, powerOut),
+    drops: pumpDrops(values, network, solved, drivers, loadCurrent),
     balance: solved.balance,
-    drives: network.drives.map(({ resistor }) => {
-      const figures = solved.resistors[resistor]!;
-      return {
-        sourceAverage: figures.averagePositive,
-        sinkAverage: figures.averageNegative,
-        rms: figures.rms,
-        peakSource: Math.max(figures.max, 0),
-        peakSink: Math.max(-figures.min, 0),
-      };
-    }),
+    drives: network.drives.map((drive) => driveFigures(solved, drive)),
+    drivers,
+    railCurrents: new Map(
+      values.rails.map((rail, k) => [rail.name, solved.knowns[network.rails[k]!.known]!.average]),
+    ),
     capacitors: capacitorFigures(model, network, solved),
     diodes: network.diodes.map((index, k): DiodeFigures => {
       const figures = solved.diodes[index]!;
@@ -113,6 +114,19 @@ function describe(
   };
 }
 
+/** What the clock's output gives (through its upper switch) and takes (through its lower one). */
+function driveFigures(solved: Solved, { high, low }: DrivePlace): DriveFigures {
+  const upper = solved.resistors[high]!;
+  const lower = solved.resistors[low]!;
+  return {
+    sourceAverage: upper.averagePositive + lower.averageNegative,
+    sinkAverage: lower.averagePositive + upper.averageNegative,
+    rms: Math.hypot(upper.rms, lower.rms),
+    peakSource: Math.max(upper.max, -lower.min, 0),
+    peakSink: Math.max(lower.max, -upper.min, 0),
+  };
+}
+
 function capacitorFigures(model: PumpModel, network: PumpNetwork, solved: Solved): CapacitorFigures[] {
   const of = (key: string, index: number): CapacitorFigures => {
     const { voltage, rms } = solved.capacitors[index]!;
@@ -123,46 +137,6 @@ function capacitorFigures(model: PumpModel, network: PumpNetwork, solved: Solved
     ...network.smoothing.map((index, k) => of(model.keys.smoothing[k]!, index)),
     ...(network.reservoir === undefined ? [] : [of(model.keys.reservoir, network.reservoir)]),
   ];
-}
-
-/**
- * Where the volts go: each loss divided by the load current. Every period each source delivers the load's charge
- * once per stage that it feeds, so the losses add up to the ideal voltage minus the actual one; what leaks back
- * through the diodes and the difference between average power and average voltage make up the last small entry.
- */
-function drops(
-  values: PumpValues,
-  network: PumpNetwork,
-  solved: Solved,
-  loadCurrent: number,
-  powerIn: number,
-  powerOut: number,
-): Drop[] {
-  if (!(loadCurrent > 0)) return [];
-  const volts = (elements: readonly (ElementFigures | undefined)[]) =>
-    sum(elements.map((e) => e?.loss ?? 0)) / loadCurrent;
-  const ideal = Math.abs(idealVoltage(values));
-  const actual = Math.abs(solved.nodes[network.output]!.average);
-  const list: Drop[] = [
-    { in: 'drive', volts: volts(network.drives.map((d) => solved.resistors[d.resistor])) },
-    {
-      in: 'series resistor',
-      volts: volts(
-        network.drives.map((d) => (d.series === undefined ? undefined : solved.resistors[d.series])),
-      ),
-    },
-    { in: 'diodes', volts: volts(network.diodes.map((k) => solved.diodes[k])) },
-    { in: 'flying capacitor ESR', volts: volts(network.flying.map((k) => solved.capacitors[k])) },
-    { in: 'smoothing capacitor ESR', volts: volts(network.smoothing.map((k) => solved.capacitors[k])) },
-    {
-      in: 'reservoir ESR',
-      volts: volts([network.reservoir === undefined ? undefined : solved.capacitors[network.reservoir]]),
-    },
-  ];
-  const rest = ideal - powerIn / loadCurrent + (powerOut / loadCurrent - actual);
-  return [...list, { in: 'leakage and ripple', volts: rest }].filter(
-    (drop) => Math.abs(drop.volts) > 1e-5 * ideal,
-  );
 }
 
 function sum(values: readonly number[]): number {

@@ -3,11 +3,12 @@
  */
 
 import type { Board, Pump, Rail } from '../model/board';
-import type { Band } from '../quantity/figure';
+import { type Band, exactly } from '../quantity/figure';
 import { weightedModes } from './board-modes';
+import type { DriveSource } from './drive-source';
 import { type Gap, isGap } from './gap';
 import { pinResistance } from './pin-resistance';
-import { assemblePump, type DriveSource } from './pump-assembly';
+import { assemblePump, type RailSource } from './pump-assembly';
 import { driveData, type PinDrive, pumpDrives } from './pump-drive';
 import { type ModeModel, solvePump } from './pump-result';
 import type { PumpResult } from './types';
@@ -38,6 +39,12 @@ export function setUpPump(board: Board, rail: Rail, pump: Pump, voltage: RailVol
   }
   const input = inputRail(pump, voltage);
   if (input && isGap(input)) return input;
+  const rails = new Map<string, RailSource>();
+  for (const name of [...sources.map((source) => source.railName), ...(input ? [input.railName] : [])]) {
+    const band = voltage(name);
+    if (isGap(band)) return band;
+    rails.set(name, { name, band });
+  }
   const models: ModeModel[] = [];
   for (const { name } of weightedModes(board)) {
     const model = assemblePump({
@@ -46,13 +53,16 @@ export function setUpPump(board: Board, rail: Rail, pump: Pump, voltage: RailVol
       mode: name,
       stages: 1,
       ambient: board.ambient,
-      input,
+      rails: [...rails.values()],
+      input: input?.railName,
       drives: sources,
       clock: {
         label: first.clock.name,
         path: first.clock.path,
         frequency: first.frequency,
         duty: first.duty,
+        rise: 0,
+        fall: 0,
       },
     });
     if (!model) return { because: 'a capacitor or a diode of it has no usable value' };
@@ -99,7 +109,10 @@ function driveSource(drive: PinDrive, voltage: RailVoltage): DriveSource | Gap {
   return {
     label: drive.key,
     path: `${drive.chip.path}.pins.${drive.pin}`,
-    high: { railName: drive.railName, band },
+    railName: drive.railName,
+    opposite: false,
+    highDrop: exactly(0),
+    lowVolts: exactly(0),
     highOhms: high,
     lowOhms: low,
   };

@@ -40,6 +40,23 @@ export interface DriveFigures {
   readonly peakSink: number;
 }
 
+/** A stage of two transistors between the clock and the pump, of one drive. */
+export interface DriverFigures {
+  /** Largest current that the clock must give to the bases, magnitude, A. */
+  readonly baseCurrent: number;
+  /** Collector over base current, averages over the time that the transistor is on; the larger of the two. */
+  readonly forcedGain: number;
+  /** Heat in both transistors, W. */
+  readonly dissipation: number;
+  /** Average out of the driver's rail, A. */
+  readonly railCurrent: number;
+  /** Average that flows through both transistors at once, A, and the same as charge per edge, C. */
+  readonly crossCurrent: number;
+  readonly crossCharge: number;
+  /** Volts by which the output still misses its rail or ground at the end of a phase; the larger of the two. */
+  readonly shortOf: number;
+}
+
 export interface CapacitorFigures {
   /** Key in the report: `v6.flying[0]`, `v6.reservoir`. */
   readonly key: string;
@@ -80,6 +97,10 @@ export interface PumpPoint {
   readonly drops: readonly Drop[];
   readonly balance: number;
   readonly drives: readonly DriveFigures[];
+  /** In the order of `drives`; null for a drive without a driver of transistors. */
+  readonly drivers: readonly (DriverFigures | null)[];
+  /** Average out of every rail that the pump stands on or is driven from, by name, A. */
+  readonly railCurrents: ReadonlyMap<string, number>;
   readonly capacitors: readonly CapacitorFigures[];
   readonly diodes: readonly DiodeFigures[];
   /** Solver effort: iterations and steps. */

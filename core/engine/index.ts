@@ -1,7 +1,9 @@
 /**
  * The circuit engine: a small switched network in, its periodic steady state out. Knows nothing of boards.
  */
+
 export type { ElementFigures, KnownFigures, Measures, NodeFigures } from './measure';
+export { resistorCurrent } from './measure';
 export {
   type Capacitor,
   type Course,

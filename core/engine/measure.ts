@@ -98,12 +98,8 @@ export function measure(circuit: Circuit, path: Trajectory): Measures {
       losses += sum.loss;
       return finish(element.name, sum);
     });
-  const resistors = collect(
-    network.resistors,
-    circuit.resistors,
-    (s, k, across) =>
-      circuit.conductance[path.segment[s]!]![k]! *
-      (across - dropAt(circuit, k, path.segment[s]!, path.time[s]!)),
+  const resistors = collect(network.resistors, circuit.resistors, (s, k) =>
+    resistorCurrent(circuit, path, k, s),
   );
   const count = circuit.capacitors.count;
   const capacitors = collect(
@@ -202,4 +198,12 @@ function finish(name: string, sum: Sum): ElementFigures {
     loss: sum.loss,
     voltage: { average: sum.volts, min: sum.low, max: sum.high },
   };
+}
+
+/** Current of resistor `k` from a to b at stage `s` of a solved period, A. */
+export function resistorCurrent(circuit: Circuit, path: Trajectory, k: number, s: number): number {
+  const at = s * (circuit.nodes + circuit.knowns);
+  const segment = path.segment[s]!;
+  const across = path.volts[at + circuit.resistors.a[k]!]! - path.volts[at + circuit.resistors.b[k]!]!;
+  return circuit.conductance[segment]![k]! * (across - dropAt(circuit, k, segment, path.time[s]!));
 }

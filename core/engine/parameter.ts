@@ -15,6 +15,8 @@ export type Parameter =
       readonly kind: 'farads' | 'esr' | 'saturation' | 'slope' | 'diode-ohms' | 'load';
       readonly index: number;
     }
+  /** The share that a transistor's junction passes on, absolute. */
+  | { readonly kind: 'alpha'; readonly index: number }
   /** A resistor's drop, V. */
   | { readonly kind: 'drop'; readonly index: number; readonly share?: readonly Course[] }
   /** A current drawn from `a` and returned to `b`. */
@@ -52,6 +54,12 @@ export function parameterCurrent(
         knownCurrent(circuit, path, s, nodes + parameter.index, (a, b, current) => {
           add(a, b, share * current);
         });
+      return;
+    }
+    case 'alpha': {
+      const k = parameter.index;
+      const current = path.lines.i[s * circuit.diodes.count + k]!;
+      add(circuit.collector[k]!, circuit.baseEnd[k]!, Math.sign(circuit.alpha[k]!) * current);
       return;
     }
     case 'drop': {

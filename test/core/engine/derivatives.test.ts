@@ -67,6 +67,15 @@ function moved(network: Network, parameter: Parameter, step: number): Network {
           return 'amps' in l ? { ...l, amps: l.amps * factor } : { ...l, watts: l.watts * factor };
         }),
       };
+    case 'alpha':
+      return {
+        ...network,
+        diodes: network.diodes.map((d, k) =>
+          k === parameter.index && d.transfer
+            ? { ...d, transfer: { ...d.transfer, alpha: d.transfer.alpha + step } }
+            : d,
+        ),
+      };
     case 'drop':
       return {
         ...network,

@@ -1,0 +1,140 @@
+/**
+ * Capacitors, diodes and transistors of a pump as variables: values at a point, and ties to the engine.
+ */
+import type { DiodeData, TransistorData } from '../catalog/part';
+import { saturationAtTemperature, temperatureLaws } from '../compute/diode-saturation-temperature';
+import { referenceTemperature, thermalVoltage } from '../compute/thermal-voltage';
+import type { Parameter } from '../engine';
+import type { Capacitor } from '../model/board';
+import type { CapacitorValues, DiodeValues, TransistorValues } from '../pump/values';
+import { type Band, exactly } from '../quantity/figure';
+import type { Book, Point, Tie } from './pump-book';
+
+export interface CapacitorPart {
+  values(p: Point): CapacitorValues;
+  /** `frequency`: stretching time acts like shrinking every capacitor. */
+  tie(p: Point, index: number, frequency: number, tie: Tie): void;
+}
+
+/** Undefined when the capacitor has no usable value. */
+export function capacitorPart(book: Book, label: string, capacitor: Capacitor): CapacitorPart | undefined {
+  const { value, esr } = capacitor;
+  if (!value || !(value.min > 0)) return undefined;
+  const tolerance = capacitor.toleranceGiven ? undefined : capacitor.kind.data?.tolerance;
+  const band: Band = tolerance
+    ? {
+        min: value.typical * (1 + tolerance.min),
+        typical: value.typical,
+        max: value.typical * (1 + tolerance.max),
+      }
+    : value;
+  const farads = book.add(label, capacitor.path, 'F', band);
+  const ohms = esr && esr.min > 0 ? book.add(`${label} ESR`, capacitor.path, 'ohm', esr) : undefined;
+  return {
+    values: (p) => ({ farads: p[farads]!, ohms: ohms === undefined ? 0 : p[ohms]! }),
+    tie: (_p, index, frequency, tie) => {
+      tie(farads, { kind: 'farads', index });
+      tie(ohms, { kind: 'esr', index });
+      tie(frequency, { kind: 'farads', index });
+    },
+  };
+}
+
+export interface DiodePart {
+  values(p: Point): DiodeValues;
+  tie(p: Point, index: number, tie: Tie): void;
+}
+
+export function diodePart(
+  book: Book,
+  label: string,
+  path: string,
+  data: DiodeData,
+  ambient: number,
+): DiodePart {
+  const saturation = book.add(`${label} saturation current`, path, 'A', data.saturation);
+  const ideality = book.add(`${label} ideality`, path, '1', data.ideality);
+  const resistance = book.add(
+    `${label} resistance`,
+    path,
+    'ohm',
+    data.resistance.min > 0 ? data.resistance : exactly(1e-3),
+  );
+  const values = (p: Point): DiodeValues => ({
+    ...junctionAt(p[saturation]!, p[ideality]!, p[ambient]!, data.kind),
+    ohms: p[resistance]!,
+  });
+  return {
+    values,
+    tie: (p, index, tie) => {
+      tie(saturation, { kind: 'saturation', index });
+      tie(resistance, { kind: 'diode-ohms', index });
+      for (const variable of [ideality, ambient]) tieJunction(p, variable, index, values, tie);
+    },
+  };
+}
+
+export interface TransistorPart {
+  values(p: Point): TransistorValues;
+  tie(p: Point, place: { emitterJunction: number; collectorJunction: number }, tie: Tie): void;
+}
+
+export function transistorPart(
+  book: Book,
+  label: string,
+  path: string,
+  data: TransistorData,
+  ambient: number,
+): TransistorPart {
+  const saturation = book.add(`${label} saturation current`, path, 'A', data.saturation);
+  const gain = book.add(`${label} gain`, path, '1', data.gain);
+  const values = (p: Point): TransistorValues => ({
+    ...junctionAt(p[saturation]!, 1, p[ambient]!, 'silicon'),
+    gain: p[gain]!,
+    reverseGain: data.reverseGain?.typical ?? 5,
+    baseOhms: data.baseResistance?.typical ?? 10,
+    collectorOhms: data.collectorResistance?.typical ?? 1,
+    emitterOhms: data.emitterResistance?.typical ?? 0.1,
+  });
+  return {
+    values,
+    tie: (p, { emitterJunction, collectorJunction }, tie) => {
+      for (const index of [emitterJunction, collectorJunction]) {
+        tie(saturation, { kind: 'saturation', index });
+        tieJunction(p, ambient, index, values, tie);
+      }
+      // alpha = gain / (gain + 1), and the emitter junction's own saturation current is that of the model over alpha.
+      const byGain = 1 / (p[gain]! + 1) ** 2;
+      tie(gain, { kind: 'alpha', index: emitterJunction }, byGain);
+      tie(gain, { kind: 'saturation', index: emitterJunction }, (-byGain * (p[gain]! + 1)) / p[gain]!);
+    },
+  };
+}
+
+function junctionAt(saturation: number, ideality: number, kelvin: number, kind: DiodeData['kind']) {
+  const law = temperatureLaws[kind];
+  return {
+    saturation:
+      saturationAtTemperature(saturation, ideality, law, referenceTemperature, kelvin) ?? saturation,
+    slope: ideality * (thermalVoltage(kelvin) ?? Number.NaN),
+  };
+}
+
+/** Ideality and temperature act on slope and saturation at once; the laws are smooth, a small step serves. */
+function tieJunction(
+  p: Point,
+  variable: number,
+  index: number,
+  values: (p: Point) => { readonly saturation: number; readonly slope: number },
+  tie: Tie,
+): void {
+  const step = 1e-4 * p[variable]!;
+  const moved = [...p];
+  moved[variable] = p[variable]! + step;
+  const before = values(p);
+  const after = values(moved);
+  const relative = (key: 'saturation' | 'slope') => Math.log(after[key] / before[key]) / step;
+  const parameter = (kind: 'saturation' | 'slope'): Parameter => ({ kind, index });
+  tie(variable, parameter('saturation'), relative('saturation'));
+  tie(variable, parameter('slope'), relative('slope'));
+}
