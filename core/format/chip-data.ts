@@ -97,5 +97,9 @@ export const chipPartShape = shape('chip data', 'Data of a chip with pins.', {
     '{ port-a: { pins: [PA0, PA1], source: 100 mA } }',
   ),
   total: row(map(totalShape), 'Limits of the sums over all pins.', '{ source: 150 mA, sink: 150 mA }'),
-  draws: row(quantity('A', notNegative), 'Supply current of the chip itself.', '20 mA', later),
+  draws: row(
+    quantity('A', notNegative),
+    'Supply current of the chip itself, where the board gives none.',
+    '20 mA',
+  ),
 });
