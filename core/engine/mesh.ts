@@ -113,7 +113,7 @@ function coarseStage(coarse: Trajectory, segment: number): number {
 function firstLength(duration: number, rate: Float64Array, swing: Float64Array): number {
   let length = 0.02 * duration;
   for (let k = 0; k < rate.length; k++)
-    if (rate[k] !== 0) length = Math.min(length, (0.05 * swing[k]!) / Math.abs(rate[k]!));
+    if (rate[k] !== 0) length = Math.min(length, (0.15 * swing[k]!) / Math.abs(rate[k]!));
   return Math.max(length, 1e-7 * duration);
 }
 

@@ -23,7 +23,7 @@ export interface SolveOptions {
   readonly parameters: readonly Parameter[];
 }
 
-export const defaultOptions: SolveOptions = { tolerance: 1e-3, lineError: 1e-6, parameters: [] };
+export const defaultOptions: SolveOptions = { tolerance: 5e-4, lineError: 1e-6, parameters: [] };
 
 /** Per unit of each parameter, in the order of `parameters`; NaN where they could not be had. */
 export interface PortDerivatives {
