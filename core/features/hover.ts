@@ -17,6 +17,8 @@ import { supplyCard } from './supply-card';
 
 export function hoverCard(analysis: BoardAnalysis, offset: number): Card | undefined {
   const { reading } = analysis;
+  const pin = clockPinCard(analysis, offset);
+  if (pin) return pin;
   const reference = reading.referenceAt(offset);
   const referred = reference && referenceCard(analysis, reference);
   if (referred) return referred;
@@ -25,6 +27,16 @@ export function hoverCard(analysis: BoardAnalysis, offset: number): Card | undef
   const quantity = reading.quantityAt(offset);
   if (quantity) return quantityCard(analysis, quantity);
   return keyCard(reading.nodeAt(offset));
+}
+
+/** `mcu.GP15` in a clock means the pin as a whole, also with the pointer on the chip's name. */
+function clockPinCard(analysis: BoardAnalysis, offset: number): Card | undefined {
+  for (const { pin } of analysis.reading.board.clocks.values()) {
+    if (!pin || !touches(pin.span, offset)) continue;
+    const result = analysis.pins.get(`${pin.chip}.${pin.pin}`);
+    if (result) return pinCard(result, pin.span);
+  }
+  return undefined;
 }
 
 function referenceCard(analysis: BoardAnalysis, { to, name, span, path }: ReadReference): Card | undefined {
