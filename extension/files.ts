@@ -1,6 +1,6 @@
 /**
  * Which documents are ours: `rails.yaml` and `*.rails.yaml`, whose language stays `yaml` so that colouring,
- * formatting and other YAML helpers keep working on them.
+ * formatting and other YAML tools keep working on them.
  */
 import * as vscode from 'vscode';
 
