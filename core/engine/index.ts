@@ -18,6 +18,7 @@ export {
   type Terminal,
 } from './network';
 export type { Parameter } from './parameter';
+export { type RunDownOptions, runDown } from './run-down';
 export {
   type Counts,
   defaultOptions,
@@ -27,3 +28,4 @@ export {
   solve,
   type Unsolved,
 } from './solve';
+export { type StartUp, type StartUpOptions, startUp } from './start-up';
