@@ -11,7 +11,7 @@ const later = { computed: false } as const;
 const needed = { required: true } as const;
 
 export const benchShape = shape(
-  'bench point',
+  'a bench point',
   'A measured point, set against the prediction at the same load.',
   {
     rail: row(name('rails'), 'The rail that was measured.', 'v6', needed),
@@ -27,7 +27,7 @@ export const benchShape = shape(
   },
 );
 
-export const waiverShape = shape('waiver', 'A finding that is accepted on purpose.', {
+export const waiverShape = shape('a waiver', 'A finding that is accepted on purpose.', {
   finding: row({ kind: 'finding' }, 'Code of the finding.', 'rail-low', needed),
   at: row(text, 'Path of the finding.', 'rails.v6', needed),
   because: row(text, 'Why it is accepted.', 'the reference works down to 4.5 V', needed),
@@ -38,7 +38,7 @@ function section(entry: Shape, example: string, computed?: typeof later) {
   return row(table(row(map(entry), entry.doc, '', computed)), entry.doc, example);
 }
 
-export const boardShape = shape('board file', 'The rails of one board.', {
+export const boardShape = shape('a board file', 'The rails of one board.', {
   board: row(text, 'Title of the board.', 'Weir gauge rev B'),
   conditions: row(map(conditionsShape), conditionsShape.doc, '{ ambient: -20..45 degC }'),
   supplies: section(supplyShape, '{ port: { standard: usb-2-configured } }'),

@@ -6,7 +6,7 @@ import { list, map, notNegative, positive, quantity, row, shape, table, text } f
 const later = { computed: false } as const;
 export const sourceRow = row(text, 'Where the figures of this entry come from.', 'data sheet revision 4');
 
-export const testPointShape = shape('test point', "One line of a data sheet's output table.", {
+export const testPointShape = shape('a test point', "One line of a data sheet's output table.", {
   current: row(quantity('A', positive), 'Current of the pin, as a magnitude.', '4 mA', { required: true }),
   voltage: row(quantity('V', notNegative), 'Voltage of the pin against ground.', '2.9 V', { required: true }),
   supply: row(quantity('V', positive), 'Supply voltage at which the line holds.', '3.3 V', {
@@ -54,9 +54,13 @@ const pinKeys = {
   absolute,
 };
 
-export const pinStrengthShape = shape('drive setting', 'Output data of a pin at one drive setting.', pinKeys);
+export const pinStrengthShape = shape(
+  'a drive setting',
+  'Output data of a pin at one drive setting.',
+  pinKeys,
+);
 
-export const pinDataShape = shape('pin data', 'Output data of a pin.', {
+export const pinDataShape = shape('the data of a pin', 'Output data of a pin.', {
   ...pinKeys,
   strengths: row(
     table(row(map(pinStrengthShape), 'One drive setting.', '{ high-resistance: 50 ohm }')),
@@ -65,7 +69,7 @@ export const pinDataShape = shape('pin data', 'Output data of a pin.', {
   ),
 });
 
-export const groupShape = shape('pin group', 'Pins that share a limit.', {
+export const groupShape = shape('a pin group', 'Pins that share a limit.', {
   pins: row(list(row(text, 'A pin of the group.', 'PA0')), 'The pins of the group.', '[PA0, PA1]', {
     required: true,
   }),
@@ -73,12 +77,12 @@ export const groupShape = shape('pin group', 'Pins that share a limit.', {
   sink: row(quantity('A', positive), 'Largest sum of currents into the pins.', '100 mA'),
 });
 
-export const totalShape = shape('chip total', 'Limits of the sums over all pins of a chip.', {
+export const totalShape = shape('the total of a chip', 'Limits of the sums over all pins of a chip.', {
   source: row(quantity('A', positive), 'Largest sum of currents out of all pins.', '150 mA'),
   sink: row(quantity('A', positive), 'Largest sum of currents into all pins.', '150 mA'),
 });
 
-export const chipPartShape = shape('chip data', 'Data of a chip with pins.', {
+export const chipPartShape = shape('the data of a chip', 'Data of a chip with pins.', {
   source: sourceRow,
   supply: supplyRange,
   pins: row(

@@ -11,13 +11,13 @@ const npn = row(transistor, 'The transistor to ground.', 'npn-small-signal', nee
 const pnp = row(transistor, 'The transistor to the supply.', 'pnp-small-signal', needed);
 const baseResistor = quantity('ohm', notNegative);
 
-export const baseShape = shape('base resistors', 'One resistor for each base.', {
+export const baseShape = shape('the base resistors', 'One resistor for each base.', {
   npn: row(baseResistor, 'Resistor at the base of the npn transistor.', '1 kohm', needed),
   pnp: row(baseResistor, 'Resistor at the base of the pnp transistor.', '1 kohm', needed),
 });
 
 export const pushPullShape = shape(
-  'push-pull stage',
+  'a push-pull stage',
   'A complementary pair in common-emitter connection; it inverts.',
   {
     npn,
@@ -28,18 +28,18 @@ export const pushPullShape = shape(
   ['base', 'shared-base'],
 );
 
-export const followerShape = shape('follower stage', 'A complementary pair of emitter followers.', {
+export const followerShape = shape('a follower stage', 'A complementary pair of emitter followers.', {
   npn,
   pnp,
 });
 
-export const mosfetPairShape = shape('MOS stage', 'A complementary pair of MOS transistors; it inverts.', {
+export const mosfetPairShape = shape('a MOS stage', 'A complementary pair of MOS transistors; it inverts.', {
   nmos: row(mosfet, 'The transistor to ground.', 'nmos-logic-level', needed),
   pmos: row(mosfet, 'The transistor to the supply.', 'pmos-logic-level', needed),
   gate: row(quantity('ohm', notNegative), 'Resistor at the gates.', '22 ohm'),
 });
 
-export const gatesShape = shape('gate stage', 'Logic gates in parallel.', {
+export const gatesShape = shape('a gate stage', 'Logic gates in parallel.', {
   part: row([part('gates'), map(gatePartShape)], 'Key of the catalogue or of `parts`.', 'ac', needed),
   parallel: row(
     quantity('1', { above: 0, whole: true }),
@@ -49,7 +49,7 @@ export const gatesShape = shape('gate stage', 'Logic gates in parallel.', {
 });
 
 export const driverShape = shape(
-  'driver',
+  'a driver',
   'A stage between a clock and a pump.',
   {
     input: row(name('clocks'), 'The clock that it follows.', 'tick', needed),

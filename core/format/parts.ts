@@ -28,7 +28,7 @@ import {
 
 const later = { computed: false } as const;
 
-export const diodePartShape = shape('diode data', 'Data of a diode.', {
+export const diodePartShape = shape('the data of a diode', 'Data of a diode.', {
   source: sourceRow,
   kind: row(
     choice(
@@ -48,7 +48,7 @@ export const diodePartShape = shape('diode data', 'Data of a diode.', {
   leakage: row(quantity('A', notNegative), 'Reverse leakage current.', '2 uA', later),
 });
 
-export const transistorPartShape = shape('transistor data', 'Data of a bipolar transistor.', {
+export const transistorPartShape = shape('the data of a transistor', 'Data of a bipolar transistor.', {
   source: sourceRow,
   polarity: row(
     choice(option('npn', 'Conducts to ground.'), option('pnp', 'Conducts from the supply.')),
@@ -65,7 +65,7 @@ export const transistorPartShape = shape('transistor data', 'Data of a bipolar t
   current: row(quantity('A', positive), 'Largest collector current.', '500 mA'),
 });
 
-export const mosfetPartShape = shape('mosfet data', 'Data of a MOS transistor.', {
+export const mosfetPartShape = shape('the data of a MOS transistor', 'Data of a MOS transistor.', {
   source: sourceRow,
   channel: row(
     choice(option('n', 'Conducts to ground.'), option('p', 'Conducts from the supply.')),
@@ -82,7 +82,7 @@ export const mosfetPartShape = shape('mosfet data', 'Data of a MOS transistor.',
   current: row(quantity('A', positive), 'Largest drain current.', '2 A'),
 });
 
-export const gatePartShape = shape('gate data', 'Data of a logic gate.', {
+export const gatePartShape = shape('the data of a gate', 'Data of a logic gate.', {
   source: sourceRow,
   supply: supplyRange,
   'high-resistance': highResistance,
@@ -96,7 +96,7 @@ export const gatePartShape = shape('gate data', 'Data of a logic gate.', {
   draws: row(quantity('A', notNegative), 'Supply current without load.', '2 uA'),
 });
 
-export const timerPartShape = shape('timer data', 'Data of an astable timer.', {
+export const timerPartShape = shape('the data of a timer', 'Data of an astable timer.', {
   source: sourceRow,
   supply: supplyRange,
   'high-drop': row(
@@ -111,12 +111,12 @@ export const timerPartShape = shape('timer data', 'Data of an astable timer.', {
   fastest: row(quantity('Hz', positive), 'Highest frequency it runs at.', '500 kHz'),
 });
 
-export const biasShape = shape('bias point', 'Capacitance left at a direct voltage.', {
+export const biasShape = shape('a bias point', 'Capacitance left at a direct voltage.', {
   share: row(percent(), 'Voltage as a share of the rating.', '50 %', { required: true }),
   left: row(percent({ least: 0, most: 2 }), 'Capacitance left, as a share.', '60 %', { required: true }),
 });
 
-export const capacitorPartShape = shape('capacitor data', 'Data of a kind of capacitor.', {
+export const capacitorPartShape = shape('the data of a kind of capacitor', 'Data of a kind of capacitor.', {
   source: sourceRow,
   tolerance: row(percent({ least: -1 }), 'Deviation of the value.', '+-20 %'),
   temperature: row(
@@ -147,40 +147,44 @@ export const capacitorPartShape = shape('capacitor data', 'Data of a kind of cap
   ),
 });
 
-export const partsShape = shape('part data', "Data of your own, beside or instead of the catalogue's.", {
-  chips: row(
-    table(row(map(chipPartShape), chipPartShape.doc, '{ pins: { high-resistance: 40 ohm } }')),
-    'Chips with pins.',
-    '{ my-mcu: { pins: { high-resistance: 40 ohm } } }',
-  ),
-  diodes: row(
-    table(row(map(diodePartShape), diodePartShape.doc, '{ saturation: 2.5 nA }')),
-    'Diodes.',
-    '{ my-diode: { saturation: 2.5 nA, ideality: 1.8, resistance: 0.6 ohm } }',
-  ),
-  transistors: row(
-    table(row(map(transistorPartShape), transistorPartShape.doc, '{ polarity: npn }', later)),
-    'Bipolar transistors.',
-    '{ my-npn: { polarity: npn, saturation: 10 fA, gain: 200 } }',
-  ),
-  mosfets: row(
-    table(row(map(mosfetPartShape), mosfetPartShape.doc, '{ channel: n }', later)),
-    'MOS transistors.',
-    '{ my-nmos: { channel: n, threshold: 1.2 V, on-resistance: 60 mohm } }',
-  ),
-  gates: row(
-    table(row(map(gatePartShape), gatePartShape.doc, '{ high-resistance: 40 ohm }', later)),
-    'Logic gates.',
-    '{ my-gate: { high-resistance: 40 ohm } }',
-  ),
-  timers: row(
-    table(row(map(timerPartShape), timerPartShape.doc, '{ high-drop: 1.4 V }', later)),
-    'Astable timers.',
-    '{ my-timer: { high-drop: 1.4 V } }',
-  ),
-  capacitors: row(
-    table(row(map(capacitorPartShape), capacitorPartShape.doc, '{ tolerance: +-20 % }')),
-    'Kinds of capacitors.',
-    '{ my-kind: { tolerance: +-20 %, esr: 10 mohm } }',
-  ),
-});
+export const partsShape = shape(
+  'the data of your own parts',
+  "Data of your own, beside or instead of the catalogue's.",
+  {
+    chips: row(
+      table(row(map(chipPartShape), chipPartShape.doc, '{ pins: { high-resistance: 40 ohm } }')),
+      'Chips with pins.',
+      '{ my-mcu: { pins: { high-resistance: 40 ohm } } }',
+    ),
+    diodes: row(
+      table(row(map(diodePartShape), diodePartShape.doc, '{ saturation: 2.5 nA }')),
+      'Diodes.',
+      '{ my-diode: { saturation: 2.5 nA, ideality: 1.8, resistance: 0.6 ohm } }',
+    ),
+    transistors: row(
+      table(row(map(transistorPartShape), transistorPartShape.doc, '{ polarity: npn }', later)),
+      'Bipolar transistors.',
+      '{ my-npn: { polarity: npn, saturation: 10 fA, gain: 200 } }',
+    ),
+    mosfets: row(
+      table(row(map(mosfetPartShape), mosfetPartShape.doc, '{ channel: n }', later)),
+      'MOS transistors.',
+      '{ my-nmos: { channel: n, threshold: 1.2 V, on-resistance: 60 mohm } }',
+    ),
+    gates: row(
+      table(row(map(gatePartShape), gatePartShape.doc, '{ high-resistance: 40 ohm }', later)),
+      'Logic gates.',
+      '{ my-gate: { high-resistance: 40 ohm } }',
+    ),
+    timers: row(
+      table(row(map(timerPartShape), timerPartShape.doc, '{ high-drop: 1.4 V }', later)),
+      'Astable timers.',
+      '{ my-timer: { high-drop: 1.4 V } }',
+    ),
+    capacitors: row(
+      table(row(map(capacitorPartShape), capacitorPartShape.doc, '{ tolerance: +-20 % }')),
+      'Kinds of capacitors.',
+      '{ my-kind: { tolerance: +-20 %, esr: 10 mohm } }',
+    ),
+  },
+);

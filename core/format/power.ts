@@ -23,7 +23,7 @@ const later = { computed: false } as const;
 const needed = { required: true } as const;
 
 export const supplyShape = shape(
-  'supply',
+  'a supply',
   'Where energy enters the board: a port, a battery, or a plain voltage.',
   {
     standard: row(
@@ -42,13 +42,13 @@ export const supplyShape = shape(
   ['standard', 'battery', 'voltage'],
 );
 
-export const pinUseShape = shape('pin', 'What else hangs on a pin, and how strongly it drives.', {
+export const pinUseShape = shape('a pin', 'What else hangs on a pin, and how strongly it drives.', {
   strength: row({ kind: 'strength' }, 'Drive setting, as the part names it.', '12 mA'),
   sources: row(quantity('A', notNegative), 'Other steady current out of the pin.', '2 mA'),
   sinks: row(quantity('A', notNegative), 'Other steady current into the pin.', '2 mA'),
 });
 
-export const chipShape = shape('chip', 'An IC with pins.', {
+export const chipShape = shape('a chip', 'An IC with pins.', {
   part: row([part('chips'), map(chipPartShape)], 'Key of the catalogue or of `parts`.', 'rp2040'),
   rail: row(name('rails'), 'The rail that supplies it.', 'v3'),
   draws: row(
@@ -67,7 +67,7 @@ export const chipShape = shape('chip', 'An IC with pins.', {
 });
 
 export const registersShape = shape(
-  'timer registers',
+  'the registers of a timer',
   'Registers of a timer, from which the real frequency follows.',
   {
     input: row(quantity('Hz', positive), 'Clock of the timer.', '16 MHz', needed),
@@ -82,7 +82,7 @@ export const registersShape = shape(
   },
 );
 
-export const astableShape = shape('astable', 'A timer that oscillates by itself.', {
+export const astableShape = shape('an astable', 'A timer that oscillates by itself.', {
   charge: row(quantity('ohm', positive), 'Resistor that only charges.', '10 kohm', needed),
   discharge: row(quantity('ohm', positive), 'Resistor that charges and discharges.', '47 kohm', needed),
   timing: row(quantity('F', positive), 'Timing capacitor.', '1 nF', needed),
@@ -95,7 +95,7 @@ export const astableShape = shape('astable', 'A timer that oscillates by itself.
 });
 
 export const schmittShape = shape(
-  'Schmitt oscillator',
+  'a Schmitt oscillator',
   'An inverter with hysteresis that oscillates by itself.',
   {
     resistor: row(quantity('ohm', positive), 'Feedback resistor.', '47 kohm', needed),
@@ -109,7 +109,7 @@ export const schmittShape = shape(
   },
 );
 
-export const externalShape = shape('external clock', 'A square wave from off the board.', {
+export const externalShape = shape('an external clock', 'A square wave from off the board.', {
   frequency: row(quantity('Hz', positive), 'Frequency.', '100 kHz', needed),
   duty: row(percent(share), 'Share of the period that it is high.', '50 %'),
   high: row(quantity('V'), 'High level.', '5 V', needed),
@@ -118,7 +118,7 @@ export const externalShape = shape('external clock', 'A square wave from off the
 });
 
 export const clockShape = shape(
-  'clock',
+  'a clock',
   'A square wave.',
   {
     pin: row({ kind: 'pin' }, 'The pin that puts it out.', 'mcu.GP15'),
@@ -151,11 +151,11 @@ export const clockShape = shape(
   ['pin', 'astable', 'schmitt', 'external'],
 );
 
-export const modeShape = shape('mode', 'An operating mode of the board.', {
+export const modeShape = shape('a mode', 'An operating mode of the board.', {
   share: row(percent(share), 'Share of the time.', '98 %', needed),
 });
 
-export const conditionsShape = shape('conditions', 'What the board must stand.', {
+export const conditionsShape = shape('the conditions', 'What the board must stand.', {
   ambient: row(
     quantity('K', { above: 0 }),
     'Ambient temperature; corners are taken over this range.',

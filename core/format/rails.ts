@@ -22,7 +22,7 @@ import {
 const later = { computed: false } as const;
 const needed = { required: true } as const;
 
-export const capacitorShape = shape('capacitor', 'A capacitor.', {
+export const capacitorShape = shape('a capacitor', 'A capacitor.', {
   value: row(quantity('F', positive), 'Nominal capacitance.', '10 uF', needed),
   kind: row(
     [part('capacitors'), map(capacitorPartShape)],
@@ -39,7 +39,7 @@ const capacitor = [quantity('F', positive), map(capacitorShape)] as const;
 const capacitors = [...capacitor, list(row(capacitor, 'One of several capacitors.', '1 uF'))];
 const diode = [part('diodes'), map(diodePartShape)] as const;
 
-export const pumpShape = shape('pump', 'A charge pump: capacitors and diodes that a clock lifts.', {
+export const pumpShape = shape('a pump', 'A charge pump: capacitors and diodes that a clock lifts.', {
   topology: row(
     choice(
       option('doubler', 'One positive stage on top of `input`.'),
@@ -77,7 +77,7 @@ export const pumpShape = shape('pump', 'A charge pump: capacitors and diodes tha
   series: row(quantity('ohm', notNegative), 'Resistor between drive and flying capacitor.', '10 ohm'),
 });
 
-export const regulatorShape = shape('regulator', 'A regulator between two rails.', {
+export const regulatorShape = shape('a regulator', 'A regulator between two rails.', {
   from: row(name('rails'), 'The rail at its input.', 'vbat', needed),
   output: row(quantity('V'), 'Output voltage.', '3.3 V +-2 %', needed),
   dropout: row(quantity('V', notNegative), 'Least difference between input and output.', '250 mV', later),
@@ -97,7 +97,7 @@ export const regulatorShape = shape('regulator', 'A regulator between two rails.
 });
 
 export const filterShape = shape(
-  'filter',
+  'a filter',
   'A resistor or inductor and a capacitor behind a rail.',
   {
     from: row(name('rails'), 'The rail at its input.', 'v5', needed),
@@ -108,7 +108,7 @@ export const filterShape = shape(
   ['resistor', 'inductor'],
 );
 
-export const needsShape = shape('needs', 'What the rail must keep.', {
+export const needsShape = shape('the needs of a rail', 'What the rail must keep.', {
   voltage: row(quantity('V'), 'Window that the voltage must stay in.', '5.2..6.5 V'),
   ripple: row(quantity('V', positive), 'Largest ripple, peak to peak.', '30 mV'),
   start: row(quantity('s', positive), 'Time in which it must have come up.', '20 ms', later),
@@ -132,14 +132,14 @@ export const needsShape = shape('needs', 'What the rail must keep.', {
   ),
 });
 
-export const amplifierShape = shape('amplifier', 'Operational amplifiers as a load.', {
+export const amplifierShape = shape('an amplifier', 'Operational amplifiers as a load.', {
   quiescent: row(quantity('A', notNegative), 'Current without signal, each.', '1.2 mA', needed),
   output: row(quantity('A', notNegative), 'Output current, each.', '0.5 mA'),
   count: row(quantity('1', { above: 0, whole: true }), 'How many of them; one if left out.', '2'),
 });
 
 export const loadShape = shape(
-  'load',
+  'a load',
   'What a rail feeds: a current, a resistance or a power.',
   {
     current: row(quantity('A', notNegative), 'A steady current, as a magnitude.', '1.2 mA'),
@@ -158,7 +158,7 @@ export const loadShape = shape(
 );
 
 export const railShape = shape(
-  'rail',
+  'a rail',
   'A net with a voltage.',
   {
     supply: row(name('supplies'), 'The supply that it comes from.', 'pack'),

@@ -56,7 +56,7 @@ export interface Row {
 }
 
 export interface Shape<K extends string = string> {
-  /** What an entry of this shape is, for sentences: `pump`. */
+  /** What an entry of this shape is, with its article, for sentences: `a pump`. */
   readonly name: string;
   readonly doc: string;
   readonly keys: Readonly<Record<K, Row>>;

@@ -34,7 +34,7 @@ export function openMap<K extends string>(slot: Slot, shape: Shape<K>): Fields<K
   const { context, node, path } = slot;
   if (node.kind !== 'map') {
     const keys = Object.keys(shape.keys);
-    const message = `A ${shape.name} is a map here: put keys such as ${listNames(keys, 4)} indented beneath, or in \`{ }\`.`;
+    const message = `${capital(shape.name)} stands here as a map: put keys such as ${listNames(keys, 4)} indented beneath, or in \`{ }\`.`;
     report(context, 'syntax', slot, message);
     return undefined;
   }
@@ -106,8 +106,8 @@ function reportUnknownKey(
   const known = Object.keys(shape.keys);
   const free = known.filter((key) => !map.entries.some((entry) => entry.key.text === key));
   const meant = guess(context, written, free);
-  const cure = meant ? `did you mean \`${meant}\`?` : `a ${shape.name} has ${listNames(known, 14)}.`;
-  report(context, 'unknown-key', place, `\`${written}\` is no key of a ${shape.name}: ${cure}`, {
+  const cure = meant ? `did you mean \`${meant}\`?` : `there are ${listNames(known, 14)}.`;
+  report(context, 'unknown-key', place, `\`${written}\` is no key of ${shape.name}: ${cure}`, {
     expected: nameList(known),
     actual: written,
     ...(meant && { fixes: [replacement(place.span, meant)] }),
@@ -123,7 +123,7 @@ function reportMissing(slot: Slot, shape: Shape, keys: ReadonlyMap<string, Span>
   const span = slot.keySpan;
   for (const [key, row] of Object.entries(shape.keys)) {
     if (!row.required || keys.has(key)) continue;
-    const message = `\`${key}\` is missing in this ${shape.name}: ${sentence(row.doc)} For example \`${key}: ${row.example}\`.`;
+    const message = `\`${key}\` is missing in ${shape.name}: ${sentence(row.doc)} For example \`${key}: ${row.example}\`.`;
     report(context, 'missing-key', { path: join(path, key), span }, message, { expected: row.doc });
   }
   if (shape.exactlyOne.length === 0) return;
@@ -131,17 +131,21 @@ function reportMissing(slot: Slot, shape: Shape, keys: ReadonlyMap<string, Span>
   if (given.length === 1) return;
   const choices = listNames(shape.exactlyOne);
   if (given.length === 0) {
-    const message = `A ${shape.name} needs one of ${choices}.`;
+    const message = `${capital(shape.name)} needs one of ${choices}.`;
     report(context, 'missing-key', { path, span }, message, { expected: shape.exactlyOne.join(' | ') });
     return;
   }
   const [first = '', second = ''] = given;
-  const message = `A ${shape.name} has exactly one of ${choices}, but ${listNames(given, 8, ' and ')} stand here: delete all but one.`;
+  const message = `${capital(shape.name)} has exactly one of ${choices}, but ${listNames(given, 8, ' and ')} stand here: delete all but one.`;
   report(context, 'duplicate-name', { path: join(path, second), span: keys.get(second) ?? span }, message, {
     expected: 'one of them',
     actual: given.join(', '),
     related: [{ span: keys.get(first) ?? span, message: `\`${first}\` stands here.` }],
   });
+}
+
+function capital(words: string): string {
+  return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
 /** Docs are sentences; inside one of ours they go on in small letters. */

@@ -13,7 +13,7 @@ supplies:
   p: { voltage: 5 V, curent: 1 A }
   #                  ^^^^^^ unknown-key: did you mean \`current\`
   q: { voltage: 5 V, colour: red }
-  #                  ^^^^^^ unknown-key: a supply has \`standard\`
+  #                  ^^^^^^ unknown-key: there are \`standard\`
   r: { voltage: 5 V, voltge: 4 V }
   #                  ^^^^^^ unknown-key
   s: { voltage: 5 V, __proto__: 4 V }
@@ -92,9 +92,9 @@ supplies: 5 V
 #         ^^^ syntax: Entries with names
 rails:
   v3: { pump: doubler }
-  #           ^^^^^^^ syntax: A pump is a map here
+  #           ^^^^^^^ syntax: A pump stands here as a map
   v5: [1]
-  #   ^^^ syntax: A rail is a map
+  #   ^^^ syntax: A rail stands here as a map
 include: x.yaml
 #        ^^^^^^ syntax: A list stands here
 board: [x]
