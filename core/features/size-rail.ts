@@ -89,7 +89,7 @@ class Search {
     const least = firstTrue(0, last, reaches);
     if (least === undefined) return this.#stopped(this.#at(last, last));
     for (let f = least; f <= last; f++) {
-      const r = firstTrue(0, last, (index) => {
+      const r = firstTrue(this.#leastReservoir(), last, (index) => {
         const short = this.#at(f, index)?.short;
         return short !== undefined && short.weak === 0 && short.ripple === 0;
       });
@@ -99,6 +99,14 @@ class Search {
       if (found && found.short.strong > 0) return this.#stopped(found);
     }
     return this.#stopped(this.#at(last, last));
+  }
+
+  /** Without a need for ripple nothing says how small the reservoir may become: it does not shrink. */
+  #leastReservoir(): number {
+    if (this.rail.needs?.ripple) return 0;
+    const present = this.reservoir.value!.typical;
+    const index = candidates.findIndex((farads) => farads >= present * (1 - 1e-9));
+    return index < 0 ? candidates.length - 1 : index;
   }
 
   /** Index of a reservoir far above the flying capacitor. */
@@ -127,10 +135,13 @@ class Search {
     return {
       ok: true,
       rail: this.rail.name,
-      summary:
-        `flying ${formatQuantity(candidates[f]!, 'F')}, reservoir ${formatQuantity(candidates[r]!, 'F')}: ` +
-        `the smallest E6 values with which ${this.rail.name} meets its needs at every corner`,
-      details: [describe(pump), `computed ${this.#cache.size} pairs of values, corners included`],
+      summary: `${this.rail.name}: flying ${formatQuantity(candidates[f]!, 'F')}, reservoir ${formatQuantity(candidates[r]!, 'F')}`,
+      details: [
+        'the smallest E6 values that meet its needs at every corner',
+        describe(pump),
+        ...(this.rail.needs?.ripple ? [] : ['no ripple need is written: the reservoir was not made smaller']),
+        `computed ${this.#cache.size} pairs of values, corners included`,
+      ],
       edits: edits.filter((edit) => text.slice(edit.span.start, edit.span.end) !== edit.text),
     };
   }
