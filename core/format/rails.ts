@@ -109,7 +109,11 @@ export const filterShape = shape(
 );
 
 export const needsShape = shape('the needs of a rail', 'What the rail must keep.', {
-  voltage: row(quantity('V'), 'Window that the voltage must stay in.', '5.2..6.5 V'),
+  voltage: row(
+    quantity('V'),
+    'Window that the voltage must stay in; one figure asks for at least that much.',
+    '5.2..6.5 V',
+  ),
   ripple: row(quantity('V', positive), 'Largest ripple, peak to peak.', '30 mV'),
   start: row(quantity('s', positive), 'Time in which it must have come up.', '20 ms', later),
   swing: row(

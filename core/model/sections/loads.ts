@@ -67,18 +67,11 @@ function amplifierOf(slot: Slot | undefined): Load['amplifier'] {
 export function needsOf(slot: Slot | undefined): Needs | undefined {
   const fields = slot && openMap(slot, needsShape);
   if (!fields) return undefined;
-  const voltage = figureOf(fields.at('voltage'));
-  if (voltage && voltage.min === voltage.max) {
-    const place = { path: `${fields.path}.voltage`, span: voltage.span ?? fields.span };
-    const message =
-      'A need is a window, as no rail meets one voltage exactly: write it as `4.9..5.1 V` or `5 V +-2 %`.';
-    report(slot.context, 'bad-quantity', place, message);
-  }
   return {
     span: fields.span,
     keys: fields.keys,
     ...present({
-      voltage: voltage && voltage.min < voltage.max ? voltage : undefined,
+      voltage: figureOf(fields.at('voltage')),
       ripple: figureOf(fields.at('ripple')),
       start: figureOf(fields.at('start')),
       swing: figureOf(fields.at('swing')),
