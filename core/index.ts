@@ -15,6 +15,7 @@ import { toReport } from './report/json';
 import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
+import { stripBom } from './text/bom';
 
 export type { Finding, FindingCode, Fix, Related, Severity } from './checks/finding';
 export type { Card, Picture, Theme } from './features/card';
@@ -40,12 +41,13 @@ export interface Analysis {
 
 /**
  * Reads and computes a whole board. Never throws: what cannot be read or computed stands in the findings.
- * `text` comes without a byte-order mark; `options.file` is only a name to show.
+ * A byte-order mark is taken off first and counts nowhere; `options.file` is only a name to show.
  */
 export function analyse(text: string, options: { readonly file: string }): Analysis {
-  const board = analyseBoard(text, options.file, catalogue);
+  const plain = stripBom(text);
+  const board = analyseBoard(plain, options.file, catalogue);
   const findings = sortFindings([...board.reading.findings, ...board.problems, ...runChecks(board)]);
-  return { text, findings, report: toReport(board, findings, `${toolName} ${toolVersion}`), board };
+  return { text: plain, findings, report: toReport(board, findings, `${toolName} ${toolVersion}`), board };
 }
 
 /**

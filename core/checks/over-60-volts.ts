@@ -12,7 +12,7 @@ const cautionV = 60;
 
 export const over60Volts: Check = {
   code: 'over-60-volts',
-  title: 'More than 60 V d.c.',
+  title: 'More than 60 V direct voltage',
   severity: 'warning',
   why: 'Above this voltage insulation, spacing and touch are matters of safety rules, and a pump’s capacitors keep their charge after power-off.',
   run: (analysis) => [...analysis.rails.values()].flatMap(judge),

@@ -50,8 +50,8 @@ async function foundFiles(io: Io): Promise<readonly string[]> {
   return found === undefined ? [] : [found];
 }
 
-/** Columns where nobody says how wide the terminal is. */
-const usualWidth = 100;
+/** Columns where there is no terminal to ask, as in a log: enough for every table. */
+const usualWidth = 120;
 
 function print(analyses: readonly Analysis[], asked: number, request: CheckRequest, io: Io): void {
   if (analyses.length === 0) return;

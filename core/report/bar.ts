@@ -15,7 +15,7 @@ export function useBar(use: number, width = 10): string {
  * `··[──●──]··`: the needed window in brackets, the rail's band as a line and its typical value as a point, from
  * the smaller to the larger number.
  */
-export function windowStrip(window: Band, rail: Band, width = 15): string {
+export function windowStrip(window: Band, rail: Band, width = 13): string {
   const span = Math.max(window.max - window.min, Number.MIN_VALUE);
   // The window takes the middle half; a rail far outside runs to the edge.
   const from = window.min - span / 2;

@@ -22,13 +22,14 @@ const columns: readonly Column[] = [
 export function pinSection(analysis: BoardAnalysis, palette: Palette, width: number): readonly string[] {
   const rows = [
     ...[...analysis.pins.values()].map((pin) => pinRow(pin, palette)),
-    ...[...analysis.groups.values()].map((group) =>
+    // A group limits one way or both; the other way is no business of it.
+    ...[...analysis.groups.values()].map(({ key, source, sink, sourceLimit, sinkLimit, use }) =>
       sumRow(
-        group.key,
-        group.source,
-        group.sink,
-        group.use,
-        limitOf(group.sourceLimit, group.sinkLimit),
+        key,
+        sourceLimit === null ? null : source,
+        sinkLimit === null ? null : sink,
+        use,
+        limitOf(sourceLimit, sinkLimit),
         palette,
       ),
     ),
@@ -65,8 +66,8 @@ function pinRow(pin: PinResult, palette: Palette): readonly Cell[] {
 
 function sumRow(
   name: string,
-  source: number,
-  sink: number,
+  source: number | null,
+  sink: number | null,
   use: number | null,
   limit: number | null,
   palette: Palette,

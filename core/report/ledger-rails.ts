@@ -16,12 +16,12 @@ const columns: readonly Column[] = [
   { head: 'typ V', align: 'right' },
   { head: 'high V', align: 'right' },
   { head: 'needs V', align: 'left' },
-  { head: '[window]', align: 'left', spare: 3 },
+  { head: '[window]', align: 'left', spare: 2 },
   { head: 'spare', align: 'right' },
   { head: 'ripple', align: 'right' },
   { head: 'load', align: 'right' },
-  { head: 'eff.', align: 'right', spare: 2 },
-  { head: 'from', align: 'left', spare: 1 },
+  { head: 'eff.', align: 'right', spare: 1 },
+  { head: 'from', align: 'left', spare: 3 },
 ];
 
 export function railSection(analysis: BoardAnalysis, palette: Palette, width: number): readonly string[] {

@@ -16,7 +16,7 @@ ${bench}
     loads: { bias: 1 mA }
 `;
 
-function ledger(text: string, width = 100, colour = false): string {
+function ledger(text: string, width = 120, colour = false): string {
   return ledgerText(analyse(text, { file: 'lamp/rails.yaml' }), { colour, width });
 }
 
@@ -51,10 +51,10 @@ describe('ledger', () => {
   });
 
   it('differs in colour by colour codes only', () => {
-    const coloured = ledger(board, 100, true);
+    const coloured = ledger(board, 120, true);
     expect(coloured).toContain('\u001b[31m');
     // biome-ignore lint/suspicious/noControlCharactersInRegex: the codes are what is looked for
-    expect(coloured.replace(/\u001b\[\d+m/g, '')).toBe(ledger(board, 100, false));
+    expect(coloured.replace(/\u001b\[\d+m/g, '')).toBe(ledger(board, 120, false));
   });
 
   it('says why a rail has no voltage, and that nothing was found', () => {
