@@ -3,7 +3,7 @@
  */
 import { amplifierShape, loadShape, needsShape } from '../../format';
 import type { Load, Needs } from '../board';
-import { report, reportNotComputed } from '../context';
+import { reportNotComputed } from '../context';
 import { entryBase, listOf, type Named, tableOf } from '../entries';
 import { figureOf } from '../figures';
 import { present } from '../present';

@@ -59,7 +59,6 @@ rails:
   v:
     supply: a
     needs: { voltage: 5 V, ripple: 0 V }
-    #                 ^^^ bad-quantity: A need is a window
     #                              ^^^ bad-quantity: must be greater
     loads: { x: -1 mA, y: 47, z: { current: 3 V } }
     #           ^^^^^ bad-quantity: Write the magnitude
