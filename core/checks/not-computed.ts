@@ -11,6 +11,7 @@ const emptyFields: readonly string[] = [
   'inrushPeak of pins',
   'effective capacitance of capacitors',
   'life of batteries',
+  'ripple, efficiency, load line and drops of rails that no pump makes',
 ];
 
 export const notComputed: Check = {
