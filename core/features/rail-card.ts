@@ -3,7 +3,7 @@
  */
 import { pumpLosses } from '../analysis/losses';
 import { isNegative } from '../analysis/sign';
-import type { BoardAnalysis, PumpResult, RailResult } from '../analysis/types';
+import type { BoardAnalysis, RailResult } from '../analysis/types';
 import { missOf } from '../analysis/window';
 import { inMode, volts } from '../analysis/words';
 import type { Band } from '../quantity/figure';
@@ -22,7 +22,7 @@ export function railCard(analysis: BoardAnalysis, result: RailResult, span: Span
     ...verdict(result),
     head: ['', 'lowest', 'typical', 'highest', 'needs'],
     rows: rowsOf(result),
-    origins: railOrigins(analysis, result),
+    origins: [...details(result), ...railOrigins(analysis, result)],
   };
   if (pump === undefined) return card;
   return { ...card, picture: (theme) => voltsPicture(result, pump, theme), sizable: result.rail.name };
@@ -115,28 +115,31 @@ function rowsOf(result: RailResult): readonly (readonly string[])[] {
     const allowed = rail.needs?.ripple;
     rows.push(['ripple', ...three(result.ripple), allowed ? formatQuantity(allowed.max, 'V') : '']);
   }
-  for (const [mode, at] of result.modes)
-    if (at.voltage !== null && at.current !== null && pump)
-      rows.push([
-        `in ${mode}`,
-        '',
-        `${formatQuantity(at.voltage, 'V')} at ${formatQuantity(at.current, 'A')}`,
-        '',
-        '',
-      ]);
-  if (pump) rows.push(...pumpRows(result, pump));
-  else if (result.current !== null) rows.push(['current', '', formatQuantity(result.current, 'A'), '', '']);
-  if (efficiency !== null) rows.push(['efficiency', '', formatPercent(efficiency, 2), '', '']);
+  if (!pump) {
+    if (result.current !== null) rows.push(['current', '', formatQuantity(result.current, 'A'), '', '']);
+    if (efficiency !== null) rows.push(['efficiency', '', formatPercent(efficiency, 2), '', '']);
+  }
   return rows;
 }
 
-function pumpRows({ rail }: RailResult, pump: PumpResult): readonly (readonly string[])[] {
-  const { outputResistance } = pump.heaviest;
+/** One line each under the picture, so that the answer, the table and the picture fit without scrolling. */
+function details(result: RailResult): readonly string[] {
+  const { pump, efficiency, modes, rail } = result;
+  if (!pump) return [];
   const losses = rail.origin?.kind === 'pump' ? pumpLosses(rail.origin.pump, pump) : undefined;
   const limits = losses
-    ? `slow limit ${formatQuantity(losses.slowOhm, 'ohm')}, fast limit ${formatQuantity(losses.fastOhm, 'ohm')}`
+    ? ` (slow limit ${formatQuantity(losses.slowOhm, 'ohm')}, fast limit ${formatQuantity(losses.fastOhm, 'ohm')})`
     : '';
-  return [['output resistance', '', formatQuantity(outputResistance, 'ohm'), limits, '']];
+  const share = efficiency === null ? '' : `; efficiency ${formatPercent(efficiency, 2)}`;
+  const byMode = [...modes].flatMap(([mode, at]) =>
+    at.voltage === null || at.current === null
+      ? []
+      : [`${mode} ${formatQuantity(at.voltage, 'V')} at ${formatQuantity(at.current, 'A')}`],
+  );
+  return [
+    `Output resistance ${formatQuantity(pump.heaviest.outputResistance, 'ohm')}${limits}${share}.`,
+    ...(byMode.length > 1 ? [`By mode: ${byMode.join(', ')}.`] : []),
+  ];
 }
 
 function three(band: Band): readonly string[] {
