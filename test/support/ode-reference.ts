@@ -4,8 +4,8 @@
  * from one scalar equation in the current of the output diode. An inverter is computed as its mirror image, a doubler
  * that stands on ground, so one set of equations serves both.
  */
-import { createRequire } from 'node:module';
 import { fallingRoot } from './falling-root';
+import { type OdeSolver, odeSolver } from './odex';
 import { kneeV, type SimplePump } from './simple-pump';
 
 export interface Reference {
@@ -22,22 +22,6 @@ export interface Reference {
   /** What one period changes in the state it was found in, V: shows that it is periodic. */
   readonly drift: number;
 }
-
-interface Solver {
-  absoluteTolerance: number;
-  relativeTolerance: number;
-  maxSteps: number;
-  initialStepSize: number;
-  solve(
-    f: (x: number, y: number[]) => number[],
-    x0: number,
-    y0: readonly number[],
-    x1: number,
-  ): { y: number[]; outcome: number };
-}
-
-// Its own sources are TypeScript that our strict settings would reject, hence the plain require with these types.
-const odex = createRequire(import.meta.url)('odex') as { Solver: new (dimension: number) => Solver };
 
 interface Instant {
   readonly outV: number;
@@ -180,13 +164,8 @@ function pieces(): readonly [number, number][] {
   return Array.from({ length: count }, (_, i) => [(i / count) ** 3, ((i + 1) / count) ** 3]);
 }
 
-function tight(dimension: number): Solver {
-  const solver = new odex.Solver(dimension);
-  solver.absoluteTolerance = 1e-10;
-  solver.relativeTolerance = 1e-10;
-  solver.maxSteps = 100_000;
-  solver.initialStepSize = 1e-6;
-  return solver;
+function tight(dimension: number): OdeSolver {
+  return odeSolver(dimension, 1e-10, 1e-6);
 }
 
 /**
