@@ -4,9 +4,9 @@
  * conductance that holds every node where it is: a stage between two transistors that are neither off nor saturated
  * finds its way like that, since nothing there resists it until one of them gives.
  */
-import { loadKnee } from '../../core/pump/values';
 import { solveInPlace } from './gauss';
 import { diodeCurrent, transistorCurrents } from './junctions';
+import { loadCurrent } from './load-current';
 import type { Element, Equations } from './pump-equations';
 
 export interface Instant {
@@ -132,7 +132,7 @@ function add(
     }
     case 'load': {
       const { a, b } = element;
-      const { amps, siemens } = loadCurrent(element, volts[a]! - volts[b]!);
+      const { amps, siemens } = loadCurrent(element.load, volts[a]! - volts[b]!);
       branch(a, b, amps, siemens);
       return;
     }
@@ -175,19 +175,6 @@ export function atTransistor(transistor: Part<'transistor'>, volts: Float64Array
   const be = sign * (volts[base]! - volts[emitter]!);
   const bc = sign * (volts[base]! - volts[collector]!);
   return transistorCurrents(values.saturation, values.slope, values.gain, values.reverseGain, be, bc);
-}
-
-function loadCurrent({ load }: Part<'load'>, volts: number) {
-  if (load.kind === 'resistance') return { amps: volts / load.ohms, siemens: 1 / load.ohms };
-  if (load.kind === 'power') {
-    const { watts, knee } = load;
-    if (volts > knee) return { amps: watts / volts, siemens: -watts / volts ** 2 };
-    return { amps: (watts * volts) / knee ** 2, siemens: watts / knee ** 2 };
-  }
-  const { amps } = load;
-  const left = Math.exp(-volts / loadKnee);
-  if (volts > 0) return { amps: amps * (1 - left), siemens: (amps / loadKnee) * left };
-  return { amps: (amps * volts) / loadKnee, siemens: amps / loadKnee };
 }
 
 /** Largest share of a move that lifts no junction of a transistor by more than two e-folds where it conducts. */
