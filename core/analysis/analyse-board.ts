@@ -7,7 +7,9 @@ import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
 import { weightedModes } from './board-modes';
 import { chipResults, groupResults, overModes } from './chips';
+import { clockSource } from './clock-source';
 import { boardCurrents, type Currents } from './currents';
+import { driverResults } from './drivers';
 import { isGap } from './gap';
 import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
@@ -37,6 +39,7 @@ export function computeBoard(text: string, file: string, reading: BoardReading):
     groups: groupResults(board, pins),
     chips: chipResults(board, solved, pins, currents, modes),
     clocks: clockResults(board, solved),
+    drivers: driverResults(board, solved),
     supplies: supplyResults(board, currents),
     balance: balances.length > 0 ? Math.max(...balances) : null,
     problems: [...gapFindings(solved), ...assumedDraws(board)],
@@ -77,17 +80,23 @@ function assumedDraws(board: Board): Finding[] {
 }
 
 function clockResults(board: Board, solved: RailVoltages): Map<string, ClockResult> {
+  const voltage = (name: string) => solved.voltages.get(name) ?? { because: `${name} is not known` };
   const results = new Map<string, ClockResult>();
   for (const clock of board.clocks.values()) {
-    const chip = clock.pin && board.chips.get(clock.pin.chip);
-    const voltage = chip?.rail && solved.voltages.get(chip.rail.name);
-    const known = clock.pin && !clock.timer && !clock.inverseOf;
+    const source = clockSource(board, clock.name, voltage);
+    if (isGap(source)) {
+      results.set(clock.name, { clock, frequency: null, duty: null, high: null, low: null });
+      continue;
+    }
+    const { frequency, duty, opposite, output } = source;
+    const rail = output.railName === undefined ? undefined : voltage(output.railName);
+    const top = output.highVolts ?? (rail && !isGap(rail) ? rail : undefined);
     results.set(clock.name, {
       clock,
-      frequency: known && clock.frequency ? plainBand(clock.frequency) : null,
-      duty: known && clock.duty ? plainBand(clock.duty) : null,
-      high: voltage && !isGap(voltage) ? voltage.typical : null,
-      low: voltage && !isGap(voltage) ? 0 : null,
+      frequency: plainBand(frequency),
+      duty: opposite ? { min: 1 - duty.max, typical: 1 - duty.typical, max: 1 - duty.min } : plainBand(duty),
+      high: top ? top.typical - output.highDrop.typical : null,
+      low: output.lowVolts.typical,
     });
   }
   return results;

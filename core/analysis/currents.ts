@@ -4,8 +4,8 @@
  */
 import type { Board, Chip, Rail } from '../model/board';
 import { activeIn } from './board-modes';
+import { clockSource } from './clock-source';
 import { isGap } from './gap';
-import { pumpDrives } from './pump-drive';
 import type { RailVoltages } from './rail-voltages';
 
 export interface Currents {
@@ -18,6 +18,7 @@ export interface Currents {
 }
 
 export function boardCurrents(board: Board, solved: RailVoltages): Currents {
+  const oscillators = ownCurrents(board, solved);
   const memo = new Map<string, number | null>();
   const open = new Set<string>();
 
@@ -25,7 +26,10 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
     solved.pumps.get(rail.name)?.points.find((p) => p.mode === mode);
 
   const loads = (rail: Rail, mode: string | undefined): number | null => {
-    if (rail.origin?.kind === 'pump') return point(rail, mode)?.loadCurrent ?? null;
+    if (rail.origin?.kind === 'pump') {
+      const at = point(rail, mode);
+      return at ? at.loadCurrent - at.belowCurrent : null;
+    }
     const voltage = solved.voltages.get(rail.name);
     let sum = 0;
     const resistors = [...rail.loads.values()]
@@ -44,17 +48,27 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
   /** Pumps that the chip's pins drive take their charge from the chip's rail. */
   const drive = (chip: Chip, mode: string | undefined): number | null => {
     let sum = 0;
-    for (const rail of board.rails.values()) {
-      if (rail.origin?.kind !== 'pump') continue;
-      const drives = pumpDrives(board, rail, rail.origin.pump);
-      if (isGap(drives)) continue;
-      const at = point(rail, mode);
-      for (const [k, d] of drives.entries()) {
-        if (d.chip !== chip) continue;
-        if (!at) return null;
-        sum += at.drives[k]?.sourceAverage ?? 0;
-      }
+    for (const [railName, chains] of solved.chains) {
+      const at = solved.pumps.get(railName)?.points.find((p) => p.mode === mode);
+      for (const [k, chain] of chains.entries())
+        for (const pin of chain.pins) {
+          if (pin.chip !== chip.name) continue;
+          if (!at) return null;
+          sum += pin.share * (at.drives[k]?.sourceAverage ?? 0);
+        }
     }
+    return sum;
+  };
+
+  /** What a pump takes from a rail past the pins of chips, which are counted with their chips. */
+  const pump = (item: Rail, name: string, mode: string | undefined): number | null => {
+    const at = point(item, mode);
+    if (!at) return null;
+    let sum = at.railCurrents.get(name) ?? 0;
+    for (const [k, chain] of (solved.chains.get(item.name) ?? []).entries())
+      for (const pin of chain.pins)
+        if (board.chips.get(pin.chip)?.rail?.name === name)
+          sum -= pin.share * (at.drives[k]?.sourceAverage ?? 0);
     return sum;
   };
 
@@ -79,9 +93,10 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
         list.push(out === null ? null : out + (origin.regulator.ground?.typical ?? 0));
       }
       if (origin?.kind === 'filter' && origin.filter.from?.name === name) list.push(rail(other.name, mode));
-      if (origin?.kind === 'pump' && origin.pump.input?.name === name)
-        list.push(point(other, mode)?.inputCurrent ?? null);
+      if (origin?.kind === 'pump' && usesRail(solved, other, origin.pump.input?.name, name))
+        list.push(pump(other, name, mode));
     }
+    for (const clock of oscillators) if (clock.railName === name) list.push(clock.amps);
     return list;
   };
 
@@ -100,4 +115,22 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
   };
 
   return { loads, rail, chip };
+}
+
+/** True when a pump stands on the rail or is driven from it. */
+function usesRail(solved: RailVoltages, rail: Rail, input: string | undefined, name: string): boolean {
+  if (input === name) return true;
+  return (solved.chains.get(rail.name) ?? []).some(
+    ({ source }) => source.railName === name || source.driver?.railName === name,
+  );
+}
+
+/** What timers and gates that make a clock take for themselves. */
+function ownCurrents(board: Board, solved: RailVoltages): { railName: string; amps: number }[] {
+  const voltage = (name: string) => solved.voltages.get(name) ?? { because: `${name} is not known` };
+  return [...board.clocks.keys()].flatMap((name) => {
+    const source = clockSource(board, name, voltage);
+    if (isGap(source) || !source.ownCurrent || source.output.railName === undefined) return [];
+    return [{ railName: source.output.railName, amps: source.ownCurrent.typical }];
+  });
 }

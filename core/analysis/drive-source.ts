@@ -25,6 +25,8 @@ export interface DriveSource {
   readonly label: string;
   readonly path: string;
   readonly railName: string;
+  /** Only of an external generator: its high level, V; `railName` is then no rail of the board. */
+  readonly highVolts?: Band;
   /** High while the first clock of the pump is low. */
   readonly opposite: boolean;
   readonly highDrop: Band;

@@ -8,24 +8,27 @@ import type { Figure } from '../quantity/figure';
 import { weightedModes } from './board-modes';
 import { isGap } from './gap';
 import { pinData, pinResistance } from './pin-resistance';
-import { type PinDrive, pumpDrives } from './pump-drive';
 import type { RailVoltages } from './rail-voltages';
 import type { DriveFigures, PinResult } from './types';
 
 interface Use {
-  readonly drive: PinDrive;
+  /** `mcu.GP15`. */
+  readonly key: string;
+  readonly chip: string;
+  readonly pin: string;
   readonly railName: string;
-  /** Place among the pump's drives. */
+  /** Place among the pump's drives, and the pin's share of its current. */
   readonly index: number;
+  readonly share: number;
 }
 
 /** Pins that drive a pump or that the file lists, by `chip.pin`. */
 export function pinResults(board: Board, solved: RailVoltages): Map<string, PinResult> {
-  const uses = pumpUses(board);
+  const uses = pumpUses(solved);
   const results = new Map<string, PinResult>();
   for (const chip of board.chips.values()) {
     const names = new Set([...chip.pins.keys()]);
-    for (const use of uses) if (use.drive.chip === chip) names.add(use.drive.pin);
+    for (const use of uses) if (use.chip === chip.name) names.add(use.pin);
     for (const name of names) {
       const key = `${chip.name}.${name}`;
       results.set(
@@ -35,7 +38,7 @@ export function pinResults(board: Board, solved: RailVoltages): Map<string, PinR
           solved,
           chip,
           name,
-          uses.filter((use) => use.drive.key === key),
+          uses.filter((use) => use.key === key),
         ),
       );
     }
@@ -75,17 +78,19 @@ function pinResult(
   };
 }
 
-function pumpUses(board: Board): Use[] {
-  const uses: Use[] = [];
-  for (const rail of board.rails.values()) {
-    if (rail.origin?.kind !== 'pump') continue;
-    const drives = pumpDrives(board, rail, rail.origin.pump);
-    if (isGap(drives)) continue;
-    drives.forEach((drive, index) => {
-      uses.push({ drive, railName: rail.name, index });
-    });
-  }
-  return uses;
+function pumpUses(solved: RailVoltages): Use[] {
+  return [...solved.chains].flatMap(([railName, chains]) =>
+    chains.flatMap((chain, index) =>
+      chain.pins.map(({ chip, pin, share }) => ({
+        key: `${chip}.${pin}`,
+        chip,
+        pin,
+        railName,
+        index,
+        share,
+      })),
+    ),
+  );
 }
 
 /** The mode with the largest rms current; undefined when a pump on the pin has no solution. */
@@ -103,12 +108,22 @@ function worstMode(
       const point = solved.pumps.get(use.railName)?.points.find((p) => p.mode === mode);
       const figures = point?.drives[use.index];
       if (!figures) return undefined;
-      parts.push(figures);
+      parts.push(scaled(figures, use.share));
     }
     const total = addUp(parts, sources?.typical ?? 0, sinks?.typical ?? 0);
     if (!worst || total.rms > worst.rms) worst = total;
   }
   return worst;
+}
+
+function scaled(figures: DriveFigures, share: number): DriveFigures {
+  return {
+    sourceAverage: share * figures.sourceAverage,
+    sinkAverage: share * figures.sinkAverage,
+    rms: share * figures.rms,
+    peakSource: share * figures.peakSource,
+    peakSink: share * figures.peakSink,
+  };
 }
 
 /**

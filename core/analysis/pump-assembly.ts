@@ -5,7 +5,7 @@
 import type { DiodeData } from '../catalog/part';
 import type { Capacitor, Pump, Rail } from '../model/board';
 import type { LoadValues, PumpValues } from '../pump/values';
-import type { Band } from '../quantity/figure';
+import { type Band, exactly } from '../quantity/figure';
 import { activeIn } from './board-modes';
 import type { DriveSource } from './drive-source';
 import { Book, type Point } from './pump-book';
@@ -39,6 +39,8 @@ export interface PumpParts {
     readonly rise: number;
     readonly fall: number;
   };
+  /** What other rails and chips take from the output, A. */
+  readonly below: number;
 }
 
 /** Undefined when a part of the pump has no usable value. */
@@ -159,10 +161,13 @@ function pumpDiodes(book: Book, pump: Pump, count: number, ambient: number): (Di
   });
 }
 
+/** Name of the load that stands for other rails and chips on this one. */
+export const belowLoad = 'what stands on it';
+
 /** Below half a volt nothing that regulates its own power still runs (common practice, no source). */
 const leastPowerVoltage = 0.5;
 
-function addLoads(book: Book, { rail, mode }: PumpParts): ((p: Point) => LoadValues)[] {
+function addLoads(book: Book, { rail, mode, below }: PumpParts): ((p: Point) => LoadValues)[] {
   const loads: ((p: Point) => LoadValues)[] = [];
   const add = (label: string, path: string, unit: 'ohm' | 'A' | 'W', band: Band) => {
     const variable = book.add(label, path, unit, band);
@@ -190,6 +195,10 @@ function addLoads(book: Book, { rail, mode }: PumpParts): ((p: Point) => LoadVal
       const knee = Math.max(Math.abs(load.least?.typical ?? 0), leastPowerVoltage);
       loads.push((p) => ({ name, kind: 'power', watts: p[variable]!, knee }));
     }
+  }
+  if (below > 0) {
+    const variable = add(belowLoad, rail.path, 'A', exactly(below));
+    loads.push((p) => ({ name: belowLoad, kind: 'current', amps: p[variable]! }));
   }
   if (rail.bleeder && rail.bleeder.min > 0) {
     const variable = add('bleeder', `${rail.path}.bleeder`, 'ohm', rail.bleeder);

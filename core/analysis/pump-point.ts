@@ -6,6 +6,7 @@ import type { DrivePlace } from '../pump/drive';
 import { type PumpNetwork, pumpNetwork } from '../pump/network';
 import { idealVoltage, type PumpValues } from '../pump/values';
 import { driverFigures } from './driver-figures';
+import { belowLoad } from './pump-assembly';
 import { pumpDrops } from './pump-drops';
 import { hasBand, type PumpModel } from './pump-model';
 import type { CapacitorFigures, DiodeFigures, DriveFigures, PumpPoint } from './types';
@@ -68,7 +69,11 @@ function describe(
   );
   const loadCurrent = sum(loads.map((load) => load.average));
   const askedCurrent = sum(
-    values.loads.map((load, k) => (load.kind === 'current' ? load.amps : loads[k]!.average)),
+    values.loads.map((load, k) => {
+      if (load.kind === 'current') return load.amps;
+      if (load.kind === 'resistance') return loads[k]!.average;
+      return Math.max(loads[k]!.average, load.watts / Math.max(Math.abs(output.average), load.knee));
+    }),
   );
   const resistance = Math.abs(solved.derivatives.average[0]!);
   const sign = values.negative ? -1 : 1;
@@ -82,6 +87,7 @@ function describe(
     highest: output.max,
     ripple: output.max - output.min,
     loadCurrent,
+    belowCurrent: sum(values.loads.map((load, k) => (load.name === belowLoad ? loads[k]!.average : 0))),
     askedCurrent,
     // The first diode is the only way from the input rail.
     inputCurrent: values.input === undefined ? 0 : sign * solved.diodes[network.diodes[0]!]!.average,

@@ -1,79 +1,63 @@
 /**
  * From a pump rail of the board to its solved pump, or to the reason why there is none.
  */
-
 import type { Board, Pump, Rail } from '../model/board';
-import { type Band, exactly } from '../quantity/figure';
+import type { Band } from '../quantity/figure';
 import { weightedModes } from './board-modes';
-import type { DriveSource } from './drive-source';
+import { type DriveChain, driveChains } from './drive-chain';
 import { type Gap, isGap } from './gap';
-import { pinResistance } from './pin-resistance';
 import { assemblePump, type RailSource } from './pump-assembly';
-import { driveData, type PinDrive, pumpDrives } from './pump-drive';
 import { type ModeModel, solvePump } from './pump-result';
 import type { PumpResult } from './types';
 
 /** Voltage of another rail, or why it has none. */
 export type RailVoltage = (name: string) => Band | Gap;
 
-const computedTopologies: ReadonlySet<string> = new Set(['doubler', 'inverter']);
-
-/** The pump's models in each mode, for solving and for sizing; `drives` are the pins behind it. */
-export interface PumpSetup {
-  readonly models: readonly ModeModel[];
-  readonly drives: readonly PinDrive[];
+/** How the rest of the board looks from one pump. */
+export interface Surroundings {
+  readonly voltage: RailVoltage;
+  /** A rail as this pump sees it in a mode: without the pump's own current, with its source resistance. */
+  source(name: string, mode: string | undefined): RailSource | Gap;
+  /** What other rails and chips take from this pump's output in a mode, A. */
+  below(mode: string | undefined): number;
 }
 
-export function setUpPump(board: Board, rail: Rail, pump: Pump, voltage: RailVoltage): PumpSetup | Gap {
-  const { topology } = pump;
-  if (!topology) return { because: 'it has no topology' };
-  if (!computedTopologies.has(topology)) return { because: `a ${topology} is not computed yet` };
-  const drives = pumpDrives(board, rail, pump);
-  if (isGap(drives)) return drives;
-  const first = drives[0]!;
-  const sources: DriveSource[] = [];
-  for (const drive of drives) {
-    const source = driveSource(drive, voltage);
-    if (isGap(source)) return source;
-    sources.push(source);
-  }
-  const input = inputRail(pump, voltage);
-  if (input && isGap(input)) return input;
-  const rails = new Map<string, RailSource>();
-  for (const name of [...sources.map((source) => source.railName), ...(input ? [input.railName] : [])]) {
-    const band = voltage(name);
-    if (isGap(band)) return band;
-    rails.set(name, { name, band });
-  }
+export interface PumpSetup {
+  readonly models: readonly ModeModel[];
+  readonly chains: readonly DriveChain[];
+}
+
+export function setUpPump(board: Board, rail: Rail, pump: Pump, around: Surroundings): PumpSetup | Gap {
+  const stages = stageCount(pump);
+  if (typeof stages !== 'number') return stages;
+  const chains = driveChains(board, rail, pump, around.voltage);
+  if (isGap(chains)) return chains;
+  const input = inputName(pump);
+  if (input !== undefined && typeof input !== 'string') return input;
   const models: ModeModel[] = [];
-  for (const { name } of weightedModes(board)) {
+  for (const { name: mode } of weightedModes(board)) {
+    const rails = railSources(chains, input, mode, around);
+    if (isGap(rails)) return rails;
+    const { root, frequency, duty, rise, fall } = chains[0]!.clock;
     const model = assemblePump({
       rail,
       pump,
-      mode: name,
-      stages: 1,
+      mode,
+      stages,
       ambient: board.ambient,
-      rails: [...rails.values()],
-      input: input?.railName,
-      drives: sources,
-      clock: {
-        label: first.clock.name,
-        path: first.clock.path,
-        frequency: first.frequency,
-        duty: first.duty,
-        rise: 0,
-        fall: 0,
-      },
+      rails,
+      input,
+      drives: chains.map((chain) => chain.source),
+      clock: { label: root.name, path: root.path, frequency, duty, rise, fall },
+      below: around.below(mode),
     });
     if (!model) return { because: 'a capacitor or a diode of it has no usable value' };
-    models.push({ mode: name, model });
+    models.push({ mode, model });
   }
-  return { models, drives };
+  return { models, chains };
 }
 
-export function solveRailPump(board: Board, rail: Rail, pump: Pump, voltage: RailVoltage): PumpResult | Gap {
-  const setup = setUpPump(board, rail, pump, voltage);
-  if (isGap(setup)) return setup;
+export function solveRailPump(rail: Rail, pump: Pump, setup: PumpSetup): PumpResult | Gap {
   const result = solvePump(pump.topology!, setup.models);
   if (!('reason' in result)) return result;
   return {
@@ -90,46 +74,41 @@ export function solveRailPump(board: Board, rail: Rail, pump: Pump, voltage: Rai
   };
 }
 
-/** Undefined when the pump stands on ground. */
-function inputRail(pump: Pump, voltage: RailVoltage): { railName: string; band: Band } | Gap | undefined {
-  if (!pump.input || pump.input.name === 'ground') {
-    return pump.topology === 'doubler' && !pump.input ? { because: 'it has no input' } : undefined;
+function stageCount({ topology, stages }: Pump): number | Gap {
+  if (!topology) return { because: 'it has no topology' };
+  if (topology === 'doubler' || topology === 'inverter') return 1;
+  const count = stages?.typical;
+  return count !== undefined && count >= 1
+    ? Math.round(count)
+    : { because: `a ${topology} needs its number of stages` };
+}
+
+/** Undefined for ground, where everything that pumps down or climbs a ladder may start. */
+function inputName(pump: Pump): string | undefined | Gap {
+  if (pump.input) return pump.input.name === 'ground' ? undefined : pump.input.name;
+  const fromGround =
+    pump.topology === 'inverter' || pump.topology === 'ladder' || pump.polarity === 'negative';
+  return fromGround ? undefined : { because: 'it has no input' };
+}
+
+/** Every rail that the pump stands on or is driven from, each once. */
+function railSources(
+  chains: readonly DriveChain[],
+  input: string | undefined,
+  mode: string | undefined,
+  around: Surroundings,
+): RailSource[] | Gap {
+  const rails = new Map<string, RailSource>();
+  for (const { source } of chains)
+    if (source.highVolts) rails.set(source.railName, { name: source.railName, band: source.highVolts });
+  const names = [...chains.flatMap(({ source }) => [source.railName, source.driver?.railName]), input].filter(
+    (name) => name !== undefined,
+  );
+  for (const name of names) {
+    if (rails.has(name)) continue;
+    const source = around.source(name, mode);
+    if (isGap(source)) return source;
+    rails.set(name, source);
   }
-  const band = voltage(pump.input.name);
-  return isGap(band) ? band : { railName: pump.input.name, band };
-}
-
-function driveSource(drive: PinDrive, voltage: RailVoltage): DriveSource | Gap {
-  const band = voltage(drive.railName);
-  if (isGap(band)) return band;
-  const data = driveData(drive);
-  const high = data && pinResistance(data, 'high', band.typical);
-  const low = data && pinResistance(data, 'low', band.typical);
-  if (!high || !low) return noResistance(drive);
-  return {
-    label: drive.key,
-    path: `${drive.chip.path}.pins.${drive.pin}`,
-    railName: drive.railName,
-    opposite: false,
-    highDrop: exactly(0),
-    lowVolts: exactly(0),
-    highOhms: high,
-    lowOhms: low,
-  };
-}
-
-function noResistance({ chip, pin, key, clock }: PinDrive): Gap {
-  return {
-    because: `the output resistance of ${key} is not known`,
-    finding: {
-      code: 'missing-key',
-      severity: 'error',
-      at: chip.part ? `${chip.path}.part` : chip.path,
-      span: chip.part?.span ?? chip.nameSpan,
-      message:
-        `${key} drives ${clock.name}, but its output resistance is not known. Name a catalogue part, or give ` +
-        `high-resistance and low-resistance for ${pin} under parts.chips.`,
-      related: [{ span: clock.nameSpan, message: `${clock.name} is driven from here` }],
-    },
-  };
+  return [...rails.values()];
 }

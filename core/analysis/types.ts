@@ -4,9 +4,10 @@
  */
 import type { ChipData, PinData } from '../catalog/part';
 import type { Finding } from '../checks/finding';
-import type { Chip, Clock, Rail, Supply } from '../model/board';
+import type { Chip, Clock, Driver, Rail, Supply } from '../model/board';
 import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
+import type { ClockSource } from './clock-source';
 
 /** One quantity of a corner and the end of its band at which it was taken. */
 export interface CornerSetting {
@@ -84,6 +85,8 @@ export interface PumpPoint {
   readonly ripple: number;
   /** Average into all loads and the bleeder, magnitude, A. */
   readonly loadCurrent: number;
+  /** The part of it that other rails and chips on this one take, A. */
+  readonly belowCurrent: number;
   /** Average that the loads ask for, A: more than `loadCurrent` when the rail stalls. */
   readonly askedCurrent: number;
   /** Average out of the input rail, A; 0 when it stands on ground. */
@@ -133,6 +136,23 @@ export interface PumpResult {
   readonly influences: readonly { readonly label: string; readonly path: string; readonly volts: number }[];
 }
 
+/** Switch-on from empty capacitors and switch-off of a pump, typical values. */
+export interface Transients {
+  readonly mode?: string;
+  /** Time to 90 % of the final voltage, s; null when it could not be followed. */
+  readonly startTime: number | null;
+  readonly startCourse: readonly { readonly time: number; readonly volts: number }[];
+  /** Largest current of each drive's clock output, A. */
+  readonly inrush: readonly number[] | null;
+  readonly diodePeaks: readonly number[] | null;
+  /** Taken from each rail until `startTime`, C and J. */
+  readonly railCharge: ReadonlyMap<string, number>;
+  readonly railEnergy: ReadonlyMap<string, number>;
+  /** Time to fall below `dischargeLevel` volt with everything off, s; null when nothing discharges it in 115 days. */
+  readonly dischargeTime: number | null;
+  readonly dischargeLevel: number;
+}
+
 export interface RailResult {
   readonly rail: Rail;
   readonly voltage: Band | null;
@@ -146,6 +166,8 @@ export interface RailResult {
   /** By mode; empty when the board has no modes. */
   readonly modes: ReadonlyMap<string, { readonly voltage: number | null; readonly current: number | null }>;
   readonly pump?: PumpResult;
+  /** Of a pump: computed at the first call. */
+  readonly transients?: () => Transients | undefined;
   /** One sentence when something is null. */
   readonly because?: string;
 }
@@ -204,6 +226,24 @@ export interface ClockResult {
   readonly low: number | null;
 }
 
+/** One pump behind a driver, in that pump's heaviest mode. */
+export interface DriverUse {
+  readonly railName: string;
+  readonly mode?: string;
+  readonly clock: ClockSource;
+  /** Null for gates, MOSFETs and pins, which have no bases. */
+  readonly stage: DriverFigures | null;
+  /** Average that charging gates takes from the clock, A. */
+  readonly gateCurrent: number;
+  /** Average that the stage takes from its clock, A. */
+  readonly clockCurrent: number;
+}
+
+export interface DriverResult {
+  readonly driver: Driver;
+  readonly uses: readonly DriverUse[];
+}
+
 export interface SupplyResult {
   readonly supply: Supply;
   readonly voltage: Band | null;
@@ -223,6 +263,7 @@ export interface BoardAnalysis {
   readonly groups: ReadonlyMap<string, GroupResult>;
   readonly chips: ReadonlyMap<string, ChipResult>;
   readonly clocks: ReadonlyMap<string, ClockResult>;
+  readonly drivers: ReadonlyMap<string, DriverResult>;
   readonly supplies: ReadonlyMap<string, SupplyResult>;
   /** Worst of all pumps. */
   readonly balance: number | null;

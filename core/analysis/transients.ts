@@ -1,0 +1,48 @@
+/**
+ * Switch-on from empty capacitors and switch-off, computed when somebody asks: they cost more than the steady state.
+ */
+import { runDown, solve, startUp } from '../engine';
+import { pumpNetwork } from '../pump/network';
+import { typicalPoint } from './pump-model';
+import type { ModeModel } from './pump-result';
+import type { Transients } from './types';
+
+/** A rail counts as started at this share of its final voltage. */
+const arrived = 0.9;
+/** Below this nothing on a board is awake or dangerous, V; from above 60 V d.c. the way down to 60 V counts. */
+const quiet = 1;
+const touchable = 60;
+
+/** In the given mode, typical values; undefined when the pump has no steady state. */
+export function pumpTransients({ mode, model }: ModeModel): Transients | undefined {
+  const values = model.values(typicalPoint(model));
+  const placed = pumpNetwork(values);
+  if (!placed) return undefined;
+  const { network, output } = placed;
+  const solved = solve(network);
+  if (!solved.converged) return undefined;
+  const final = solved.nodes[output]!.average;
+  const start = startUp(network, { output, final, states: solved.start, reach: arrived });
+  const level = Math.abs(final) > touchable ? touchable : quiet;
+  const low = placed.phases.indexOf('low');
+  const time = runDown(network, { output, states: solved.start, level, segment: low });
+  return {
+    ...(mode === undefined ? {} : { mode }),
+    startTime: start?.time ?? null,
+    startCourse: start?.course ?? [],
+    inrush: start
+      ? placed.drives.map((drive) =>
+          Math.max(start.resistorPeaks[drive.high]!, start.resistorPeaks[drive.low]!),
+        )
+      : null,
+    diodePeaks: start ? placed.diodes.map((k) => start.diodePeaks[k]!) : null,
+    railCharge: new Map(
+      start ? values.rails.map((rail, k) => [rail.name, start.charge[placed.rails[k]!.known]!]) : [],
+    ),
+    railEnergy: new Map(
+      start ? values.rails.map((rail, k) => [rail.name, start.energy[placed.rails[k]!.known]!]) : [],
+    ),
+    dischargeTime: time !== undefined && Number.isFinite(time) ? time : null,
+    dischargeLevel: level,
+  };
+}
