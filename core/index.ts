@@ -34,6 +34,7 @@ export interface Analysis {
   readonly text: string;
   /** In the order of the text. */
   readonly findings: readonly Finding[];
+  /** Made at the first reading. */
   readonly report: Report;
   /** What the feature functions read; its shape may change between versions. */
   readonly board: BoardAnalysis;
@@ -47,7 +48,17 @@ export function analyse(text: string, options: { readonly file: string }): Analy
   const plain = stripBom(text);
   const board = analyseBoard(plain, options.file, catalogue);
   const findings = sortFindings([...board.reading.findings, ...board.problems, ...runChecks(board)]);
-  return { text: plain, findings, report: toReport(board, findings, `${toolName} ${toolVersion}`), board };
+  let report: Report | undefined;
+  return {
+    text: plain,
+    findings,
+    // Switch-on and switch-off cost more than the rest, and an editor does not ask for the report at each keystroke.
+    get report() {
+      report ??= toReport(board, findings, `${toolName} ${toolVersion}`);
+      return report;
+    },
+    board,
+  };
 }
 
 /**

@@ -4,7 +4,7 @@
 import { resistorCurrent, type Solved } from '../engine';
 import type { DrivePlace } from '../pump/drive';
 import type { PumpNetwork } from '../pump/network';
-import type { PumpValues } from '../pump/values';
+import { inPhase, type PumpValues } from '../pump/values';
 import type { DriverFigures } from './types';
 
 /** Null for a drive without such a stage. */
@@ -36,7 +36,7 @@ export function driverFigures(
     railCurrent: driverRailCurrent(solved, driver, stage.kind),
     crossCurrent: average,
     crossCharge: (average * circuit.period) / 2,
-    shortOf: shortOf(solved, network, driver, rail.volts),
+    shortOf: shortOf(solved, network, driver, rail.volts, inPhase(values.drives[k]!)),
   };
 }
 
@@ -85,6 +85,7 @@ function shortOf(
   network: PumpNetwork,
   { stage }: NonNullable<DrivePlace['driver']>,
   railVolts: number,
+  inPhaseWithClock: boolean,
 ): number {
   const { circuit, path } = solved;
   const at = (s: number) => path.volts[s * (circuit.nodes + circuit.knowns) + circuit.place[stage]!]!;
@@ -93,8 +94,8 @@ function shortOf(
     const phase = network.phases[path.segment[s]!];
     const ends = s === path.count - 1 || path.segment[s + 1] !== path.segment[s];
     if (!ends || (phase !== 'high' && phase !== 'low')) continue;
-    const v = at(s);
-    worst = Math.max(worst, Math.min(Math.abs(v), Math.abs(railVolts - v)));
+    const goal = (phase === 'high') === inPhaseWithClock ? railVolts : 0;
+    worst = Math.max(worst, Math.abs(at(s) - goal));
   }
   return worst;
 }

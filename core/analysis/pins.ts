@@ -75,6 +75,7 @@ function pinResult(
     limitKind: limit === null ? null : data.recommended ? 'recommended' : 'absolute',
     use: figures && limit ? figures.rms / limit.typical : null,
     drives: uses.map((use) => use.railName),
+    pumps: uses.map(({ railName, index, share }) => ({ railName, index, share })),
   };
 }
 

@@ -9,6 +9,7 @@ import { boardCurrents } from './currents';
 import { type Drawn, drawnFrom, nothingDrawn } from './drawn';
 import type { DriveChain } from './drive-chain';
 import { type Gap, isGap } from './gap';
+import type { ModeModel } from './pump-result';
 import { type RailVoltage, type Surroundings, setUpPump, solveRailPump } from './pump-solution';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { PumpResult } from './types';
@@ -18,6 +19,8 @@ export interface RailVoltages {
   readonly pumps: ReadonlyMap<string, PumpResult>;
   /** Drives of each pump rail whose drives are known, solved or not. */
   readonly chains: ReadonlyMap<string, readonly DriveChain[]>;
+  /** Models of each pump, one for each mode. */
+  readonly models: ReadonlyMap<string, readonly ModeModel[]>;
 }
 
 /** Rounds after which a board that still moves is taken as it is. */
@@ -46,6 +49,7 @@ export function railSolver(
   const voltages = new Map<string, Band | Gap>();
   const pumps = new Map<string, PumpResult>();
   const chains = new Map<string, readonly DriveChain[]>();
+  const models = new Map<string, readonly ModeModel[]>();
   const open = new Set<string>();
   const voltage: RailVoltage = (name) => {
     const known = voltages.get(name);
@@ -91,6 +95,7 @@ export function railSolver(
         const setup = setUpPump(board, rail, origin.pump, around(rail));
         if (isGap(setup)) return setup;
         chains.set(rail.name, setup.chains);
+        models.set(rail.name, setup.models);
         const result = solveRailPump(rail, origin.pump, setup);
         if (isGap(result)) return result;
         pumps.set(rail.name, result);
@@ -102,7 +107,7 @@ export function railSolver(
       }
     }
   };
-  return { voltages, pumps, chains, voltage };
+  return { voltages, pumps, chains, models, voltage };
 }
 
 /** Open voltage and source resistance of the supply that a rail is. */

@@ -8,7 +8,8 @@ import { overModes } from './chips';
 import type { Currents } from './currents';
 import { isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
-import type { PumpResult, RailResult } from './types';
+import { pumpTransients } from './transients';
+import type { PumpResult, RailResult, Transients } from './types';
 
 export function railResults(
   board: Board,
@@ -63,8 +64,22 @@ function railResult(
         },
       ]),
     ),
-    ...(pump ? { pump } : {}),
+    ...(pump ? { pump, transients: once(() => heaviestTransients(rail, pump, solved)) } : {}),
     ...(found && isGap(found) ? { because: found.because } : {}),
+  };
+}
+
+function heaviestTransients(rail: Rail, pump: PumpResult, solved: RailVoltages): Transients | undefined {
+  const model = solved.models.get(rail.name)?.find(({ mode }) => mode === pump.heaviest.mode);
+  return model && pumpTransients(model);
+}
+
+/** The value of the first call for all further ones. */
+function once<T>(compute: () => T): () => T {
+  let known: { readonly value: T } | undefined;
+  return () => {
+    known ??= { value: compute() };
+    return known.value;
   };
 }
 

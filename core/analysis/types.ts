@@ -193,6 +193,8 @@ export interface PinResult {
   readonly use: number | null;
   /** Rails whose pump this pin drives. */
   readonly drives: readonly string[];
+  /** The same, with the place among the pump's drives and the pin's share of its current. */
+  readonly pumps: readonly { readonly railName: string; readonly index: number; readonly share: number }[];
 }
 
 export interface GroupResult {

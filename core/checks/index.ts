@@ -4,6 +4,11 @@
 import type { BoardAnalysis } from '../analysis/types';
 import type { Check } from './check';
 import { chipOverLimit } from './chip-over-limit';
+import { clockFrequency } from './clock-frequency';
+import { clockLevel } from './clock-level';
+import { driverSharedBase } from './driver-shared-base';
+import { driverShootThrough } from './driver-shoot-through';
+import { driverStarved } from './driver-starved';
 import type { Finding } from './finding';
 import { groupOverLimit } from './group-over-limit';
 import { notComputed } from './not-computed';
@@ -15,11 +20,17 @@ import { railHigh } from './rail-high';
 import { railLow } from './rail-low';
 import { railStalls } from './rail-stalls';
 import { rippleHigh } from './ripple-high';
+import { startSlow } from './start-slow';
 import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
   chipOverLimit,
+  clockFrequency,
+  clockLevel,
+  driverSharedBase,
+  driverShootThrough,
+  driverStarved,
   groupOverLimit,
   notComputed,
   over60Volts,
@@ -30,6 +41,7 @@ export const checks: readonly Check[] = [
   railLow,
   railStalls,
   rippleHigh,
+  startSlow,
   supplyOverLimit,
   unused,
 ];

@@ -7,8 +7,6 @@ import type { Check } from './check';
 
 /** Fields of the report, with the words for them. */
 const emptyFields: readonly string[] = [
-  'startTime and dischargeTime of rails',
-  'inrushPeak of pins',
   'effective capacitance of capacitors',
   'life of batteries',
   'ripple, efficiency, load line and drops of rails that no pump makes',

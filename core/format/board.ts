@@ -34,8 +34,8 @@ export const waiverShape = shape('a waiver', 'A finding that is accepted on purp
   until: row(text, 'When to look at it again.', 'rev D'),
 });
 
-function section(entry: Shape, example: string, computed?: typeof later) {
-  return row(table(row(map(entry), entry.doc, '', computed)), entry.doc, example);
+function section(entry: Shape, example: string) {
+  return row(table(row(map(entry), entry.doc, '')), entry.doc, example);
 }
 
 export const boardShape = shape('a board file', 'The rails of one board.', {
@@ -44,7 +44,7 @@ export const boardShape = shape('a board file', 'The rails of one board.', {
   supplies: section(supplyShape, '{ port: { standard: usb-2-configured } }'),
   chips: section(chipShape, '{ mcu: { part: rp2040, rail: v3 } }'),
   clocks: section(clockShape, '{ tick: { pin: mcu.GP15, frequency: 100 kHz, duty: 50 % } }'),
-  drivers: section(driverShape, '{ stage: { input: tick, rail: v5, gates: { part: ac } } }', later),
+  drivers: section(driverShape, '{ stage: { input: tick, rail: v5, gates: { part: ac } } }'),
   rails: section(railShape, '{ v5: { supply: port } }'),
   modes: section(modeShape, '{ active: { share: 2 % } }'),
   parts: row(map(partsShape), partsShape.doc, '{ diodes: { my-diode: { saturation: 2.5 nA } } }'),

@@ -61,8 +61,8 @@ export const transistorPartShape = shape('the data of a transistor', 'Data of a 
   'base-resistance': row(quantity('ohm', notNegative), 'Base resistance.', '10 ohm'),
   'collector-resistance': row(quantity('ohm', notNegative), 'Collector resistance.', '1 ohm'),
   'emitter-resistance': row(quantity('ohm', notNegative), 'Emitter resistance.', '0.5 ohm'),
-  storage: row(quantity('s', notNegative), 'Storage time out of saturation.', '200 ns'),
-  current: row(quantity('A', positive), 'Largest collector current.', '500 mA'),
+  storage: row(quantity('s', notNegative), 'Storage time out of saturation.', '200 ns', later),
+  current: row(quantity('A', positive), 'Largest collector current.', '500 mA', later),
 });
 
 export const mosfetPartShape = shape('the data of a MOS transistor', 'Data of a MOS transistor.', {
@@ -79,7 +79,7 @@ export const mosfetPartShape = shape('the data of a MOS transistor', 'Data of a 
     '60 mohm',
   ),
   'gate-charge': row(quantity('C', positive), 'Total gate charge.', '4 nC'),
-  current: row(quantity('A', positive), 'Largest drain current.', '2 A'),
+  current: row(quantity('A', positive), 'Largest drain current.', '2 A', later),
 });
 
 export const gatePartShape = shape('the data of a gate', 'Data of a logic gate.', {
@@ -90,7 +90,7 @@ export const gatePartShape = shape('the data of a gate', 'Data of a logic gate.'
   high,
   low,
   absolute,
-  total: row(quantity('A', positive), 'Largest current through a supply pin.', '50 mA'),
+  total: row(quantity('A', positive), 'Largest current through a supply pin.', '50 mA', later),
   rising: row(quantity('V', positive), 'Upper input threshold.', '1.7..2.2..2.7 V'),
   falling: row(quantity('V', positive), 'Lower input threshold.', '0.9..1.4..1.8 V'),
   draws: row(quantity('A', notNegative), 'Supply current without load.', '2 uA'),
@@ -162,22 +162,22 @@ export const partsShape = shape(
       '{ my-diode: { saturation: 2.5 nA, ideality: 1.8, resistance: 0.6 ohm } }',
     ),
     transistors: row(
-      table(row(map(transistorPartShape), transistorPartShape.doc, '{ polarity: npn }', later)),
+      table(row(map(transistorPartShape), transistorPartShape.doc, '{ polarity: npn }')),
       'Bipolar transistors.',
       '{ my-npn: { polarity: npn, saturation: 10 fA, gain: 200 } }',
     ),
     mosfets: row(
-      table(row(map(mosfetPartShape), mosfetPartShape.doc, '{ channel: n }', later)),
+      table(row(map(mosfetPartShape), mosfetPartShape.doc, '{ channel: n }')),
       'MOS transistors.',
       '{ my-nmos: { channel: n, threshold: 1.2 V, on-resistance: 60 mohm } }',
     ),
     gates: row(
-      table(row(map(gatePartShape), gatePartShape.doc, '{ high-resistance: 40 ohm }', later)),
+      table(row(map(gatePartShape), gatePartShape.doc, '{ high-resistance: 40 ohm }')),
       'Logic gates.',
       '{ my-gate: { high-resistance: 40 ohm } }',
     ),
     timers: row(
-      table(row(map(timerPartShape), timerPartShape.doc, '{ high-drop: 1.4 V }', later)),
+      table(row(map(timerPartShape), timerPartShape.doc, '{ high-drop: 1.4 V }')),
       'Astable timers.',
       '{ my-timer: { high-drop: 1.4 V } }',
     ),

@@ -44,19 +44,18 @@ export const pumpShape = shape('a pump', 'A charge pump: capacitors and diodes t
     choice(
       option('doubler', 'One positive stage on top of `input`.'),
       option('inverter', 'One stage below ground.'),
-      option('multiplier', 'Several stages on two phases.', false),
-      option('ladder', 'Several half-wave stages on one phase.', false),
+      option('multiplier', 'Several stages on two phases.'),
+      option('ladder', 'Several half-wave stages on one phase.'),
     ),
     'How the stages are wired.',
     'doubler',
     needed,
   ),
-  stages: row(quantity('1', { least: 1, most: 40, whole: true }), 'Number of stages.', '3', later),
+  stages: row(quantity('1', { least: 1, most: 40, whole: true }), 'Number of stages.', '3'),
   polarity: row(
     choice(option('positive', 'Pumps up.'), option('negative', 'Pumps down.')),
     'Direction of a multiplier or ladder.',
     'negative',
-    later,
   ),
   input: row(name('rails', 'ground'), 'The rail that the pump stands on, or `ground`.', 'v3'),
   drive: row(
@@ -66,7 +65,7 @@ export const pumpShape = shape('a pump', 'A charge pump: capacitors and diodes t
     needed,
   ),
   flying: row(capacitors, 'The capacitor that is lifted; a list for one in each stage.', '1 uF', needed),
-  smoothing: row(capacitors, 'Second column of a ladder; as `flying` if left out.', '1 uF', later),
+  smoothing: row(capacitors, 'Second column of a ladder; as `flying` if left out.', '1 uF'),
   reservoir: row(capacitor, 'The capacitor across the output.', '10 uF'),
   diode: row(
     [...diode, list(row(diode, 'The diode at one position.', 'schottky-signal'))],
@@ -115,7 +114,7 @@ export const needsShape = shape('the needs of a rail', 'What the rail must keep.
     '5.2..6.5 V',
   ),
   ripple: row(quantity('V', positive), 'Largest ripple, peak to peak.', '30 mV'),
-  start: row(quantity('s', positive), 'Time in which it must have come up.', '20 ms', later),
+  start: row(quantity('s', positive), 'Time in which it must have come up.', '20 ms'),
   swing: row(
     quantity('V', positive),
     'Signal swing that an amplifier on this rail must reach.',
@@ -148,7 +147,7 @@ export const loadShape = shape(
   {
     current: row(quantity('A', notNegative), 'A steady current, as a magnitude.', '1.2 mA'),
     resistance: row(quantity('ohm', positive), 'A resistance to ground.', '47 kohm'),
-    power: row(quantity('W', notNegative), 'A steady power.', '10 mW', later),
+    power: row(quantity('W', notNegative), 'A steady power.', '10 mW'),
     amplifier: row(map(amplifierShape), amplifierShape.doc, '{ quiescent: 1.2 mA, count: 2 }', later),
     in: row(
       [name('modes'), list(row(name('modes'), 'A mode in which it draws.', 'active'))],

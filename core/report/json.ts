@@ -6,6 +6,8 @@ import type {
   BoardAnalysis,
   ChipResult,
   ClockResult,
+  DriverResult,
+  DriverUse,
   GroupResult,
   PinResult,
   RailResult,
@@ -17,6 +19,7 @@ import { type LineIndex, lineIndex } from '../text/lines';
 import type {
   ChipReport,
   ClockReport,
+  DriverReport,
   FindingReport,
   GroupReport,
   PartReport,
@@ -36,16 +39,11 @@ export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], 
     file: analysis.file,
     board: analysis.reading.board.title ?? null,
     rails: mapped(analysis.rails, railReport),
-    pins: mapped(analysis.pins, pinReport),
+    pins: mapped(analysis.pins, (pin) => pinReport(pin, analysis)),
     groups: mapped(analysis.groups, groupReport),
     chips: mapped(analysis.chips, chipReport),
     clocks: mapped(analysis.clocks, clockReport),
-    drivers: mapped(analysis.reading.board.drivers, () => ({
-      baseCurrent: null,
-      forcedGain: null,
-      dissipation: null,
-      inputCurrent: null,
-    })),
+    drivers: mapped(analysis.drivers, driverReport),
     supplies: mapped(analysis.supplies, supplyReport),
     parts: partReports(analysis),
     balance: finite(analysis.balance),
@@ -53,8 +51,23 @@ export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], 
   };
 }
 
-function railReport({ pump, ...rail }: RailResult): RailReport {
+/** The worst of the pumps behind the driver, figure by figure. */
+function driverReport({ uses }: DriverResult): DriverReport {
+  const worst = (figure: (use: DriverUse) => number | undefined) => {
+    const values = uses.map(figure).filter((value) => value !== undefined);
+    return values.length > 0 ? finite(Math.max(...values)) : null;
+  };
+  return {
+    baseCurrent: worst(({ stage }) => stage?.baseCurrent),
+    forcedGain: worst(({ stage }) => stage?.forcedGain),
+    dissipation: worst(({ stage }) => stage?.dissipation),
+    inputCurrent: worst(({ clockCurrent }) => clockCurrent),
+  };
+}
+
+function railReport({ pump, transients, ...rail }: RailResult): RailReport {
   const point = pump?.heaviest;
+  const course = transients?.();
   return {
     voltage: band(rail.voltage),
     ripple: band(rail.ripple),
@@ -66,8 +79,8 @@ function railReport({ pump, ...rail }: RailResult): RailReport {
     outputResistance: finite(point?.outputResistance),
     headroom: finite(rail.headroom),
     drops: point ? point.drops.map((drop) => ({ in: drop.in, volts: drop.volts })) : null,
-    startTime: null,
-    dischargeTime: null,
+    startTime: finite(course?.startTime),
+    dischargeTime: finite(course?.dischargeTime),
     storedEnergy: finite(rail.storedEnergy),
     modes: mapped(rail.modes, ({ voltage, current }) => ({
       voltage: finite(voltage),
@@ -76,17 +89,29 @@ function railReport({ pump, ...rail }: RailResult): RailReport {
   };
 }
 
-function pinReport(pin: PinResult): PinReport {
+function pinReport(pin: PinResult, analysis: BoardAnalysis): PinReport {
   return {
     sourceAverage: finite(pin.sourceAverage),
     sinkAverage: finite(pin.sinkAverage),
     rms: finite(pin.rms),
     peakSource: finite(pin.peakSource),
     peakSink: finite(pin.peakSink),
-    inrushPeak: null,
+    inrushPeak: finite(inrushPeak(pin, analysis)),
     limit: finite(pin.limit?.typical),
     use: finite(pin.use),
   };
+}
+
+/** Pumps on one pin may start together, so their first pulses add; undefined for a pin that drives none. */
+function inrushPeak({ pumps }: PinResult, { rails }: BoardAnalysis): number | undefined {
+  if (pumps.length === 0) return undefined;
+  let sum = 0;
+  for (const { railName, index, share } of pumps) {
+    const inrush = rails.get(railName)?.transients?.()?.inrush;
+    if (!inrush) return undefined;
+    sum += share * inrush[index]!;
+  }
+  return sum;
 }
 
 function groupReport({ source, sink, use }: GroupResult): GroupReport {

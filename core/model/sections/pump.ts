@@ -4,7 +4,7 @@
 import { pumpShape } from '../../format';
 import { listNames } from '../../text/closest';
 import type { Diode, Pump, Ref, Topology } from '../board';
-import { report, reportNotComputed } from '../context';
+import { report } from '../context';
 import { listOf } from '../entries';
 import { figureOf } from '../figures';
 import { diodeData } from '../parts/diode';
@@ -45,12 +45,10 @@ export function pumpOf(slot: Slot | undefined): Pump | undefined {
   };
 }
 
-/** One phase, or two; a second phase has no effect yet. */
+/** One phase, or two. */
 function driveOf(slot: Slot | undefined): Ref[] {
   if (!slot) return [];
   const phases = slot.node.kind === 'list' ? listOf(slot) : [slot];
-  const second = phases[1];
-  if (second) reportNotComputed(slot.context, second, 'A second phase');
   const third = phases[2];
   if (third) report(slot.context, 'bad-quantity', third, 'A pump has one phase, or two: delete the others.');
   return phases.flatMap((phase) => nameOf(phase) ?? []);

@@ -11,7 +11,7 @@ describe('not-computed', () => {
       `${bench}
   up:
     ${pump}
-#   ^^^^ information not-computed: startTime and dischargeTime of rails
+#   ^^^^ information not-computed: effective capacitance of capacitors
     loads: { lamp: 2 mA }
   more:
     ${pump}

@@ -106,32 +106,21 @@ test('effects that are not computed: one finding for each use, one for a whole e
   checkFindings(`
 supplies:
   p: { voltage: 5 V, resistance: 1 ohm, capacity: 1 Ah, bulk: 10 uF, current: 1 A }
-  #                  ^^^^^^^^^^ not-computed: \`resistance\` is read but not computed yet: the numbers ignore it.
   #                                     ^^^^^^^^ not-computed
   #                                                     ^^^^ not-computed
 chips: { mcu: { part: mcu-a, rail: v5 } }
 clocks:
   a: { pin: mcu.GP14, timer: { input: 1 MHz, top: 99 }, rise: 1 ns, fall: 1 ns }
-  #                   ^^^^^ not-computed
-  #                                                     ^^^^ not-computed
-  #                                                                 ^^^^ not-computed
   b: { pin: mcu.GP15, inverse-of: a }
-  #                   ^^^^^^^^^^ not-computed
   c: { rail: v5, astable: { charge: 1 kohm, discharge: 1 kohm, timing: 1 nF, part: timer-a } }
-  #              ^^^^^^^ not-computed
   d: { rail: v5, schmitt: { resistor: 1 kohm, capacitor: 1 nF, part: gate-a } }
-  #              ^^^^^^^ not-computed
   e: { external: { frequency: 1 kHz, duty: 50 %, high: 5 V } }
-  #    ^^^^^^^^ not-computed
 drivers:
   stage: { input: a, rail: v5, push-pull: { npn: npn-a, pnp: pnp-a, base: { npn: 1 kohm, pnp: 1 kohm } } }
-  #^^^^ not-computed: driver \`stage\`
   pair: { input: a, rail: v5, mosfet-pair: { nmos: nmos-a, pmos: pmos-a, gate: 10 ohm } }
-  #^^^ not-computed
+  #                                                                      ^^^^ not-computed
   hcs: { input: a, rail: v5, gates: { part: gate-a, parallel: 2 } }
-  #^^ not-computed
   pins: { input: a, pins: [mcu.GP14, mcu.GP15] }
-  #^^^ not-computed
 rails:
   v5: { supply: p }
   v3: { regulator: { from: v5, output: 3.3 V, ground: 1 uA, dropout: 1 V, limit: 1 A, kind: linear, efficiency: 90 %, thermal: 9 K/W } }
@@ -145,14 +134,10 @@ rails:
   vm:
     pump:
       topology: multiplier
-      #         ^^^^^^^^^^ not-computed: \`multiplier\`
       stages: 3
-      #^^^^^ not-computed
       polarity: positive
-      #^^^^^^^ not-computed
       input: v5
       drive: [a, b]
-      #          ^ not-computed: A second phase
       diode: silicon-a
       series: 1 ohm
       flying: { value: 1 uF, kind: x7r, rated: 10 V, size: 0805, negative-to: ground }
@@ -160,19 +145,15 @@ rails:
       #                                              ^^^^ not-computed
       #                                                          ^^^^^^^^^^^ not-computed
       reservoir: { value: 1 uF, kind: x7r }
-      smoothing: 1 uF
-      #^^^^^^^^ not-computed
+      smoothing: { value: 1 uF, kind: x7r }
     needs: { voltage: 5..9 V, ripple: 1 V, start: 1 s, swing: 1 V, headroom: 1 V, discharge: 1 s }
-    #                                      ^^^^^ not-computed
     #                                                  ^^^^^ not-computed
     #                                                              ^^^^^^^^ not-computed
     #                                                                             ^^^^^^^^^ not-computed
     bleeder: 1 Mohm
     loads:
       a: 10 mW
-      #  ^^^^^ not-computed: A load given as a power
       b: { power: 10 mW, least: 4 V, most: 9 V }
-      #    ^^^^^ not-computed
       #                  ^^^^^ not-computed
       #                              ^^^^ not-computed
       c: { amplifier: { quiescent: 1 mA } }

@@ -32,13 +32,10 @@ parts:
     stiff: { tolerance: ±5 %, esr: 20 mohm }
     aluminium: { loss: 0.2 }
   transistors: { t: { polarity: npn, saturation: 1 fA, gain: 100 } }
-  #              ^ not-computed
   mosfets: { m: { channel: n, threshold: 1 V, on-resistance: 1 ohm } }
-  #          ^ not-computed
   gates: { g: { high-resistance: 9 ohm, supply: 2..6 V } }
-  #        ^ not-computed
+  #                                     ^^^^^^ not-computed
   timers: { t: { high-drop: 1 V } }
-  #         ^ not-computed
 `),
   );
   const find = <T extends { key: string }>(list: readonly T[], key: string) =>

@@ -84,11 +84,23 @@ describe('report', () => {
   });
 
   it('says null, never 0, for what is not computed', () => {
-    expect(up).toMatchObject({ startTime: null, dischargeTime: null });
-    expect(report.pins['mcu.A1']?.inrushPeak).toBeNull();
+    expect(report.rails['v5']).toMatchObject({ startTime: null, dischargeTime: null });
     expect(report.supplies['lab']?.life).toBeNull();
     expect(report.rails['v5']?.ripple).toBeNull();
     expect(report.findings.some(({ code }) => code === 'not-computed')).toBe(true);
+  });
+
+  it('follows switch-on and switch-off', () => {
+    // Ohm's law at the first edge: no more than 5 V over the pin's 20 ohm, and with the diode's drop not far below.
+    const inrush = report.pins['mcu.A1']?.inrushPeak ?? Number.NaN;
+    expect(inrush).toBeLessThan(5 / 20);
+    expect(inrush).toBeGreaterThan(0.7 * (5 / 20));
+    expect(up?.startTime).toBeGreaterThan(1e-5);
+    expect(up?.startTime).toBeLessThan(1e-2);
+    // 2 mA out of 10 uF (10 % tolerance apart) from the rail's voltage to 1 V: C V / I.
+    const expected = (10e-6 * (up!.modes['lit']!.voltage! - 1)) / 2.05e-3;
+    expect(up?.dischargeTime).toBeGreaterThan(0.9 * expected);
+    expect(up?.dischargeTime).toBeLessThan(1.1 * expected);
   });
 
   it('agrees with the laws of circuits', () => {

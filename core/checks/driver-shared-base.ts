@@ -1,0 +1,31 @@
+/**
+ * A push-pull stage whose bases hang on one resistor: both emitter junctions stand in series across the supply.
+ */
+import { formatQuantity } from '../quantity/write';
+import type { Check } from './check';
+import { stagesOf } from './driver-stages';
+
+export const driverSharedBase: Check = {
+  code: 'driver-shared-base',
+  title: 'Push-pull stage with joined bases',
+  severity: 'error',
+  why: 'With the bases joined nothing but the transistors themselves limits the current from the supply through both emitter junctions, at any level of the clock.',
+  run: (analysis) =>
+    stagesOf(analysis).flatMap(({ driver, use, stage }) => {
+      const shared = driver.stage?.kind === 'push-pull' ? driver.stage.sharedBase : undefined;
+      if (!shared || stage.crossCurrent <= 1e-4) return [];
+      const flows = formatQuantity(stage.railCurrent, 'A');
+      return [
+        {
+          code: 'driver-shared-base',
+          severity: 'error',
+          at: `${driver.path}.push-pull.shared-base`,
+          span: shared.span ?? driver.nameSpan,
+          message: `${driver.name} takes ${flows} from its rail, ${formatQuantity(stage.crossCurrent, 'A')} of it straight through both transistors (pump of ${use.railName}), because the joined bases put both emitter junctions in series across the supply. Give each base a resistor of its own: base: { npn: R, pnp: R }.`,
+          expected: 'one resistor for each base',
+          actual: 'one for both',
+          source: 'solution of the circuit at typical values',
+        },
+      ];
+    }),
+};

@@ -1,0 +1,58 @@
+/**
+ * A push-pull stage whose two transistors conduct at once, as a clock with a short high level makes them.
+ */
+
+import type { BoardAnalysis } from '../analysis/types';
+import { formatQuantity } from '../quantity/write';
+import type { Check } from './check';
+import { type StageInUse, stagesOf } from './driver-stages';
+
+/** Below this, and below this share of what the stage delivers, nobody would look for it (common practice, no source). */
+const leastCurrent = 1e-4;
+const leastShare = 0.05;
+/** A transistor is off below this base-emitter voltage at room temperature (common practice, no source), V. */
+const offVolts = 0.45;
+
+export const driverShootThrough: Check = {
+  code: 'driver-shoot-through',
+  title: 'Both transistors of a stage conduct at once',
+  severity: 'warning',
+  why: 'Current from the supply straight to ground heats the stage and empties the battery without moving any charge.',
+  run: (analysis) =>
+    stagesOf(analysis).flatMap((found) => {
+      const { driver, stage } = found;
+      const { crossCurrent } = stage;
+      if (driver.stage?.kind === 'push-pull' && driver.stage.sharedBase) return [];
+      if (crossCurrent < leastCurrent || crossCurrent < leastShare * stage.railCurrent) return [];
+      return [
+        {
+          code: 'driver-shoot-through',
+          severity: 'warning',
+          at: driver.path,
+          span: driver.nameSpan,
+          message: `${driver.name}: ${formatQuantity(crossCurrent, 'A')} on average flow through both transistors, ${formatQuantity(stage.crossCharge, 'C')} for each edge, and heat them with ${formatQuantity(stage.dissipation, 'W')}. ${cause(analysis, found)}`,
+          expected: `less than ${formatQuantity(leastCurrent, 'A')} and ${100 * leastShare} % of its supply current`,
+          actual: formatQuantity(crossCurrent, 'A'),
+          source: 'solution of the circuit at typical values',
+          related: [{ span: found.use.clock.clock.nameSpan, message: 'the clock that drives it' }],
+        },
+      ];
+    }),
+};
+
+/** What keeps the upper transistor on while it should be off, and the resistor that would turn it off. */
+function cause(analysis: BoardAnalysis, { driver, use }: StageInUse): string {
+  const high = analysis.clocks.get(use.clock.clock.name)?.high;
+  const railName = driver.rail?.name ?? use.clock.output.railName;
+  const rail = railName === undefined ? undefined : analysis.rails.get(railName)?.voltage?.typical;
+  if (high === null || high === undefined || rail === undefined)
+    return 'Look at the levels and edges of its clock.';
+  const gap = rail - high;
+  if (gap < offVolts) return 'The levels of its clock are far enough apart: faster edges would shorten it.';
+  const base = driver.stage?.kind === 'push-pull' ? driver.stage.base?.pnp?.typical : undefined;
+  const resistor =
+    base === undefined
+      ? ''
+      : ` A resistor of ${formatQuantity((base * offVolts) / (gap - offVolts), 'ohm', 2)} or less from the base of the pnp to its emitter turns it off (and takes base current);`;
+  return `The clock's high level of ${formatQuantity(high, 'V')} stays ${formatQuantity(gap, 'V')} below the driver's rail, which leaves the pnp partly on.${resistor} a clock that reaches the rail, or a driver rail of ${formatQuantity(high + offVolts, 'V')} or less, does too.`;
+}
