@@ -106,7 +106,8 @@ export function prepare(network: Network): Circuit {
     esr: Float64Array.from(network.capacitors, (c) => Math.max(c.ohms, leastOhms)),
     saturation: Float64Array.from(network.diodes, (d) => d.saturation),
     slope: Float64Array.from(network.diodes, (d) => d.slope),
-    diodeOhms: Float64Array.from(network.diodes, (d) => Math.max(d.ohms, leastOhms)),
+    // A junction of a transistor has its resistances outside.
+    diodeOhms: Float64Array.from(network.diodes, (d) => (d.transfer ? d.ohms : Math.max(d.ohms, leastOhms))),
     alpha: Float64Array.from(network.diodes, ({ transfer }) =>
       transfer ? (transfer.base === 'a' ? transfer.alpha : -transfer.alpha) : 0,
     ),

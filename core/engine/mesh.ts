@@ -96,7 +96,7 @@ export function meshError(
   for (let s = 0; s < path.count; s++) {
     if (path.kind[s] === Step.probe) probeRates(circuit, path, s, rate);
     else if (path.last[s]) {
-      worst = Math.max(worst, stepError(path, s - 1, rate, swing, settings.tolerance, count));
+      worst = Math.max(worst, stepError(path, s - 1, rate, swing, settings.tolerance, count, circuit));
       storeRate(path, s, rate, count);
     }
   }
@@ -144,7 +144,7 @@ function tryStep(
     path.origin[(s + 1) * count + k] = state[k]! + ratio * (path.state[s * count + k]! - state[k]!);
   copyLines(circuit, path, s, path, s + 1);
   if (!iterateStage(circuit, path, s + 1, settings.lineError)) return Number.POSITIVE_INFINITY;
-  return stepError(path, s, rate, swing, settings.tolerance, count);
+  return stepError(path, s, rate, swing, settings.tolerance, count, circuit);
 }
 
 // Weights of the three known rates (start, first stage, end) in the difference between the integral of the
@@ -160,6 +160,7 @@ function stepError(
   swing: Float64Array,
   tolerance: number,
   count: number,
+  circuit: Circuit,
 ): number {
   const length = path.length[s]!;
   let worst = 0;
@@ -168,6 +169,20 @@ function stepError(
     const end = path.state[(s + 1) * count + k]! - path.origin[(s + 1) * count + k]!;
     const error = Math.abs(weightStart * rate[k]! * length + (weightFirst * first + weightEnd * end) / gamma);
     const share = error / (tolerance * swing[k]!);
+    if (!(share <= worst)) worst = share;
+  }
+  let charge = 0;
+  for (let k = 0; k < count; k++) charge = Math.max(charge, circuit.farads[k]! * swing[k]!);
+  const nd = circuit.diodes.count;
+  for (let k = 0; k < nd; k++) {
+    if (circuit.alpha[k] === 0) continue;
+    const i = path.lines.i;
+    const error =
+      length *
+      Math.abs(
+        weightStart * i[(s - 1) * nd + k]! + weightFirst * i[s * nd + k]! + weightEnd * i[(s + 1) * nd + k]!,
+      );
+    const share = error / (tolerance * charge);
     if (!(share <= worst)) worst = share;
   }
   return worst;

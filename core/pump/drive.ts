@@ -114,6 +114,8 @@ function addTransistor(
 ): TransistorPlace {
   const base = sheet.node(`${name} base`);
   const inner = sheet.node(`${name} collector`);
+  const foot = sheet.node(`${name} emitter`);
+  sheet.resistor(`${name} emitter`, foot, emitter, values.emitterOhms);
   const side = pnp ? 'b' : 'a';
   const junction = (far: Terminal) => (pnp ? { a: far, b: base } : { a: base, b: far });
   const forward = values.gain / (values.gain + 1);
@@ -123,10 +125,10 @@ function addTransistor(
     collector: sheet.resistor(`${name} collector`, inner, collector, values.collectorOhms),
     emitterJunction: sheet.junction({
       name: `${name} emitter`,
-      ...junction(emitter),
+      ...junction(foot),
       saturation: values.saturation / forward,
       slope: values.slope,
-      ohms: values.emitterOhms,
+      ohms: 0,
       transfer: { terminal: inner, base: side, alpha: forward },
     }),
     collectorJunction: sheet.junction({
@@ -135,7 +137,7 @@ function addTransistor(
       saturation: values.saturation / reverse,
       slope: values.slope,
       ohms: 0,
-      transfer: { terminal: emitter, base: side, alpha: reverse },
+      transfer: { terminal: foot, base: side, alpha: reverse },
     }),
   };
 }
