@@ -114,7 +114,7 @@ export function prepare(network: Network): Circuit {
     collector: Int32Array.from(network.diodes, ({ transfer }) => (transfer ? index(transfer.terminal) : -1)),
     baseEnd: Int32Array.from(network.diodes, ({ a, b, transfer }) => index(transfer?.base === 'b' ? b : a)),
     laws: network.loads.map((load) => ({
-      power: 'watts' in load,
+      kind: 'watts' in load ? 'power' : 'current',
       size: 'watts' in load ? load.watts : load.amps,
       knee: load.knee,
     })),

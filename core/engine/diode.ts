@@ -18,6 +18,9 @@ export function diodeLines(count: number): DiodeLines {
   return { i: new Float64Array(count), u: new Float64Array(count), g: new Float64Array(count) };
 }
 
+/** Currents below this are no more than what leaks at every node and what rounding makes: they prove nothing, A. */
+const leastAmps = 1e-12;
+
 /** Voltage of sharpest curvature of the exponential, V: `slope * ln(slope / (saturation * sqrt 2))`. */
 export function criticalVoltage(saturation: number, slope: number): number {
   return Math.max(slope * Math.log(slope / (saturation * Math.SQRT2)), slope);
@@ -52,13 +55,13 @@ export function moveLine(
     lines.i[at] = current;
     lines.u[at] = u;
     lines.g[at] = 1 / (slope / (current + saturation) + ohms);
-    return Math.abs(v - u);
+    return (Math.abs(v - u) * (current + saturation)) / (current + saturation + leastAmps);
   }
   const critical = criticalVoltage(saturation, slope);
   const capped = v > critical;
   lineAtVoltage(lines, at, capped ? critical : v, saturation, slope, ohms);
   // On this branch the line always passes through v, so the error is judged by the current instead.
-  const change = (slope * Math.abs(lines.i[at]! - current)) / (Math.abs(current) + saturation);
+  const change = (slope * Math.abs(lines.i[at]! - current)) / (Math.abs(current) + saturation + leastAmps);
   return capped ? Math.max(change, v - critical) : change;
 }
 

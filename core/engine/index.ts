@@ -18,11 +18,11 @@ export {
   type Terminal,
 } from './network';
 export type { Parameter } from './parameter';
+export type { Port, PortDerivatives } from './port-derivatives';
 export { type RunDownOptions, runDown } from './run-down';
 export {
   type Counts,
   defaultOptions,
-  type PortDerivatives,
   type Solved,
   type SolveOptions,
   solve,

@@ -153,7 +153,7 @@ function lastBits(circuit: Circuit, capacitors: readonly ElementFigures[]): numb
     const { min, max } = capacitors[k]!.voltage;
     energy += circuit.farads[k]! * Math.max(min * min, max * max);
   }
-  return (1e-12 * energy) / circuit.period;
+  return (1e-11 * energy) / circuit.period;
 }
 
 /** First stages of a step lie off the curve by more than the step's end does: they count only in averages. */

@@ -4,12 +4,14 @@
  * coarse for the solution found.
  */
 import { type Circuit, prepare } from './circuit';
-import { isOnCurve, type Measures, measure } from './measure';
+import { coarseSolution, leadIn } from './coarse-start';
+import { standIn } from './load';
+import { type Measures, measure } from './measure';
 import { coarseMesh, fineMesh, type MeshSettings, meshError } from './mesh';
-import { type Network, networkFault, type Terminal } from './network';
+import { type Network, networkFault } from './network';
 import type { Parameter } from './parameter';
-import { closePeriod, linearPass, solvePeriodic } from './periodic';
-import { derivatives } from './stage';
+import { solvePeriodic } from './periodic';
+import { differentiate, type Port, type PortDerivatives } from './port-derivatives';
 import type { Trajectory } from './trajectory';
 
 export interface SolveOptions {
@@ -18,20 +20,12 @@ export interface SolveOptions {
   /** Largest error of a diode's straight line in the result, V. */
   readonly lineError: number;
   /** Nodes between which the output is taken, for `derivatives`. */
-  readonly port?: { readonly a: Terminal; readonly b: Terminal };
+  readonly port?: Port;
   /** What the average voltage at `port` is differentiated by. */
   readonly parameters: readonly Parameter[];
 }
 
 export const defaultOptions: SolveOptions = { tolerance: 5e-4, lineError: 1e-6, parameters: [] };
-
-/** Per unit of each parameter, in the order of `parameters`; NaN where they could not be had. */
-export interface PortDerivatives {
-  /** Of the average voltage at `port`, V. */
-  readonly average: readonly number[];
-  /** Of the peak-to-peak voltage at `port`, V. */
-  readonly ripple: readonly number[];
-}
 
 export interface Counts {
   readonly coarse: number;
@@ -44,6 +38,8 @@ export interface Solved extends Measures {
   readonly converged: true;
   readonly derivatives: PortDerivatives;
   readonly counts: Counts;
+  /** True when loads of constant power had to be taken as resistors of that average power. */
+  readonly powerAveraged: boolean;
   /** Capacitor states at the start of the period, V. */
   readonly start: Float64Array;
   readonly circuit: Circuit;
@@ -63,12 +59,26 @@ const mostRounds = 8;
 /** Steps in one segment of the first meshes; the last ones may take several times as many. */
 const mostSteps = 400;
 
-/** Never throws; work is bounded. A result whose energy balance is off by 0.1 % or more is `Unsolved`. */
+/**
+ * Never throws; work is bounded. A result whose energy balance is off by 0.1 % or more is `Unsolved`.
+ *
+ * A load of constant power whose voltage collapses and recovers within each period has no orderly solution; it is
+ * then taken as the resistor that draws its power at the average voltage, and the result says so.
+ */
 export function solve(network: Network, options: Partial<SolveOptions> = {}): Solved | Unsolved {
   const settings = { ...defaultOptions, ...options };
   const fault = networkFault(network);
   if (fault !== undefined) return { converged: false, reason: fault };
   const circuit = prepare(network);
+  const result = solveCircuit(circuit, settings, false);
+  if (result.converged || !circuit.laws.some((law) => law.kind === 'power')) return result;
+  const path = coarseMesh(circuit, 1);
+  const { volts } = leadIn(circuit, path, new Float64Array(circuit.capacitors.count));
+  const laws = circuit.laws.map((law, k) => (law.kind === 'power' ? standIn(law, volts[k]!) : law));
+  return solveCircuit({ ...circuit, laws }, settings, true);
+}
+
+function solveCircuit(circuit: Circuit, settings: SolveOptions, powerAveraged: boolean): Solved | Unsolved {
   const start = new Float64Array(circuit.capacitors.count);
   const coarse = coarseSolution(circuit, start);
   if (!coarse) return { converged: false, reason: 'the coarse period did not settle' };
@@ -99,8 +109,9 @@ export function solve(network: Network, options: Partial<SolveOptions> = {}): So
     return {
       converged: true,
       ...measures,
-      derivatives: differentiate(circuit, path, start, settings),
+      derivatives: differentiate(circuit, path, start, settings.parameters, settings.port),
       counts: { coarse: coarse.iterations, fine, meshes: round, stages: path.count },
+      powerAveraged,
       start,
       circuit,
       path,
@@ -127,20 +138,6 @@ function layMesh(
   return undefined;
 }
 
-function coarseSolution(
-  circuit: Circuit,
-  start: Float64Array,
-): { path: Trajectory; iterations: number } | undefined {
-  for (const steps of [1, 3, 8]) {
-    const path = coarseMesh(circuit, steps);
-    start.fill(0);
-    // A start need not be exact: a tenth of a millivolt is far below what the coarse steps are off by.
-    const result = solvePeriodic(circuit, path, start, 1e-4, 100);
-    if (result.converged) return { path, iterations: result.iterations };
-  }
-  return undefined;
-}
-
 /** Voltage by which each capacitor moves within the period, with a floor that no error needs to undercut. */
 function swings(circuit: Circuit, path: Trajectory): Float64Array {
   const count = circuit.capacitors.count;
@@ -158,61 +155,4 @@ function swings(circuit: Circuit, path: Trajectory): Float64Array {
   }
   const floor = Math.max(1e-3, 2e-4 * Math.max(...swing));
   return swing.map((value) => Math.max(value, floor));
-}
-
-function differentiate(
-  circuit: Circuit,
-  path: Trajectory,
-  start: Float64Array,
-  options: SolveOptions,
-): PortDerivatives {
-  const { parameters, port } = options;
-  const none = { average: parameters.map(() => Number.NaN), ripple: parameters.map(() => Number.NaN) };
-  if (parameters.length === 0 || !port) return none;
-  const d = derivatives(circuit, path.count, parameters);
-  if (!linearPass(circuit, path, start, d)) return none;
-  const change = closePeriod(circuit, path, start, d);
-  if (!change) return none;
-  const { nodes } = circuit;
-  const count = circuit.capacitors.count;
-  const place = (terminal: Terminal) => (terminal < 0 ? -1 : circuit.place[terminal]!);
-  const a = place(port.a);
-  const b = place(port.b);
-  const at = (column: number, s: number) => {
-    const offset = (s * d.columns + column) * nodes;
-    return (a < 0 ? 0 : d.volts[offset + a]!) - (b < 0 ? 0 : d.volts[offset + b]!);
-  };
-  const { highest, lowest } = extremes(circuit, path, port);
-  const rows = Array.from({ length: d.columns }, (_, column) => {
-    let sum = 0;
-    for (let s = 0; s < path.count; s++) sum += path.weight[s]! * at(column, s);
-    return { average: sum / circuit.period, ripple: at(column, highest) - at(column, lowest) };
-  });
-  const width = 1 + parameters.length;
-  const total = (p: number, key: 'average' | 'ripple') => {
-    let sum = rows[count + p]![key];
-    for (let k = 0; k < count; k++) sum += rows[k]![key] * change[k * width + 1 + p]!;
-    return sum;
-  };
-  return {
-    average: parameters.map((_, p) => total(p, 'average')),
-    ripple: parameters.map((_, p) => total(p, 'ripple')),
-  };
-}
-
-/** Stages at which the voltage at the port is highest and lowest. */
-function extremes(circuit: Circuit, path: Trajectory, port: { a: Terminal; b: Terminal }) {
-  const width = circuit.nodes + circuit.knowns;
-  const index = (t: Terminal) => (t >= 0 ? circuit.place[t]! : circuit.nodes + ~t);
-  const a = index(port.a);
-  const b = index(port.b);
-  const volts = (s: number) => path.volts[s * width + a]! - path.volts[s * width + b]!;
-  let highest = 0;
-  let lowest = 0;
-  for (let s = 0; s < path.count; s++) {
-    if (!isOnCurve(path, s)) continue;
-    if (volts(s) > volts(highest)) highest = s;
-    if (volts(s) < volts(lowest)) lowest = s;
-  }
-  return { highest, lowest };
 }

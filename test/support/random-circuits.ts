@@ -16,6 +16,45 @@ export function randomNumbers(seed: number): () => number {
   };
 }
 
+/** The same behind a push-pull stage (with separate or joined bases) or a follower, its clock on a level of its own. */
+export function randomDriven(random: () => number): PumpValues {
+  const values = randomPump(random);
+  const within = (low: number, high: number) => low * (high / low) ** random();
+  const transistor = () => ({
+    saturation: within(1e-15, 1e-13),
+    slope: 0.0258,
+    gain: within(30, 400),
+    reverseGain: within(1, 20),
+    baseOhms: within(1, 30),
+    collectorOhms: within(0.3, 5),
+    emitterOhms: within(0.02, 0.5),
+  });
+  const kind = random();
+  const npn = transistor();
+  const pnp = transistor();
+  const base = within(300, 100e3);
+  const highDrop = random() < 0.4 ? Math.min(1.4, 0.4 * values.rails[0]!.volts) : 0;
+  return {
+    ...values,
+    drives: values.drives.map(({ clock, opposite }) => ({
+      clock: { ...clock, highDrop },
+      opposite,
+      driver: {
+        kind: kind < 0.8 ? 'push-pull' : 'follower',
+        rail: 0,
+        npn,
+        pnp,
+        base:
+          kind < 0.6
+            ? { npn: base, pnp: base * (0.5 + random()) }
+            : kind < 0.8
+              ? { shared: base }
+              : { npn: 0, pnp: 0 },
+      },
+    })),
+  };
+}
+
 /**
  * 10 Hz to 1 MHz, 1 nF to 1 mF, no load to near short and currents up to what cannot be carried,
  * saturation currents 1e-14 to 1e-5 A, drives of 5 to 500 ohm, 1 to 6 stages.
@@ -59,8 +98,10 @@ export function randomPump(random: () => number): PumpValues {
     loads:
       kind < 0.4
         ? [{ name: 'resistor', kind: 'resistance', ohms: within(1, 1e9) }]
-        : kind < 0.9
+        : kind < 0.75
           ? [{ name: 'current', kind: 'current', amps: within(1e-7, 1) }]
-          : [],
+          : kind < 0.92
+            ? [{ name: 'power', kind: 'power', watts: within(1e-6, 1), knee: 0.5 + random() }]
+            : [],
   };
 }

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { solve } from '../../../core/engine';
 import { idealVoltage } from '../../../core/pump/values';
 import { networkOf } from '../../support/circuits';
-import { randomNumbers, randomPump } from '../../support/random-circuits';
+import { randomDriven, randomNumbers, randomPump } from '../../support/random-circuits';
 
 // References: Kirchhoff's laws and conservation of energy; no pump of diodes exceeds its ideal voltage.
 describe('random pumps', () => {
@@ -50,5 +50,25 @@ describe('random pumps', () => {
     }
     // An unsolved circuit would be reported as such, but none of these has a reason to be.
     expect(unsolved).toBe(0);
+  });
+});
+
+describe('random pumps behind stages of two transistors', () => {
+  it('end in a steady state with its energy in balance, or in a reason', () => {
+    const random = randomNumbers(20_261_202);
+    let unsolved = 0;
+    for (let n = 0; n < 100; n++) {
+      const values = randomDriven(random);
+      const { network, output } = networkOf(values);
+      const solved = solve(network);
+      if (!solved.converged) {
+        expect(solved.reason.length).toBeGreaterThan(10);
+        unsolved++;
+        continue;
+      }
+      expect(solved.balance, JSON.stringify(values)).toBeLessThan(1e-3);
+      expect(Number.isFinite(solved.nodes[output]!.average), JSON.stringify(values)).toBe(true);
+    }
+    expect(unsolved).toBeLessThanOrEqual(1);
   });
 });
