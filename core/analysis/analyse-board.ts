@@ -42,7 +42,7 @@ export function computeBoard(text: string, file: string, reading: BoardReading):
     drivers: driverResults(board, solved),
     supplies: supplyResults(board, currents),
     balance: balances.length > 0 ? Math.max(...balances) : null,
-    problems: [...gapFindings(solved), ...assumedDraws(board)],
+    problems: [...gapFindings(solved), ...assumedDraws(board), ...averagedPowers(board, solved)],
   };
 }
 
@@ -54,6 +54,23 @@ function gapFindings(solved: RailVoltages): Finding[] {
     if (seen.has(key)) return [];
     seen.add(key);
     return [voltage.finding];
+  });
+}
+
+/** A load of constant power whose voltage collapses within each period counts as a resistor, and the report says so. */
+function averagedPowers(board: Board, solved: RailVoltages): Finding[] {
+  return [...solved.pumps].flatMap(([name, pump]): Finding[] => {
+    const rail = board.rails.get(name);
+    if (!rail || !pump.points.some((point) => point.powerAveraged)) return [];
+    return [
+      {
+        code: 'assumed',
+        severity: 'information',
+        at: `${rail.path}.loads`,
+        span: rail.nameSpan,
+        message: `${name}: its voltage falls so far within each period that a load of constant power would stop and start; it is taken as the resistor that draws the same power on average. A larger reservoir keeps it running.`,
+      },
+    ];
   });
 }
 

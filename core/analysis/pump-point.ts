@@ -98,6 +98,7 @@ function describe(
     outputResistance: resistance,
     drops: pumpDrops(values, network, solved, drivers, loadCurrent),
     balance: solved.balance,
+    powerAveraged: solved.powerAveraged,
     drives: network.drives.map((drive) => driveFigures(solved, drive)),
     drivers,
     railCurrents: new Map(

@@ -6,10 +6,12 @@ import type { Band } from '../quantity/figure';
 import type { WeightedMode } from './board-modes';
 import { overModes } from './chips';
 import type { Currents } from './currents';
+import { pumpLoadLine, pumpWaveform } from './curves';
 import { isGap } from './gap';
+import type { ModeModel } from './pump-result';
 import type { RailVoltages } from './rail-voltages';
 import { pumpTransients } from './transients';
-import type { PumpResult, RailResult, Transients } from './types';
+import type { PumpResult, RailResult } from './types';
 
 export function railResults(
   board: Board,
@@ -64,14 +66,24 @@ function railResult(
         },
       ]),
     ),
-    ...(pump ? { pump, transients: once(() => heaviestTransients(rail, pump, solved)) } : {}),
+    ...(pump ? { pump, ...onDemand(pump, solved.models.get(rail.name) ?? []) } : {}),
     ...(found && isGap(found) ? { because: found.because } : {}),
   };
 }
 
-function heaviestTransients(rail: Rail, pump: PumpResult, solved: RailVoltages): Transients | undefined {
-  const model = solved.models.get(rail.name)?.find(({ mode }) => mode === pump.heaviest.mode);
-  return model && pumpTransients(model);
+/** What costs more than the steady state, in the heaviest mode, computed at the first call. */
+function onDemand(
+  pump: PumpResult,
+  models: readonly ModeModel[],
+): Pick<RailResult, 'transients' | 'waveform' | 'loadLine'> {
+  const model = models.find(({ mode }) => mode === pump.heaviest.mode);
+  if (!model) return {};
+  return {
+    transients: once(() => pumpTransients(model)),
+    waveform: once(() => pumpWaveform(model)),
+    loadLine: (most = 2 * pump.heaviest.askedCurrent || 1e-3, points = 17) =>
+      pumpLoadLine(model, most, points),
+  };
 }
 
 /** The value of the first call for all further ones. */

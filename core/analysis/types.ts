@@ -8,6 +8,7 @@ import type { Chip, Clock, Driver, Rail, Supply } from '../model/board';
 import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 import type { ClockSource } from './clock-source';
+import type { LoadPoint, Waveform } from './curves';
 
 /** One quantity of a corner and the end of its band at which it was taken. */
 export interface CornerSetting {
@@ -99,6 +100,8 @@ export interface PumpPoint {
   readonly outputResistance: number;
   readonly drops: readonly Drop[];
   readonly balance: number;
+  /** True when a load of constant power had to be taken as the resistor of the same average power. */
+  readonly powerAveraged: boolean;
   readonly drives: readonly DriveFigures[];
   /** In the order of `drives`; null for a drive without a driver of transistors. */
   readonly drivers: readonly (DriverFigures | null)[];
@@ -168,6 +171,9 @@ export interface RailResult {
   readonly pump?: PumpResult;
   /** Of a pump: computed at the first call. */
   readonly transients?: () => Transients | undefined;
+  readonly waveform?: () => Waveform | undefined;
+  /** From no load to twice the heaviest one, or to `most` ampere. */
+  readonly loadLine?: (most?: number, points?: number) => readonly LoadPoint[];
   /** One sentence when something is null. */
   readonly because?: string;
 }
