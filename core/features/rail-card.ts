@@ -7,7 +7,7 @@ import type { BoardAnalysis, RailResult } from '../analysis/types';
 import { missOf } from '../analysis/window';
 import { inMode, volts } from '../analysis/words';
 import type { Band } from '../quantity/figure';
-import { formatBand, formatPercent, formatQuantity } from '../quantity/write';
+import { formatBand, formatDuration, formatPercent, formatQuantity } from '../quantity/write';
 import type { Span } from '../text/span';
 import type { Card } from './card';
 import { voltsPicture } from './picture/volts';
@@ -139,7 +139,24 @@ function details(result: RailResult): readonly string[] {
   return [
     `Output resistance ${formatQuantity(pump.heaviest.outputResistance, 'ohm')}${limits}${share}.`,
     ...(byMode.length > 1 ? [`By mode: ${byMode.join(', ')}.`] : []),
+    ...switching(result),
   ];
+}
+
+/** Coming up and running down, from empty capacitors and with everything off. */
+function switching({ transients }: RailResult): readonly string[] {
+  const course = transients?.();
+  if (!course) return [];
+  const peak = course.inrush && Math.max(...course.inrush);
+  const up =
+    course.startTime === null
+      ? 'Its switch-on could not be followed'
+      : `Comes up to 90 % in ${formatDuration(course.startTime)}, with up to ${formatQuantity(peak ?? 0, 'A')} at its drive`;
+  const down =
+    course.dischargeTime === null
+      ? `nothing brings it below ${formatQuantity(course.dischargeLevel, 'V')} after switch-off`
+      : `falls to ${formatQuantity(course.dischargeLevel, 'V')} in ${formatDuration(course.dischargeTime)} after switch-off`;
+  return [`${up}; ${down}.`];
 }
 
 function three(band: Band): readonly string[] {
