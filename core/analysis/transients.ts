@@ -22,7 +22,8 @@ export function pumpTransients({ mode, model }: ModeModel): Transients | undefin
   const solved = solve(network);
   if (!solved.converged) return undefined;
   const final = solved.nodes[output]!.average;
-  const start = startUp(network, { output, final, states: solved.start, reach: arrived });
+  const trace = placed.drives.flatMap(({ high, low }) => [high, low]);
+  const start = startUp(network, { output, final, states: solved.start, reach: arrived, trace });
   const level = Math.abs(final) > touchable ? touchable : quiet;
   const low = placed.phases.indexOf('low');
   const time = runDown(network, { output, states: solved.start, level, segment: low });
@@ -34,6 +35,27 @@ export function pumpTransients({ mode, model }: ModeModel): Transients | undefin
       ? placed.drives.map((drive) =>
           Math.max(start.resistorPeaks[drive.high]!, start.resistorPeaks[drive.low]!),
         )
+      : null,
+    transistorPeaks: start
+      ? placed.drives.map(({ driver }) =>
+          driver
+            ? {
+                npn: start.resistorPeaks[driver.npn.collector]!,
+                pnp: start.resistorPeaks[driver.pnp.collector]!,
+              }
+            : null,
+        )
+      : null,
+    startTrace: start
+      ? {
+          time: start.trace.time,
+          output: start.trace.output,
+          drives: placed.drives.map((_, k) =>
+            start.trace.time.map(
+              (__, n) => start.trace.currents[2 * k]![n]! - start.trace.currents[2 * k + 1]![n]!,
+            ),
+          ),
+        }
       : null,
     diodePeaks: start ? placed.diodes.map((k) => start.diodePeaks[k]!) : null,
     railCharge: new Map(

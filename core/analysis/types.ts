@@ -148,6 +148,10 @@ export interface Transients {
   /** Largest current of each drive's clock output, A. */
   readonly inrush: readonly number[] | null;
   readonly diodePeaks: readonly number[] | null;
+  /** Largest collector currents of each drive's stage of transistors, A; null for a drive without one. */
+  readonly transistorPeaks: readonly ({ readonly npn: number; readonly pnp: number } | null)[] | null;
+  /** Output and drive currents on the way up, at the solver's own points of the periods that it integrated. */
+  readonly startTrace: Waveform | null;
   /** Taken from each rail until `startTime`, C and J. */
   readonly railCharge: ReadonlyMap<string, number>;
   readonly railEnergy: ReadonlyMap<string, number>;

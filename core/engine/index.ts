@@ -28,4 +28,4 @@ export {
   solve,
   type Unsolved,
 } from './solve';
-export { type StartUp, type StartUpOptions, startUp } from './start-up';
+export { type StartUp, type StartUpOptions, startUp, type Trace } from './start-up';

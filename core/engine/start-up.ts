@@ -22,6 +22,7 @@ export interface StartUp {
   readonly diodePeaks: readonly number[];
   /** The output on its way: end of each integrated period, s, and its average over that period, V. */
   readonly course: readonly { readonly time: number; readonly volts: number }[];
+  readonly trace: Trace;
   /** Periods that were integrated, of the `periods` that passed. */
   readonly integrated: number;
   readonly periods: number;
@@ -34,6 +35,18 @@ export interface StartUpOptions {
   readonly states: Float64Array;
   /** Share of `final` that ends the run, 0..1. */
   readonly reach: number;
+  /** Resistors whose current is traced at every point of every integrated period; none when left out. */
+  readonly trace?: readonly number[];
+}
+
+/** Points of the integrated periods: between them the run leaps, so the list has gaps in time. */
+export interface Trace {
+  /** s, from switch-on. */
+  readonly time: readonly number[];
+  /** V. */
+  readonly output: readonly number[];
+  /** A, one list for each traced resistor. */
+  readonly currents: readonly (readonly number[])[];
 }
 
 /** Integrated periods after which a start that has not ended is given up. */
@@ -49,7 +62,7 @@ export function startUp(network: Network, options: StartUpOptions): StartUp | un
   const count = circuit.capacitors.count;
   const swing = options.states.map((v) => Math.max(Math.abs(v), 0.02 * Math.abs(options.final), 1e-3));
   const settings: MeshSettings = { tolerance: 1e-3, lineError: 1e-5, mostSteps: 2000 };
-  const tally = newTally(circuit);
+  const tally = newTally(circuit, options.trace ?? []);
   const state = new Float64Array(count);
   let seed = coarseMesh(circuit, 1);
   let periods = 0;
@@ -59,6 +72,7 @@ export function startUp(network: Network, options: StartUpOptions): StartUp | un
     if (!path) return undefined;
     seed = path;
     const power = record(circuit, path, tally);
+    traceInto(tally, circuit, path, options, periods * circuit.period);
     periods++;
     const now = { time: periods * circuit.period, volts: averageAt(circuit, path, options.output) };
     tally.course.push(now);
@@ -81,9 +95,10 @@ interface Tally {
   readonly resistors: Float64Array;
   readonly diodes: Float64Array;
   readonly course: { time: number; volts: number }[];
+  readonly trace: { time: number[]; output: number[]; currents: number[][] };
 }
 
-function newTally(circuit: Circuit): Tally {
+function newTally(circuit: Circuit, traced: readonly number[]): Tally {
   return {
     potentials: new Float64Array(circuit.knowns),
     energy: new Float64Array(circuit.knowns),
@@ -91,6 +106,7 @@ function newTally(circuit: Circuit): Tally {
     resistors: new Float64Array(circuit.resistors.count),
     diodes: new Float64Array(circuit.diodes.count),
     course: [],
+    trace: { time: [], output: [], currents: traced.map(() => []) },
   };
 }
 
@@ -129,6 +145,25 @@ function spend(tally: Tally, current: Float64Array, seconds: number): void {
   for (let k = 0; k < current.length; k++) {
     tally.charge[k] = tally.charge[k]! + current[k]! * seconds;
     tally.energy[k] = tally.energy[k]! + current[k]! * seconds * tally.potentials[k]!;
+  }
+}
+
+function traceInto(
+  { trace }: Tally,
+  circuit: Circuit,
+  path: Trajectory,
+  { output, trace: traced }: StartUpOptions,
+  before: number,
+): void {
+  if (!traced) return;
+  const index = output >= 0 ? circuit.place[output]! : circuit.nodes + ~output;
+  for (let s = 0; s < path.count; s++) {
+    if (!isOnCurve(path, s)) continue;
+    trace.time.push(before + path.time[s]!);
+    trace.output.push(path.volts[s * (circuit.nodes + circuit.knowns) + index]!);
+    traced.forEach((k, n) => {
+      trace.currents[n]!.push(resistorCurrent(circuit, path, k, s));
+    });
   }
 }
 
@@ -198,6 +233,7 @@ function finish(
     resistorPeaks: [...tally.resistors],
     diodePeaks: [...tally.diodes],
     course: tally.course,
+    trace: tally.trace,
     integrated,
     periods,
   };

@@ -120,4 +120,42 @@ describe('pumps of the language', () => {
     expect(line[2]!.voltage).toBeCloseTo(up.pump!.heaviest.voltage, 3);
     for (let k = 1; k < line.length; k++) expect(line[k]!.voltage).toBeLessThan(line[k - 1]!.voltage!);
   });
+
+  it('follows the way up with the currents of the drive and of its transistors', () => {
+    const { analysis } = rails(
+      '  up:\n    pump: { topology: doubler, input: v5, drive: amp, diode: schottky-signal, flying: { value: 1 uF, kind: film }, reservoir: { value: 10 uF, kind: film } }\n    loads: { x: 1 mA }\n',
+      'drivers:\n  amp: { input: a, rail: v5, push-pull: { npn: npn-small-signal, pnp: pnp-small-signal, base: { npn: 1 kohm, pnp: 1 kohm } } }\n',
+    );
+    const course = analysis.rails.get('up')!.transients!()!;
+    const { time, output, drives } = course.startTrace!;
+    expect(output).toHaveLength(time.length);
+    expect(drives[0]).toHaveLength(time.length);
+    for (let k = 1; k < time.length; k++) expect(time[k]).toBeGreaterThanOrEqual(time[k - 1]!);
+    expect(output.at(-1)).toBeGreaterThan(0.8 * analysis.rails.get('up')!.pump!.heaviest.voltage);
+    // A transistor carries at most its base current times its gain: 4.3 mA times 200 (and a little overdrive).
+    const { npn, pnp } = course.transistorPeaks![0]!;
+    expect(Math.max(npn, pnp)).toBeGreaterThan(0.02);
+    expect(Math.max(npn, pnp)).toBeLessThan(0.9);
+    expect(course.diodePeaks).toHaveLength(2);
+    expect(course.railEnergy.get('v5')).toBeGreaterThan(0);
+  });
+
+  it('takes a value for each stage and a diode for each position', () => {
+    const { report } = rails(
+      '  up:\n    pump: { topology: ladder, stages: 2, input: v5, drive: a, diode: [sharp, sharp, schottky-signal, silicon-switching], flying: [1 uF, 220 nF], smoothing: [1 uF, 470 nF], reservoir: 10 uF, series: 22 ohm }\n    loads: { x: 0.2 mA }\n',
+    );
+    expect(report.findings.filter((f) => f.severity === 'error')).toEqual([]);
+    expect(Object.keys(report.parts)).toEqual([
+      'up.flying[0]',
+      'up.flying[1]',
+      'up.smoothing[0]',
+      'up.smoothing[1]',
+      'up.reservoir',
+      'up.diode[0]',
+      'up.diode[1]',
+      'up.diode[2]',
+      'up.diode[3]',
+    ]);
+    expect(report.rails['up']!.drops!.some((drop) => drop.in === 'series resistor')).toBe(true);
+  });
 });
