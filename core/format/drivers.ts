@@ -39,7 +39,7 @@ export const mosfetPairShape = shape('a MOS stage', 'A complementary pair of MOS
   gate: row(quantity('ohm', notNegative), 'Resistor at the gates.', '22 ohm', { computed: false }),
 });
 
-export const gatesShape = shape('a gate stage', 'Logic gates in parallel.', {
+export const gatesShape = shape('a gate stage', 'Logic gates in parallel; they are taken as inverters.', {
   part: row([part('gates'), map(gatePartShape)], 'Key of the catalogue or of `parts`.', 'ac', needed),
   parallel: row(
     quantity('1', { above: 0, whole: true }),

@@ -68,7 +68,7 @@ export const chipShape = shape('a chip', 'An IC with pins.', {
 
 export const registersShape = shape(
   'the registers of a timer',
-  'Registers of a timer, from which the real frequency follows.',
+  'Registers of a timer that counts from 0 to top and starts again: input / (prescaler (top + 1)).',
   {
     input: row(quantity('Hz', positive), 'Clock of the timer.', '16 MHz', needed),
     prescaler: row(quantity('1', { least: 1, whole: true }), 'Divider before the counter.', '8'),
@@ -78,7 +78,11 @@ export const registersShape = shape(
       '159',
       needed,
     ),
-    compare: row(quantity('1', { least: 0, whole: true }), 'Count at which the output changes.', '80'),
+    compare: row(
+      quantity('1', { least: 0, whole: true }),
+      'Counts for which the output is high; half of them if left out.',
+      '80',
+    ),
   },
 );
 
