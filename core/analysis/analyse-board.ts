@@ -5,6 +5,7 @@ import type { Catalogue } from '../catalog/part';
 import type { Finding } from '../checks/finding';
 import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
+import { formatQuantity } from '../quantity/write';
 import { weightedModes } from './board-modes';
 import { chipResults, groupResults, overModes } from './chips';
 import { clockSource } from './clock-source';
@@ -14,7 +15,7 @@ import { isGap } from './gap';
 import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
-import { supplyVoltage } from './supply-voltage';
+import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
 
 /** `file` is only a name for reports; `text` has no byte-order mark. */
@@ -42,7 +43,12 @@ export function computeBoard(text: string, file: string, reading: BoardReading):
     drivers: driverResults(board, solved),
     supplies: supplyResults(board, currents),
     balance: balances.length > 0 ? Math.max(...balances) : null,
-    problems: [...gapFindings(solved), ...assumedDraws(board), ...averagedPowers(board, solved)],
+    problems: [
+      ...gapFindings(solved),
+      ...assumedDraws(board),
+      ...assumedResistances(board),
+      ...averagedPowers(board, solved),
+    ],
   };
 }
 
@@ -54,6 +60,28 @@ function gapFindings(solved: RailVoltages): Finding[] {
     if (seen.has(key)) return [];
     seen.add(key);
     return [voltage.finding];
+  });
+}
+
+/** A port or battery gives way by its catalogue resistance where the file has none, and the report says so. */
+function assumedResistances(board: Board): Finding[] {
+  return [...board.supplies.values()].flatMap((supply): Finding[] => {
+    const entry = supply.battery?.data ?? supply.standard?.data;
+    const ohms = supply.resistance ? null : supplyResistance(supply);
+    if (!entry?.resistance || !ohms) return [];
+    const { origin } = entry.resistance;
+    const shown = formatQuantity(ohms.typical, 'ohm');
+    return [
+      {
+        code: 'assumed',
+        severity: 'information',
+        at: supply.path,
+        span: supply.nameSpan,
+        message: `${supply.name}: its resistance is not given; ${shown} is taken from the catalogue (${origin.note ?? origin.kind}). Write resistance to settle it.`,
+        actual: shown,
+        source: origin.kind,
+      },
+    ];
   });
 }
 
@@ -79,7 +107,7 @@ function assumedDraws(board: Board): Finding[] {
   return [...board.chips.values()].flatMap((chip): Finding[] => {
     const draws = chip.part?.data?.draws;
     if (chip.draws.length > 0 || !draws) return [];
-    const milliampere = Number((1000 * draws.typical).toPrecision(3));
+    const shown = formatQuantity(draws.typical, 'A');
     return [
       {
         code: 'assumed',
@@ -87,9 +115,9 @@ function assumedDraws(board: Board): Finding[] {
         at: chip.path,
         span: chip.nameSpan,
         message:
-          `${chip.name}: its own current is not given; ${milliampere} mA is taken from the catalogue ` +
+          `${chip.name}: its own current is not given; ${shown} is taken from the catalogue ` +
           `(${draws.origin.note ?? draws.origin.kind}). Write draws to settle it.`,
-        actual: `${milliampere} mA`,
+        actual: shown,
         source: draws.origin.kind,
       },
     ];

@@ -159,3 +159,17 @@ describe('pumps of the language', () => {
     expect(report.rails['up']!.drops!.some((drop) => drop.in === 'series resistor')).toBe(true);
   });
 });
+
+it('says which resistance of a supply it took from the catalogue', () => {
+  const check = (resistance: string) =>
+    analyse(
+      `supplies: { cell: { battery: li-ion${resistance} } }\nrails: { vb: { supply: cell, loads: { x: 10 mA } } }\n`,
+      {
+        file: 'rails.yaml',
+      },
+    ).findings.filter((finding) => finding.code === 'assumed');
+  expect(check('').map((finding) => finding.message)).toEqual([
+    expect.stringContaining('resistance is not given'),
+  ]);
+  expect(check(', resistance: 80 mohm')).toEqual([]);
+});
