@@ -15,6 +15,7 @@ import { isGap } from './gap';
 import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
+import { regulatorResults } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
 
@@ -41,6 +42,7 @@ export function computeBoard(text: string, file: string, reading: BoardReading):
     chips: chipResults(board, solved, pins, currents, modes),
     clocks: clockResults(board, solved),
     drivers: driverResults(board, solved),
+    regulators: regulatorResults(board, solved, currents),
     supplies: supplyResults(board, currents),
     balance: balances.length > 0 ? Math.max(...balances) : null,
     problems: [

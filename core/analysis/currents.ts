@@ -7,6 +7,7 @@ import { activeIn } from './board-modes';
 import { clockSource } from './clock-source';
 import { isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
+import { regulatorInput } from './regulators';
 
 export interface Currents {
   /** Into the rail's own loads and bleeder, A; null when the rail has no voltage to tell. */
@@ -90,7 +91,13 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
       const { origin } = other;
       if (origin?.kind === 'regulator' && origin.regulator.from?.name === name) {
         const out = rail(other.name, mode);
-        list.push(out === null ? null : out + (origin.regulator.ground?.typical ?? 0));
+        const input = typicalOf(solved, name);
+        const output = typicalOf(solved, other.name);
+        list.push(
+          out === null || input === undefined || output === undefined
+            ? null
+            : (regulatorInput(origin.regulator, output, input, out) ?? null),
+        );
       }
       if (origin?.kind === 'filter' && origin.filter.from?.name === name) list.push(rail(other.name, mode));
       if (origin?.kind === 'pump' && usesRail(solved, other, origin.pump.input?.name, name))
@@ -115,6 +122,11 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
   };
 
   return { loads, rail, chip };
+}
+
+function typicalOf(solved: RailVoltages, name: string): number | undefined {
+  const voltage = solved.voltages.get(name);
+  return voltage && !isGap(voltage) ? voltage.typical : undefined;
 }
 
 /** True when a pump stands on the rail or is driven from it. */

@@ -2,7 +2,7 @@
  * Voltages of all rails, each computed once, a pump after the rails that it stands on and is driven from. What rails
  * give way under load is found by repeating the board with the currents of the round before.
  */
-import type { Board, Rail } from '../model/board';
+import type { Board, Rail, Regulator } from '../model/board';
 import { type Band, exactly } from '../quantity/figure';
 import { weightedModes } from './board-modes';
 import { boardCurrents } from './currents';
@@ -11,6 +11,7 @@ import type { DriveChain } from './drive-chain';
 import { type Gap, isGap } from './gap';
 import type { ModeModel } from './pump-result';
 import { type RailVoltage, type Surroundings, setUpPump, solveRailPump } from './pump-solution';
+import { regulatedVoltage } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { PumpResult } from './types';
 
@@ -76,6 +77,12 @@ export function railSolver(
       return { name, band: sagged(supply.band, supply.ohms, others, others), ohms: supply.ohms };
     },
   });
+  const regulated = (rail: Rail, regulator: Regulator): Band | Gap => {
+    if (!regulator.output) return { because: `the regulator of ${rail.name} has no output voltage` };
+    const input = regulator.from && voltage(regulator.from.name);
+    // Without a known input it is taken at its word; the input says why it is not known.
+    return (input && !isGap(input) && regulatedVoltage(regulator, input)) || regulator.output;
+  };
   const compute = (rail: Rail): Band | Gap => {
     const { origin } = rail;
     if (!origin) return { because: `${rail.name} has no origin` };
@@ -88,7 +95,7 @@ export function railSolver(
         return sagged(supply.band, supply.ohms, Math.min(...draws), Math.max(...draws));
       }
       case 'regulator':
-        return origin.regulator.output ?? { because: `the regulator of ${rail.name} has no output voltage` };
+        return regulated(rail, origin.regulator);
       case 'filter':
         return { because: 'a filter is not computed yet' };
       case 'pump': {

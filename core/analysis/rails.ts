@@ -10,6 +10,7 @@ import { pumpLoadLine, pumpWaveform } from './curves';
 import { isGap } from './gap';
 import type { ModeModel } from './pump-result';
 import type { RailVoltages } from './rail-voltages';
+import { regulatorInput } from './regulators';
 import { pumpTransients } from './transients';
 import type { PumpResult, RailResult } from './types';
 
@@ -46,15 +47,20 @@ function railResult(
     : voltage && current
       ? Math.abs(voltage.typical) * current.typical
       : null;
+  const regulatorIn = regulatorCurrent(rail, solved, currents, modes);
   const stated = modes.filter((mode) => mode.name !== undefined);
   return {
     rail,
     voltage,
     ripple: pump ? rippleBand(pump) : null,
     current: current?.typical ?? null,
-    inputCurrent: pump ? average((mode) => at(mode)?.inputCurrent) : inputCurrent(rail, currents, modes),
+    inputCurrent: pump ? average((mode) => at(mode)?.inputCurrent) : regulatorIn,
     power: powerOut,
-    efficiency: powerIn !== null && powerOut !== null && powerIn > 0 ? powerOut / powerIn : null,
+    efficiency: pump
+      ? powerIn !== null && powerOut !== null && powerIn > 0
+        ? powerOut / powerIn
+        : null
+      : regulatorEfficiency(rail, solved, regulatorIn, powerOut),
     headroom: voltage ? headroom(rail, voltage) : null,
     storedEnergy: pump ? storedEnergy(rail, pump) : null,
     modes: new Map(
@@ -95,11 +101,36 @@ function once<T>(compute: () => T): () => T {
   };
 }
 
-/** A linear regulator takes what it gives and its own ground current. */
-function inputCurrent(rail: Rail, currents: Currents, modes: readonly WeightedMode[]): number | null {
+function regulatorCurrent(
+  rail: Rail,
+  solved: RailVoltages,
+  currents: Currents,
+  modes: readonly WeightedMode[],
+): number | null {
   if (rail.origin?.kind !== 'regulator') return null;
-  const out = overModes(modes, (mode) => currents.rail(rail.name, mode));
-  return out && out.typical + (rail.origin.regulator.ground?.typical ?? 0);
+  const { regulator } = rail.origin;
+  const input = regulator.from && solved.voltages.get(regulator.from.name);
+  const output = solved.voltages.get(rail.name);
+  if (!input || isGap(input) || !output || isGap(output)) return null;
+  const taken = overModes(modes, (mode) => {
+    const out = currents.rail(rail.name, mode);
+    return out === null ? null : (regulatorInput(regulator, output.typical, input.typical, out) ?? null);
+  });
+  return taken?.typical ?? null;
+}
+
+/** Share of what a regulator takes in that reaches its rail. */
+function regulatorEfficiency(
+  rail: Rail,
+  solved: RailVoltages,
+  taken: number | null,
+  powerOut: number | null,
+): number | null {
+  const input = rail.origin?.kind === 'regulator' && rail.origin.regulator.from;
+  const voltage = input ? solved.voltages.get(input.name) : undefined;
+  if (!voltage || isGap(voltage) || taken === null || powerOut === null) return null;
+  const powerIn = voltage.typical * taken;
+  return powerIn > 0 ? powerOut / powerIn : null;
 }
 
 function rippleBand(pump: PumpResult): Band {

@@ -4,7 +4,7 @@
  */
 import type { ChipData, PinData } from '../catalog/part';
 import type { Finding } from '../checks/finding';
-import type { Chip, Clock, Driver, Rail, Supply } from '../model/board';
+import type { Chip, Clock, Driver, Rail, Regulator, Supply } from '../model/board';
 import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 import type { ClockSource } from './clock-source';
@@ -256,6 +256,20 @@ export interface DriverResult {
   readonly uses: readonly DriverUse[];
 }
 
+export interface RegulatorResult {
+  readonly rail: Rail;
+  readonly regulator: Regulator;
+  readonly input: Band;
+  readonly output: Band;
+  /** Largest over the modes, A, and that mode. */
+  readonly current: number;
+  readonly mode?: string;
+  /** With the highest input and the lowest output, W; null when its efficiency is not given. */
+  readonly heat: number | null;
+  /** At the hottest ambient, K; null without a thermal resistance. */
+  readonly junction: number | null;
+}
+
 export interface SupplyResult {
   readonly supply: Supply;
   readonly voltage: Band | null;
@@ -276,6 +290,8 @@ export interface BoardAnalysis {
   readonly chips: ReadonlyMap<string, ChipResult>;
   readonly clocks: ReadonlyMap<string, ClockResult>;
   readonly drivers: ReadonlyMap<string, DriverResult>;
+  /** By the rail that they make. */
+  readonly regulators: ReadonlyMap<string, RegulatorResult>;
   readonly supplies: ReadonlyMap<string, SupplyResult>;
   /** Worst of all pumps. */
   readonly balance: number | null;

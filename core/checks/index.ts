@@ -19,6 +19,9 @@ import { pinPeak } from './pin-peak';
 import { railHigh } from './rail-high';
 import { railLow } from './rail-low';
 import { railStalls } from './rail-stalls';
+import { regulatorDropout } from './regulator-dropout';
+import { regulatorHot } from './regulator-hot';
+import { regulatorOverLimit } from './regulator-over-limit';
 import { rippleHigh } from './ripple-high';
 import { startSlow } from './start-slow';
 import { supplyOverLimit } from './supply-over-limit';
@@ -40,6 +43,9 @@ export const checks: readonly Check[] = [
   railHigh,
   railLow,
   railStalls,
+  regulatorDropout,
+  regulatorHot,
+  regulatorOverLimit,
   rippleHigh,
   startSlow,
   supplyOverLimit,

@@ -79,9 +79,9 @@ export const pumpShape = shape('a pump', 'A charge pump: capacitors and diodes t
 export const regulatorShape = shape('a regulator', 'A regulator between two rails.', {
   from: row(name('rails'), 'The rail at its input.', 'vbat', needed),
   output: row(quantity('V'), 'Output voltage.', '3.3 V +-2 %', needed),
-  dropout: row(quantity('V', notNegative), 'Least difference between input and output.', '250 mV', later),
+  dropout: row(quantity('V', notNegative), 'Least difference between input and output.', '250 mV'),
   ground: row(quantity('A', notNegative), 'Current for itself.', '50 uA'),
-  limit: row(quantity('A', positive), 'Largest output current.', '300 mA', later),
+  limit: row(quantity('A', positive), 'Largest output current.', '300 mA'),
   kind: row(
     choice(
       option('linear', 'Input current is output current.'),
@@ -89,10 +89,9 @@ export const regulatorShape = shape('a regulator', 'A regulator between two rail
     ),
     'How it regulates; linear if left out.',
     'linear',
-    later,
   ),
-  efficiency: row(percent({ above: 0, most: 1 }), 'Efficiency of a switching regulator.', '90 %', later),
-  thermal: row(quantity('K/W', positive), 'Thermal resistance from junction to ambient.', '200 K/W', later),
+  efficiency: row(percent({ above: 0, most: 1 }), 'Efficiency of a switching regulator.', '90 %'),
+  thermal: row(quantity('K/W', positive), 'Thermal resistance from junction to ambient.', '200 K/W'),
 });
 
 export const filterShape = shape(

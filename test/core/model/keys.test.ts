@@ -124,11 +124,6 @@ drivers:
 rails:
   v5: { supply: p }
   v3: { regulator: { from: v5, output: 3.3 V, ground: 1 uA, dropout: 1 V, limit: 1 A, kind: linear, efficiency: 90 %, thermal: 9 K/W } }
-  #                                                         ^^^^^^^ not-computed
-  #                                                                       ^^^^^ not-computed
-  #                                                                                   ^^^^ not-computed
-  #                                                                                                 ^^^^^^^^^^ not-computed
-  #                                                                                                                   ^^^^^^^ not-computed
   vf: { filter: { from: v5, resistor: 1 ohm, capacitor: { value: 1 uF, kind: x7r, rated: 10 V } } }
   #     ^^^^^^ not-computed
   vm:
