@@ -2,15 +2,20 @@
  * All rules in one list, sorted by code: adding a rule is one file and one line. No rule depends on the order.
  */
 import type { BoardAnalysis } from '../analysis/types';
+import { capacitorRating } from './capacitor-rating';
 import type { Check } from './check';
 import { chipOverLimit } from './chip-over-limit';
+import { chipVoltage } from './chip-voltage';
 import { clockFrequency } from './clock-frequency';
 import { clockLevel } from './clock-level';
+import { diodeCurrent } from './diode-current';
+import { diodeReverse } from './diode-reverse';
 import { driverSharedBase } from './driver-shared-base';
 import { driverShootThrough } from './driver-shoot-through';
 import { driverStarved } from './driver-starved';
 import type { Finding } from './finding';
 import { groupOverLimit } from './group-over-limit';
+import { loadVoltage } from './load-voltage';
 import { notComputed } from './not-computed';
 import { over60Volts } from './over-60-volts';
 import { pinOverAbsolute } from './pin-over-absolute';
@@ -28,13 +33,18 @@ import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
+  capacitorRating,
   chipOverLimit,
+  chipVoltage,
   clockFrequency,
   clockLevel,
+  diodeCurrent,
+  diodeReverse,
   driverSharedBase,
   driverShootThrough,
   driverStarved,
   groupOverLimit,
+  loadVoltage,
   notComputed,
   over60Volts,
   pinOverAbsolute,

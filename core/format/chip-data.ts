@@ -84,7 +84,7 @@ export const totalShape = shape('the total of a chip', 'Limits of the sums over 
 
 export const chipPartShape = shape('the data of a chip', 'Data of a chip with pins.', {
   source: sourceRow,
-  supply: supplyRange,
+  supply: { ...supplyRange, computed: true },
   pins: row(
     map(pinDataShape),
     'Output data of every pin without an entry of its own.',

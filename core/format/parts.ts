@@ -42,9 +42,9 @@ export const diodePartShape = shape('the data of a diode', 'Data of a diode.', {
   ideality: row(quantity('1', { least: 0.5, most: 5 }), 'Ideality factor.', '1.8'),
   resistance: row(quantity('ohm', notNegative), 'Series resistance.', '0.6 ohm'),
   junction: row(quantity('F', notNegative), 'Junction capacitance without bias.', '4 pF', later),
-  reverse: row(quantity('V', positive), 'Largest reverse voltage.', '30 V', later),
-  average: row(quantity('A', positive), 'Largest average forward current.', '200 mA', later),
-  peak: row(quantity('A', positive), 'Largest repeated peak of the forward current.', '500 mA', later),
+  reverse: row(quantity('V', positive), 'Largest reverse voltage.', '30 V'),
+  average: row(quantity('A', positive), 'Largest average forward current.', '200 mA'),
+  peak: row(quantity('A', positive), 'Largest repeated peak of the forward current.', '500 mA'),
   leakage: row(quantity('A', notNegative), 'Reverse leakage current.', '2 uA', later),
 });
 

@@ -153,8 +153,8 @@ export const loadShape = shape(
       'Modes in which it draws; all if left out.',
       '[active]',
     ),
-    least: row(quantity('V'), 'Lowest voltage that it works at.', '4.5 V', later),
-    most: row(quantity('V'), 'Highest voltage that it bears.', '7 V', later),
+    least: row(quantity('V'), 'Lowest voltage that it works at.', '4.5 V'),
+    most: row(quantity('V'), 'Highest voltage that it bears.', '7 V'),
   },
   ['current', 'resistance', 'power', 'amplifier'],
 );

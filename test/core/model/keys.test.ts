@@ -149,8 +149,6 @@ rails:
     loads:
       a: 10 mW
       b: { power: 10 mW, least: 4 V, most: 9 V }
-      #                  ^^^^^ not-computed
-      #                              ^^^^ not-computed
       c: { amplifier: { quiescent: 1 mA } }
       #    ^^^^^^^^^ not-computed
 bench: [{ rail: v5, load: 1 mA, voltage: 5 V }]

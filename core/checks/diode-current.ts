@@ -1,0 +1,44 @@
+/**
+ * Diodes of a pump against their average and repeated peak current ratings.
+ */
+import { stressedParts } from '../analysis/pump-stress';
+import { inMode } from '../analysis/words';
+import { formatQuantity } from '../quantity/write';
+import type { Check } from './check';
+import type { Finding } from './finding';
+import { worstByPath } from './worst-parts';
+
+export const diodeCurrent: Check = {
+  code: 'diode-current',
+  title: 'Diode beyond its current rating',
+  severity: 'error',
+  why: 'The average current heats a diode, and each charging pulse must stay within what its bond and junction bear.',
+  run: (analysis) =>
+    [...analysis.rails.values()].flatMap((result) =>
+      worstByPath(
+        stressedParts(result).diodes,
+        ({ diode }) => diode.path,
+        ({ figures }) => figures.peak,
+      ).flatMap(({ diode, figures }): Finding[] => {
+        const name = diode.ref?.name ?? 'The diode';
+        const mode = inMode(result.pump?.heaviest.mode);
+        return (['average', 'peak'] as const).flatMap((kind): Finding[] => {
+          const rating = diode.data?.[kind];
+          if (!rating || figures[kind] <= rating.min) return [];
+          const limit = formatQuantity(rating.min, 'A');
+          return [
+            {
+              code: 'diode-current',
+              severity: 'error',
+              at: diode.path,
+              span: diode.ref?.span ?? diode.span,
+              message: `${name} of ${result.rail.name} carries ${formatQuantity(figures[kind], 'A')} ${kind === 'peak' ? 'at the peak of each pulse' : 'on average'}${mode}, more than the ${limit} it is rated for. A larger diode${kind === 'peak' ? ' or a series resistor at the drive' : ''} cures it.`,
+              expected: `at most ${limit}`,
+              actual: formatQuantity(figures[kind], 'A'),
+              source: rating.origin.note ?? rating.origin.kind,
+            },
+          ];
+        });
+      }),
+    ),
+};
