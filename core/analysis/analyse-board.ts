@@ -7,11 +7,12 @@ import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
 import { formatQuantity } from '../quantity/write';
 import { weightedModes } from './board-modes';
-import { chipResults, groupResults, overModes } from './chips';
+import { chipResults, currentBand, groupResults } from './chips';
 import { clockSource } from './clock-source';
-import { boardCurrents, type Currents } from './currents';
+import { boardCurrents, type CurrentCases } from './currents';
 import { driverResults } from './drivers';
 import { isGap } from './gap';
+import { Memory } from './memory';
 import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
@@ -20,15 +21,26 @@ import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
 
 /** `file` is only a name for reports; `text` has no byte-order mark. */
-export function analyseBoard(text: string, file: string, catalogue: Catalogue): BoardAnalysis {
+export function analyseBoard(
+  text: string,
+  file: string,
+  catalogue: Catalogue,
+  memory?: Memory,
+): BoardAnalysis {
   const reading = readBoard(text, catalogue);
-  return computeBoard(text, file, reading);
+  return computeBoard(text, file, reading, memory);
 }
 
-export function computeBoard(text: string, file: string, reading: BoardReading): BoardAnalysis {
+export function computeBoard(
+  text: string,
+  file: string,
+  reading: BoardReading,
+  memory: Memory = new Memory(),
+): BoardAnalysis {
+  memory.begin();
   const { board } = reading;
   const modes = weightedModes(board);
-  const solved = railVoltages(board);
+  const solved = railVoltages(board, memory);
   const currents = boardCurrents(board, solved);
   const pins = pinResults(board, solved);
   const balances = [...solved.pumps.values()].flatMap((pump) => pump.points.map((point) => point.balance));
@@ -149,7 +161,7 @@ function clockResults(board: Board, solved: RailVoltages): Map<string, ClockResu
   return results;
 }
 
-function supplyResults(board: Board, currents: Currents): Map<string, SupplyResult> {
+function supplyResults(board: Board, currents: CurrentCases): Map<string, SupplyResult> {
   const modes = weightedModes(board);
   const results = new Map<string, SupplyResult>();
   for (const supply of board.supplies.values()) {
@@ -158,10 +170,10 @@ function supplyResults(board: Board, currents: Currents): Map<string, SupplyResu
     );
     const found = supplyVoltage(supply);
     const voltage = found && plainBand(found);
-    const current = overModes(modes, (mode) => {
+    const current = currentBand(modes, currents, (of, mode) => {
       let sum = 0;
       for (const rail of rails) {
-        const part = currents.rail(rail.name, mode);
+        const part = of.rail(rail.name, mode);
         if (part === null) return null;
         sum += part;
       }

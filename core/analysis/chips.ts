@@ -4,7 +4,7 @@
 import type { Board } from '../model/board';
 import type { Band, Figure } from '../quantity/figure';
 import type { WeightedMode } from './board-modes';
-import type { Currents } from './currents';
+import type { CurrentCases } from './currents';
 import { isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
 import type { ChipResult, GroupResult, PinResult } from './types';
@@ -39,7 +39,7 @@ export function chipResults(
   board: Board,
   solved: RailVoltages,
   pins: ReadonlyMap<string, PinResult>,
-  currents: Currents,
+  currents: CurrentCases,
   modes: readonly WeightedMode[],
 ): Map<string, ChipResult> {
   const results = new Map<string, ChipResult>();
@@ -52,13 +52,30 @@ export function chipResults(
       chip,
       data,
       voltage: rail && !isGap(rail) ? rail : null,
-      current: overModes(modes, (mode) => currents.chip(chip, mode)),
+      current: currentBand(modes, currents, (of, mode) => of.chip(chip, mode)),
       sourceTotal: source,
       sinkTotal: sink,
       use: data ? share(source, sink, data.total.source ?? null, data.total.sink ?? null) : null,
     });
   }
   return results;
+}
+
+/** The least of any mode, the typical average weighted by share, the most of any mode; null when one is not known. */
+export function currentBand(
+  modes: readonly WeightedMode[],
+  currents: CurrentCases,
+  value: (of: Pick<CurrentCases, 'rail' | 'chip' | 'loads'>, mode: string | undefined) => number | null,
+): Band | null {
+  const typical = overModes(modes, (mode) => value(currents, mode));
+  const least = overModes(modes, (mode) => value(currents.least, mode));
+  const most = overModes(modes, (mode) => value(currents.most, mode));
+  if (!typical || !least || !most) return null;
+  return {
+    min: Math.min(typical.min, least.min),
+    typical: typical.typical,
+    max: Math.max(typical.max, most.max),
+  };
 }
 
 /** Lowest and highest over the modes, and the average weighted by their share; null when one is not known. */

@@ -1,13 +1,17 @@
 /**
  * Average currents up the tree of rails, mode by mode: what loads, chips, regulators and pumps take from each rail.
- * Typical values; loads that are resistances see the rail's typical voltage.
+ * Once with everything typical, once with everything that takes most, once with what takes least.
  */
-import type { Board, Chip, Rail } from '../model/board';
+import type { Board, Chip, Load, Rail } from '../model/board';
+import type { Band } from '../quantity/figure';
 import { activeIn } from './board-modes';
-import { clockSource } from './clock-source';
+import { type Consumers, consumersOf, type Driven } from './consumers';
 import { isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
 import { regulatorInput } from './regulators';
+import type { PumpPoint } from './types';
+
+export type Case = 'typical' | 'most' | 'least';
 
 export interface Currents {
   /** Into the rail's own loads and bleeder, A; null when the rail has no voltage to tell. */
@@ -18,93 +22,89 @@ export interface Currents {
   chip(chip: Chip, mode: string | undefined): number | null;
 }
 
-export function boardCurrents(board: Board, solved: RailVoltages): Currents {
-  const oscillators = ownCurrents(board, solved);
+export interface CurrentCases extends Currents {
+  readonly most: Currents;
+  readonly least: Currents;
+}
+
+export function boardCurrents(board: Board, solved: RailVoltages): CurrentCases {
+  const consumers = consumersOf(board, solved);
+  const of = (which: Case) => currentsOf(board, solved, consumers, which);
+  return { ...of('typical'), most: of('most'), least: of('least') };
+}
+
+/** The end of a band that belongs to the case, and the opposite one, for what takes less the larger it is. */
+const ends = { typical: 'typical', most: 'max', least: 'min' } as const;
+const opposite = { typical: 'typical', most: 'min', least: 'max' } as const;
+
+function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, which: Case): Currents {
+  const end = ends[which];
+  const other = opposite[which];
   const memo = new Map<string, number | null>();
   const open = new Set<string>();
+  const point = (name: string, mode: string | undefined) => pumpPoint(solved, name, mode, which);
 
-  const point = (rail: Rail, mode: string | undefined) =>
-    solved.pumps.get(rail.name)?.points.find((p) => p.mode === mode);
+  /** Magnitude of a rail's voltage in the mode, at the end that is asked for. */
+  const volts = (name: string, mode: string | undefined, at: keyof Band): number | undefined => {
+    const voltage = solved.voltages.get(name);
+    if (!voltage || isGap(voltage)) return undefined;
+    if (at === 'typical') return Math.abs(solved.at(name, mode) ?? voltage.typical);
+    const sizes = [Math.abs(voltage.min), Math.abs(voltage.max)];
+    return at === 'max' ? Math.max(...sizes) : Math.min(...sizes);
+  };
 
   const loads = (rail: Rail, mode: string | undefined): number | null => {
     if (rail.origin?.kind === 'pump') {
-      const at = point(rail, mode);
+      const at = point(rail.name, mode);
       return at ? at.loadCurrent - at.belowCurrent : null;
     }
-    const voltage = solved.voltages.get(rail.name);
-    let sum = 0;
-    const resistors = [...rail.loads.values()]
-      .filter((load) => activeIn(mode, load.modes))
-      .flatMap((load) => {
-        sum += Math.abs(load.current?.typical ?? 0);
-        return load.resistance ? [load.resistance.typical] : [];
-      });
-    if (rail.bleeder) resistors.push(rail.bleeder.typical);
-    if (resistors.length === 0) return sum;
-    if (!voltage || isGap(voltage)) return null;
-    for (const ohms of resistors) sum += Math.abs(voltage.typical) / ohms;
-    return sum;
+    let sum = rail.bleeder ? share(volts(rail.name, mode, end), rail.bleeder[other]) : 0;
+    for (const load of rail.loads.values()) {
+      if (!activeIn(mode, load.modes)) continue;
+      sum += plainLoad(load, end, other, (at) => volts(rail.name, mode, at));
+    }
+    return Number.isNaN(sum) ? null : sum;
   };
 
   /** Pumps that the chip's pins drive take their charge from the chip's rail. */
-  const drive = (chip: Chip, mode: string | undefined): number | null => {
-    let sum = 0;
-    for (const [railName, chains] of solved.chains) {
-      const at = solved.pumps.get(railName)?.points.find((p) => p.mode === mode);
-      for (const [k, chain] of chains.entries())
-        for (const pin of chain.pins) {
-          if (pin.chip !== chip.name) continue;
-          if (!at) return null;
-          sum += pin.share * (at.drives[k]?.sourceAverage ?? 0);
-        }
-    }
-    return sum;
-  };
+  const drive = (chip: Chip, mode: string | undefined): number | null =>
+    total(
+      (consumers.drivenBy.get(chip.name) ?? []).map(({ railName, index, share: part }) => {
+        const at = point(railName, mode);
+        return at ? part * (at.drives[index]?.sourceAverage ?? 0) : null;
+      }),
+    );
 
   /** What a pump takes from a rail past the pins of chips, which are counted with their chips. */
   const pump = (item: Rail, name: string, mode: string | undefined): number | null => {
-    const at = point(item, mode);
+    const at = point(item.name, mode);
     if (!at) return null;
-    let sum = at.railCurrents.get(name) ?? 0;
-    for (const [k, chain] of (solved.chains.get(item.name) ?? []).entries())
-      for (const pin of chain.pins)
-        if (board.chips.get(pin.chip)?.rail?.name === name)
-          sum -= pin.share * (at.drives[k]?.sourceAverage ?? 0);
-    return sum;
+    const past = (pin: Driven) => pin.chipRail === name;
+    const byPins = (consumers.pinsOf.get(item.name) ?? [])
+      .filter(past)
+      .reduce((sum, pin) => sum + pin.share * (at.drives[pin.index]?.sourceAverage ?? 0), 0);
+    return (at.railCurrents.get(name) ?? 0) - byPins;
   };
 
   const chip = (item: Chip, mode: string | undefined): number | null => {
     const driven = drive(item, mode);
     if (driven === null) return null;
-    const fallback = item.draws.length === 0 ? (item.part?.data?.draws?.typical ?? 0) : 0;
+    const fallback = item.draws.length === 0 ? (item.part?.data?.draws?.[end] ?? 0) : 0;
     const own = item.draws
       .filter((draw) => activeIn(mode, draw.mode && [draw.mode]))
-      .reduce((sum, draw) => sum + draw.current.typical, fallback);
-    const pins = [...item.pins.values()].reduce((sum, pin) => sum + (pin.sources?.typical ?? 0), 0);
+      .reduce((sum, draw) => sum + draw.current[end], fallback);
+    const pins = [...item.pins.values()].reduce((sum, pin) => sum + (pin.sources?.[end] ?? 0), 0);
     return own + pins + driven;
   };
 
-  const consumers = (name: string, mode: string | undefined): (number | null)[] => {
-    const list: (number | null)[] = [];
-    for (const item of board.chips.values()) if (item.rail?.name === name) list.push(chip(item, mode));
-    for (const other of board.rails.values()) {
-      const { origin } = other;
-      if (origin?.kind === 'regulator' && origin.regulator.from?.name === name) {
-        const out = rail(other.name, mode);
-        const input = typicalOf(solved, name);
-        const output = typicalOf(solved, other.name);
-        list.push(
-          out === null || input === undefined || output === undefined
-            ? null
-            : (regulatorInput(origin.regulator, output, input, out) ?? null),
-        );
-      }
-      if (origin?.kind === 'filter' && origin.filter.from?.name === name) list.push(rail(other.name, mode));
-      if (origin?.kind === 'pump' && usesRail(solved, other, origin.pump.input?.name, name))
-        list.push(pump(other, name, mode));
-    }
-    for (const clock of oscillators) if (clock.railName === name) list.push(clock.amps);
-    return list;
+  const regulated = (made: Rail, name: string, mode: string | undefined): number | null => {
+    const { origin } = made;
+    if (origin?.kind !== 'regulator') return null;
+    const out = rail(made.name, mode);
+    const input = volts(name, mode, other);
+    const output = volts(made.name, mode, end);
+    if (out === null || input === undefined || output === undefined) return null;
+    return regulatorInput(origin.regulator, output, input, out, which) ?? null;
   };
 
   const rail = (name: string, mode: string | undefined): number | null => {
@@ -114,8 +114,15 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
     const item = board.rails.get(name);
     if (!item || open.has(name)) return null;
     open.add(name);
-    let sum: number | null = loads(item, mode);
-    for (const part of consumers(name, mode)) sum = sum === null || part === null ? null : sum + part;
+    const on = consumers.on.get(name);
+    const sum = total([
+      loads(item, mode),
+      ...(on?.chips ?? []).map((each) => chip(each, mode)),
+      ...(on?.regulated ?? []).map((each) => regulated(each, name, mode)),
+      ...(on?.filtered ?? []).map((each) => rail(each.name, mode)),
+      ...(on?.pumped ?? []).map((each) => pump(each, name, mode)),
+      ...(on?.oscillators ?? []).map((band) => band[end]),
+    ]);
     open.delete(name);
     memo.set(key, sum);
     return sum;
@@ -124,25 +131,44 @@ export function boardCurrents(board: Board, solved: RailVoltages): Currents {
   return { loads, rail, chip };
 }
 
-function typicalOf(solved: RailVoltages, name: string): number | undefined {
-  const voltage = solved.voltages.get(name);
-  return voltage && !isGap(voltage) ? voltage.typical : undefined;
+/** The pump in that mode: typical, or where it draws most or least. */
+function pumpPoint(
+  solved: RailVoltages,
+  name: string,
+  mode: string | undefined,
+  which: Case,
+): PumpPoint | undefined {
+  const pump = solved.pumps.get(name);
+  const index = pump?.points.findIndex((each) => each.mode === mode) ?? -1;
+  if (!pump || index < 0) return undefined;
+  return which === 'typical' ? pump.points[index] : pump.draws[index]?.[which]?.point;
 }
 
-/** True when a pump stands on the rail or is driven from it. */
-function usesRail(solved: RailVoltages, rail: Rail, input: string | undefined, name: string): boolean {
-  if (input === name) return true;
-  return (solved.chains.get(rail.name) ?? []).some(
-    ({ source }) => source.railName === name || source.driver?.railName === name,
-  );
+/** Current of a load on a rail that no pump makes, A; NaN when it needs a voltage that is not known. */
+function plainLoad(
+  load: Load,
+  end: keyof Band,
+  other: keyof Band,
+  volts: (at: keyof Band) => number | undefined,
+): number {
+  const { current, resistance, power } = load;
+  let sum = 0;
+  if (current) sum += size(current, end);
+  if (resistance) sum += share(volts(end), resistance[other]);
+  if (power && power.max > 0) sum += share(power[end], volts(other));
+  return sum;
 }
 
-/** What timers and gates that make a clock take for themselves. */
-function ownCurrents(board: Board, solved: RailVoltages): { railName: string; amps: number }[] {
-  const voltage = (name: string) => solved.voltages.get(name) ?? { because: `${name} is not known` };
-  return [...board.clocks.keys()].flatMap((name) => {
-    const source = clockSource(board, name, voltage);
-    if (isGap(source) || !source.ownCurrent || source.output.railName === undefined) return [];
-    return [{ railName: source.output.railName, amps: source.ownCurrent.typical }];
-  });
+/** A current counts by its size: on a negative rail it may be written with either sign. */
+function size({ min, typical, max }: Band, end: keyof Band): number {
+  if (typical >= 0) return { min: Math.max(min, 0), typical, max }[end];
+  return { min: Math.max(-max, 0), typical: -typical, max: -min }[end];
+}
+
+function share(above: number | undefined, below: number | undefined): number {
+  return above === undefined || below === undefined ? Number.NaN : above / below;
+}
+
+function total(parts: readonly (number | null)[]): number | null {
+  return parts.reduce<number | null>((sum, part) => (sum === null || part === null ? null : sum + part), 0);
 }

@@ -19,8 +19,9 @@ export class Book {
   readonly #rails = new Map<string, number>();
   readonly #ties: Tying[] = [];
 
-  add(label: string, path: string, unit: Unit, { min, typical, max }: Band): number {
-    return this.variables.push({ label, path, unit, band: { min, typical, max } }) - 1;
+  add(label: string, path: string, unit: Unit, { min, typical, max }: Band, draws?: 1 | -1): number {
+    const band = { min, typical, max };
+    return this.variables.push({ label, path, unit, band, ...(draws === undefined ? {} : { draws }) }) - 1;
   }
 
   /** A rail that serves twice is one variable, since it cannot sit at both ends of its band. */

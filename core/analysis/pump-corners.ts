@@ -22,7 +22,7 @@ export function corner(
   direction: 1 | -1,
 ): CornerEnd {
   const typical = typicalPoint(model);
-  let best = { value: from.point[target], at: typical };
+  let best = { value: from.point[target], at: typical, point: from.point };
   let slopes = from.slopes[target];
   let ends = '';
   for (let round = 0; round < mostRounds; round++) {
@@ -32,10 +32,12 @@ export function corner(
     ends = key;
     const solved = solvePoint(model, at, mode);
     if ('reason' in solved) break;
-    if (direction * (solved.point[target] - best.value) > 0) best = { value: solved.point[target], at };
+    if (direction * (solved.point[target] - best.value) > 0)
+      best = { value: solved.point[target], at, point: solved.point };
     slopes = solved.slopes[target];
   }
-  return { value: best.value, settings: settings(model, best.at, from.slopes[target]) };
+  const { value, point } = best;
+  return { value, point, settings: endSettings(model, best.at, from.slopes[target]) };
 }
 
 /** The point whose quantities stand at the ends that their slopes point to. */
@@ -77,7 +79,12 @@ function tryEnds(
   return best.end;
 }
 
-function settings(model: PumpModel, at: readonly number[], slopes: readonly number[]): CornerSetting[] {
+/** Quantities of a point that stand at an end of their band, the most influential first. */
+export function endSettings(
+  model: PumpModel,
+  at: readonly number[],
+  slopes: readonly number[],
+): CornerSetting[] {
   return model.variables
     .flatMap((variable, k) => {
       const { min, max } = variable.band;

@@ -67,11 +67,19 @@ export function pumpDrops(
     },
     {
       in: driven ? 'current beyond the share of the load' : 'leakage',
-      volts: ideal - powerIn / loadCurrent,
+      volts: ideal - powerIn / loadCurrent + resistors(allLeaks(network)) + volts(junctions(network, solved)),
     },
     { in: 'ripple', volts: powerOut / loadCurrent - actual },
   ];
   return list.filter((drop) => Math.abs(drop.volts) > 1e-5 * ideal);
+}
+
+function allLeaks({ leaks }: PumpNetwork): readonly (number | undefined)[] {
+  return [...leaks.flying, ...leaks.smoothing, leaks.reservoir, ...leaks.diodes];
+}
+
+function junctions(network: PumpNetwork, solved: Solved): readonly (ElementFigures | undefined)[] {
+  return network.junctions.map((k) => (k === undefined ? undefined : solved.capacitors[k]));
 }
 
 function sum(values: readonly number[]): number {

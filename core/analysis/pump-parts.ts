@@ -1,49 +1,21 @@
 /**
- * Capacitors, diodes and transistors of a pump as variables: values at a point, and ties to the engine.
+ * Diodes and transistors of a pump as variables: values at a point, and ties to the engine.
  */
 import type { DiodeData, TransistorData } from '../catalog/part';
 import { saturationAtTemperature, temperatureLaws } from '../compute/diode-saturation-temperature';
 import { referenceTemperature, thermalVoltage } from '../compute/thermal-voltage';
 import type { Parameter } from '../engine';
-import type { Capacitor } from '../model/board';
-import type { CapacitorValues, DiodeValues, TransistorValues } from '../pump/values';
+import type { DiodeValues, TransistorValues } from '../pump/values';
 import { type Band, exactly } from '../quantity/figure';
 import type { Book, Point, Tie } from './pump-book';
 
-export interface CapacitorPart {
-  values(p: Point): CapacitorValues;
-  /** `frequency`: stretching time acts like shrinking every capacitor. */
-  tie(p: Point, index: number, frequency: number, tie: Tie): void;
-}
-
-/** Undefined when the capacitor has no usable value. */
-export function capacitorPart(book: Book, label: string, capacitor: Capacitor): CapacitorPart | undefined {
-  const { value, esr } = capacitor;
-  if (!value || !(value.min > 0)) return undefined;
-  const tolerance = capacitor.toleranceGiven ? undefined : capacitor.kind.data?.tolerance;
-  const band: Band = tolerance
-    ? {
-        min: value.typical * (1 + tolerance.min),
-        typical: value.typical,
-        max: value.typical * (1 + tolerance.max),
-      }
-    : value;
-  const farads = book.add(label, capacitor.path, 'F', band);
-  const ohms = esr && esr.min > 0 ? book.add(`${label} ESR`, capacitor.path, 'ohm', esr) : undefined;
-  return {
-    values: (p) => ({ farads: p[farads]!, ohms: ohms === undefined ? 0 : p[ohms]! }),
-    tie: (_p, index, frequency, tie) => {
-      tie(farads, { kind: 'farads', index });
-      tie(ohms, { kind: 'esr', index });
-      tie(frequency, { kind: 'farads', index });
-    },
-  };
-}
-
 export interface DiodePart {
   values(p: Point): DiodeValues;
-  tie(p: Point, index: number, tie: Tie): void;
+  tie(p: Point, place: { index: number; leak?: number; junction?: number }, tie: Tie): void;
 }
+
+/** Leakage doubles with this many kelvin (common practice, no source). */
+const leakageDoubling = 10;
 
 export function diodePart(
   book: Book,
@@ -51,6 +23,8 @@ export function diodePart(
   path: string,
   data: DiodeData,
   ambient: number,
+  /** Junction capacitance over the swing of the pump; left out where it makes no difference. */
+  junction?: Band,
 ): DiodePart {
   const saturation = book.add(`${label} saturation current`, path, 'A', data.saturation);
   const ideality = book.add(`${label} ideality`, path, '1', data.ideality);
@@ -60,13 +34,29 @@ export function diodePart(
     'ohm',
     data.resistance.min > 0 ? data.resistance : exactly(1e-3),
   );
+  const { leakage, reverse } = data;
+  const leak =
+    leakage && reverse && leakage.min > 0 ? book.add(`${label} leakage`, path, 'A', leakage) : undefined;
+  const charge = junction && book.add(`${label} junction capacitance`, path, 'F', junction);
   const values = (p: Point): DiodeValues => ({
     ...junctionAt(p[saturation]!, p[ideality]!, p[ambient]!, data.kind),
     ohms: p[resistance]!,
+    ...(leak === undefined
+      ? {}
+      : {
+          leakOhms:
+            reverse!.typical / (p[leak]! * 2 ** ((p[ambient]! - referenceTemperature) / leakageDoubling)),
+        }),
+    ...(charge === undefined ? {} : { junctionFarads: p[charge]! }),
   });
   return {
     values,
-    tie: (p, index, tie) => {
+    tie: (p, { index, leak: resistor, junction: capacitor }, tie) => {
+      if (resistor !== undefined && leak !== undefined) {
+        tie(leak, { kind: 'ohms', index: resistor }, -1 / p[leak]!);
+        tie(ambient, { kind: 'ohms', index: resistor }, -Math.LN2 / leakageDoubling);
+      }
+      if (capacitor !== undefined) tie(charge, { kind: 'farads', index: capacitor });
       tie(saturation, { kind: 'saturation', index });
       tie(resistance, { kind: 'diode-ohms', index });
       for (const variable of [ideality, ambient]) tieJunction(p, variable, index, values, tie);

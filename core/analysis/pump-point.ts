@@ -4,7 +4,7 @@
 import { type Solved, solve } from '../engine';
 import type { DrivePlace } from '../pump/drive';
 import { type PumpNetwork, pumpNetwork } from '../pump/network';
-import { idealVoltage, type PumpValues } from '../pump/values';
+import { type CapacitorValues, idealVoltage, type PumpValues } from '../pump/values';
 import { driverFigures } from './driver-figures';
 import { belowLoad } from './pump-assembly';
 import { pumpDrops } from './pump-drops';
@@ -27,11 +27,13 @@ export function solvePoint(
   model: PumpModel,
   at: readonly number[],
   mode: string | undefined,
+  /** `figures`: no derivatives, which a corner that nobody moves on from does not need. */
+  wanted: 'all' | 'figures' = 'all',
 ): SolvedPoint | NoPoint {
   const values = model.values(at);
   const network = pumpNetwork(values);
   if (!network) return { reason: 'the edges of its clock leave no room for its levels' };
-  const contributions = model.contributions(at, network);
+  const contributions = wanted === 'all' ? model.contributions(at, network) : [];
   const solved = solve(network.network, {
     port: { a: network.output, b: network.ground },
     parameters: [
@@ -47,6 +49,10 @@ export function solvePoint(
     slopes.voltage[c.variable] = slopes.voltage[c.variable]! + c.weight * solved.derivatives.average[k + 1]!;
     slopes.ripple[c.variable] = slopes.ripple[c.variable]! + c.weight * solved.derivatives.ripple[k + 1]!;
   });
+  if (wanted === 'figures') {
+    slopes.voltage.fill(Number.NaN);
+    slopes.ripple.fill(Number.NaN);
+  }
   const tied = new Set(contributions.map((c) => c.variable));
   model.variables.forEach((variable, k) => {
     if (tied.has(k) || !hasBand(variable)) return;
@@ -90,7 +96,7 @@ function describe(
     belowCurrent: sum(values.loads.map((load, k) => (load.name === belowLoad ? loads[k]!.average : 0))),
     askedCurrent,
     // The first diode is the only way from the input rail.
-    inputCurrent: values.input === undefined ? 0 : sign * solved.diodes[network.diodes[0]!]!.average,
+    inputCurrent: values.input === undefined ? 0 : sign * throughFirst(network, solved),
     powerIn,
     powerOut,
     ideal: idealVoltage(values),
@@ -104,7 +110,7 @@ function describe(
     railCurrents: new Map(
       values.rails.map((rail, k) => [rail.name, solved.knowns[network.rails[k]!.known]!.average]),
     ),
-    capacitors: capacitorFigures(model, network, solved),
+    capacitors: capacitorFigures(model, values, network, solved),
     diodes: network.diodes.map((index, k): DiodeFigures => {
       const figures = solved.diodes[index]!;
       return {
@@ -121,6 +127,14 @@ function describe(
   };
 }
 
+/** Average through the first diode and what leaks past it, from anode to cathode, A. */
+function throughFirst(network: PumpNetwork, solved: Solved): number {
+  const [leak] = network.leaks.diodes;
+  return (
+    solved.diodes[network.diodes[0]!]!.average + (leak === undefined ? 0 : solved.resistors[leak]!.average)
+  );
+}
+
 /** What the clock's output gives (through its upper switch) and takes (through its lower one). */
 function driveFigures(solved: Solved, { high, low }: DrivePlace): DriveFigures {
   const upper = solved.resistors[high]!;
@@ -134,15 +148,31 @@ function driveFigures(solved: Solved, { high, low }: DrivePlace): DriveFigures {
   };
 }
 
-function capacitorFigures(model: PumpModel, network: PumpNetwork, solved: Solved): CapacitorFigures[] {
-  const of = (key: string, index: number): CapacitorFigures => {
+function capacitorFigures(
+  model: PumpModel,
+  values: PumpValues,
+  network: PumpNetwork,
+  solved: Solved,
+): CapacitorFigures[] {
+  const of = (key: string, index: number, { farads, ohms }: CapacitorValues): CapacitorFigures => {
     const { voltage, rms } = solved.capacitors[index]!;
-    return { key, voltage: Math.max(Math.abs(voltage.min), Math.abs(voltage.max)), rmsCurrent: rms };
+    return {
+      key,
+      voltage: Math.max(Math.abs(voltage.min), Math.abs(voltage.max)),
+      average: voltage.average,
+      lowest: voltage.min,
+      highest: voltage.max,
+      rmsCurrent: rms,
+      heat: rms * rms * ohms,
+      effective: farads,
+    };
   };
   return [
-    ...network.flying.map((index, k) => of(model.keys.flying[k]!, index)),
-    ...network.smoothing.map((index, k) => of(model.keys.smoothing[k]!, index)),
-    ...(network.reservoir === undefined ? [] : [of(model.keys.reservoir, network.reservoir)]),
+    ...network.flying.map((index, k) => of(model.keys.flying[k]!, index, values.flying[k]!)),
+    ...network.smoothing.map((index, k) => of(model.keys.smoothing[k]!, index, values.smoothing[k]!)),
+    ...(network.reservoir === undefined
+      ? []
+      : [of(model.keys.reservoir, network.reservoir, values.reservoir!)]),
   ];
 }
 

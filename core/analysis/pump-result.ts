@@ -4,9 +4,10 @@
  */
 import type { Topology } from '../model/board';
 import { corner } from './pump-corners';
+import { drawCorner } from './pump-draws';
 import { estimatePump } from './pump-estimate';
 import { hasBand, type PumpModel, typicalPoint } from './pump-model';
-import { type NoPoint, type SolvedPoint, solvePoint } from './pump-point';
+import type { NoPoint, SolvedPoint } from './pump-point';
 import type { CornerEnd, PumpResult } from './types';
 
 /** The pump's model in one mode; `mode` is absent for a board without modes. */
@@ -15,10 +16,14 @@ export interface ModeModel {
   readonly model: PumpModel;
 }
 
-export function solvePump(topology: Topology, modes: readonly ModeModel[]): PumpResult | NoPoint {
+/** The same with its typical point, whose capacitors hold what their voltage leaves of them. */
+export interface SettledMode extends ModeModel {
+  readonly at: SolvedPoint | NoPoint;
+}
+
+export function solvePump(topology: Topology, modes: readonly SettledMode[]): PumpResult | NoPoint {
   const solved: { mode: ModeModel; at: SolvedPoint }[] = [];
-  for (const mode of modes) {
-    const at = solvePoint(mode.model, typicalPoint(mode.model), mode.mode);
+  for (const { at, ...mode } of modes) {
     if ('reason' in at) return at;
     solved.push({ mode, at });
   }
@@ -39,6 +44,10 @@ export function solvePump(topology: Topology, modes: readonly ModeModel[]): Pump
     heaviest: point,
     voltage: { lowest: extreme(low, 'voltage', -1), highest: extreme(high, 'voltage', 1) },
     ripple: { lowest: extreme(lightest, 'ripple', -1), highest: extreme(heaviest, 'ripple', 1) },
+    draws: solved.map(({ mode, at }) => ({
+      most: drawCorner(mode.model, mode.mode, at, 1) ?? null,
+      least: drawCorner(mode.model, mode.mode, at, -1) ?? null,
+    })),
     estimate: estimatePump(topology, values, point.loadCurrent),
     influences: influences(heaviest.mode.model, heaviest.at),
   };

@@ -6,8 +6,10 @@ import type { Band } from '../quantity/figure';
 import { weightedModes } from './board-modes';
 import { type DriveChain, driveChains } from './drive-chain';
 import { type Gap, isGap } from './gap';
-import { assemblePump, type RailSource } from './pump-assembly';
-import { type ModeModel, solvePump } from './pump-result';
+import type { SolvedPump } from './memory';
+import { assemblePump, type PumpParts, type RailSource } from './pump-assembly';
+import { settlePump } from './pump-bias';
+import { type SettledMode, solvePump } from './pump-result';
 import type { PumpResult } from './types';
 
 /** Voltage of another rail, or why it has none. */
@@ -19,11 +21,12 @@ export interface Surroundings {
   /** A rail as this pump sees it in a mode: without the pump's own current, with its source resistance. */
   source(name: string, mode: string | undefined): RailSource | Gap;
   /** What other rails and chips take from this pump's output in a mode, A. */
-  below(mode: string | undefined): number;
+  below(mode: string | undefined): Band;
 }
 
 export interface PumpSetup {
-  readonly models: readonly ModeModel[];
+  /** One for each mode. */
+  readonly parts: readonly PumpParts[];
   readonly chains: readonly DriveChain[];
 }
 
@@ -34,32 +37,46 @@ export function setUpPump(board: Board, rail: Rail, pump: Pump, around: Surround
   if (isGap(chains)) return chains;
   const input = inputName(pump);
   if (input !== undefined && typeof input !== 'string') return input;
-  const models: ModeModel[] = [];
+  const parts: PumpParts[] = [];
   for (const { name: mode } of weightedModes(board)) {
     const rails = railSources(chains, input, mode, around);
     if (isGap(rails)) return rails;
     const { root, frequency, duty, rise, fall } = chains[0]!.clock;
-    const model = assemblePump({
+    parts.push({
       rail,
       pump,
       mode,
       stages,
-      ambient: board.ambient,
+      ambient: plain(board.ambient),
       rails,
       input,
       drives: chains.map((chain) => chain.source),
       clock: { label: root.name, path: root.path, frequency, duty, rise, fall },
       below: around.below(mode),
     });
-    if (!model) return { because: 'a capacitor or a diode of it has no usable value' };
-    models.push({ mode, model });
   }
-  return { models, chains };
+  return { parts, chains };
 }
 
-export function solveRailPump(rail: Rail, pump: Pump, setup: PumpSetup): PumpResult | Gap {
-  const result = solvePump(pump.topology!, setup.models);
+/** All modes of a pump solved; `models` is empty when a part of it has no usable value. */
+export function solveParts(pump: Pump, parts: readonly PumpParts[]): SolvedPump {
+  const modes: SettledMode[] = [];
+  for (const each of parts) {
+    const { mode } = each;
+    const settled = settlePump(pump, mode, (bears) => assemblePump(bears ? { ...each, bears } : each));
+    if (!settled) return { models: [], result: { reason: noValue } };
+    modes.push({ mode, ...settled });
+  }
+  const result = solvePump(pump.topology!, modes);
+  return { models: modes.map(({ mode, model }) => ({ mode, model })), result };
+}
+
+const noValue = 'a capacitor or a diode of it has no usable value';
+
+/** The result, or the gap that it leaves on the board. */
+export function pumpResultOf(rail: Rail, { result, models }: SolvedPump): PumpResult | Gap {
   if (!('reason' in result)) return result;
+  if (models.length === 0) return { because: result.reason };
   return {
     because: `no steady state was found: ${result.reason}`,
     finding: {
@@ -72,6 +89,10 @@ export function solveRailPump(rail: Rail, pump: Pump, setup: PumpSetup): PumpRes
         'Look for a value that is far off, such as a capacitor or a frequency with a wrong prefix.',
     },
   };
+}
+
+function plain({ min, typical, max }: Band): Band {
+  return { min, typical, max };
 }
 
 function stageCount({ topology, stages }: Pump): number | Gap {

@@ -1,20 +1,38 @@
 /**
- * Each part of a pump beside what it bears in the heaviest mode and at the highest corner.
+ * Each part of a pump beside what it bears: in the heaviest mode at typical values, and at most over all modes and
+ * corners that were solved.
  */
 import type { Capacitor, Diode } from '../model/board';
-import type { CapacitorFigures, DiodeFigures, RailResult } from './types';
+import type { CapacitorFigures, DiodeFigures, PumpPoint, PumpResult, RailResult } from './types';
 
 export interface StressedCapacitor {
   readonly capacitor: Capacitor;
   readonly figures: CapacitorFigures;
-  /** Voltage across it, scaled to the rail's strongest corner, V. */
+  /** Largest over all corners: voltage in magnitude, V, rms current, A, and heat, W. */
   readonly highest: number;
+  readonly highestRms: number;
+  readonly highestHeat: number;
+  /** Smallest value that works at any corner, F. */
+  readonly leastEffective: number;
 }
 
 export interface StressedDiode {
   readonly diode: Diode;
   readonly figures: DiodeFigures;
+  /** Largest over all corners. */
   readonly highest: number;
+  readonly highestAverage: number;
+  readonly highestPeak: number;
+}
+
+/** Every operating point of a pump that was solved: all modes at typical values, and all corners. */
+export function solvedPoints(pump: PumpResult): readonly PumpPoint[] {
+  const ends = [pump.voltage.lowest, pump.voltage.highest, pump.ripple.lowest, pump.ripple.highest];
+  return [
+    ...pump.points,
+    ...ends.flatMap(({ point }) => (point ? [point] : [])),
+    ...pump.draws.flatMap(({ most, least }) => [most, least].flatMap((each) => (each ? [each.point] : []))),
+  ];
 }
 
 /** Empty for rails that no pump makes. A part that serves several stages comes once for each of them. */
@@ -24,14 +42,10 @@ export function stressedParts({ rail, pump }: RailResult): {
 } {
   const origin = rail.origin?.kind === 'pump' ? rail.origin.pump : undefined;
   if (!origin || !pump) return { capacitors: [], diodes: [] };
-  const { lowest, highest } = pump.voltage;
-  const strongest = Math.max(Math.abs(lowest.value), Math.abs(highest.value));
-  // All voltages of a pump grow together with its output from the heaviest point to its strongest corner.
-  const factor = Math.max(1, strongest / Math.max(Math.abs(pump.heaviest.voltage), 1e-9));
-  const capped = Math.min(factor, 3);
+  const points = solvedPoints(pump);
   const find = <T>(list: readonly T[], index: number) => (list.length === 1 ? list[0] : list[index]);
   return {
-    capacitors: pump.heaviest.capacitors.flatMap((figures) => {
+    capacitors: pump.heaviest.capacitors.flatMap((figures, k) => {
       const { column, index } = placeOf(figures.key);
       const list =
         column === 'reservoir'
@@ -42,11 +56,34 @@ export function stressedParts({ rail, pump }: RailResult): {
             ? origin.smoothing
             : origin.flying;
       const capacitor = find(list, index);
-      return capacitor ? [{ capacitor, figures, highest: figures.voltage * capped }] : [];
+      if (!capacitor) return [];
+      const most = (of: (item: CapacitorFigures) => number) =>
+        Math.max(...points.map((point) => of(point.capacitors[k]!)));
+      return [
+        {
+          capacitor,
+          figures,
+          highest: most(({ voltage }) => voltage),
+          highestRms: most(({ rmsCurrent }) => rmsCurrent),
+          highestHeat: most(({ heat }) => heat),
+          leastEffective: -most(({ effective }) => -effective),
+        },
+      ];
     }),
-    diodes: pump.heaviest.diodes.flatMap((figures) => {
+    diodes: pump.heaviest.diodes.flatMap((figures, k) => {
       const diode = find(origin.diodes, placeOf(figures.key).index);
-      return diode ? [{ diode, figures, highest: figures.reverse * capped }] : [];
+      if (!diode) return [];
+      const most = (of: (item: DiodeFigures) => number) =>
+        Math.max(...points.map((point) => of(point.diodes[k]!)));
+      return [
+        {
+          diode,
+          figures,
+          highest: most(({ reverse }) => reverse),
+          highestAverage: most(({ average }) => average),
+          highestPeak: most(({ peak }) => peak),
+        },
+      ];
     }),
   };
 }

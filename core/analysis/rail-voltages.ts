@@ -2,42 +2,49 @@
  * Voltages of all rails, each computed once, a pump after the rails that it stands on and is driven from. What rails
  * give way under load is found by repeating the board with the currents of the round before.
  */
-import type { Board, Rail, Regulator } from '../model/board';
+import type { Board, Filter, Rail, Regulator } from '../model/board';
 import { type Band, exactly } from '../quantity/figure';
 import { weightedModes } from './board-modes';
 import { boardCurrents } from './currents';
 import { type Drawn, drawnFrom, nothingDrawn } from './drawn';
 import type { DriveChain } from './drive-chain';
+import { filterOhms } from './filters';
 import { type Gap, isGap } from './gap';
+import { Memory } from './memory';
+import type { PumpParts } from './pump-assembly';
 import type { ModeModel } from './pump-result';
-import { type RailVoltage, type Surroundings, setUpPump, solveRailPump } from './pump-solution';
+import { pumpResultOf, type RailVoltage, type Surroundings, setUpPump, solveParts } from './pump-solution';
 import { regulatedVoltage } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { PumpResult } from './types';
 
 export interface RailVoltages {
   readonly voltages: ReadonlyMap<string, Band | Gap>;
+  /** Typical voltage in one mode, V; undefined where it is not known. */
+  at(name: string, mode: string | undefined): number | undefined;
   readonly pumps: ReadonlyMap<string, PumpResult>;
   /** Drives of each pump rail whose drives are known, solved or not. */
   readonly chains: ReadonlyMap<string, readonly DriveChain[]>;
   /** Models of each pump, one for each mode. */
   readonly models: ReadonlyMap<string, readonly ModeModel[]>;
+  /** What each pump is made of, one for each mode. */
+  readonly parts: ReadonlyMap<string, readonly PumpParts[]>;
 }
 
 /** Rounds after which a board that still moves is taken as it is. */
-const mostRounds = 6;
+const mostRounds = 12;
 /** A change of a rail below this share of its voltage is none. */
-const settled = 1e-4;
+const settled = 5e-5;
 
 /** All rails of the board, at one operating point for each mode. */
-export function railVoltages(board: Board): RailVoltages {
+export function railVoltages(board: Board, memory: Memory = new Memory()): RailVoltages {
   let drawn = nothingDrawn;
   for (let round = 1; ; round++) {
-    const solver = railSolver(board, drawn);
+    const solver = railSolver(board, memory, drawn);
     for (const name of board.rails.keys()) solver.voltage(name);
     if (round === mostRounds) return solver;
     const next = drawnFrom(board, solver, boardCurrents(board, solver));
-    if (!moves(board, drawn, next)) return solver;
+    if (!moves(board, solver, drawn, next)) return solver;
     drawn = next;
   }
 }
@@ -45,12 +52,14 @@ export function railVoltages(board: Board): RailVoltages {
 /** Rails on demand: asking for one computes it and those that it depends on. */
 export function railSolver(
   board: Board,
+  memory: Memory = new Memory(),
   drawn: Drawn = nothingDrawn,
 ): RailVoltages & { readonly voltage: RailVoltage } {
   const voltages = new Map<string, Band | Gap>();
   const pumps = new Map<string, PumpResult>();
   const chains = new Map<string, readonly DriveChain[]>();
   const models = new Map<string, readonly ModeModel[]>();
+  const parts = new Map<string, readonly PumpParts[]>();
   const open = new Set<string>();
   const voltage: RailVoltage = (name) => {
     const known = voltages.get(name);
@@ -73,15 +82,31 @@ export function railSolver(
       if (isGap(band)) return band;
       const supply = supplyOf(board, name);
       if (!supply?.ohms) return { name, band };
-      const others = drawn.total(name, mode) - drawn.byPump(name, mode, rail.name);
-      return { name, band: sagged(supply.band, supply.ohms, others, others), ohms: supply.ohms };
+      const all = drawn.total(name, mode);
+      const own = drawn.byPump(name, mode, rail.name);
+      const others = { min: all.min - own.min, typical: all.typical - own.typical, max: all.max - own.max };
+      return { name, band: sagged(supply.band, supply.ohms, others), ohms: supply.ohms };
     },
   });
+  /** Over all modes: the heaviest makes the typical voltage. */
+  const heaviest = (name: string): Band => {
+    const draws = weightedModes(board).map(({ name: mode }) => drawn.total(name, mode));
+    return {
+      min: Math.min(...draws.map(({ min }) => min)),
+      typical: Math.max(...draws.map(({ typical }) => typical)),
+      max: Math.max(...draws.map(({ max }) => max)),
+    };
+  };
   const regulated = (rail: Rail, regulator: Regulator): Band | Gap => {
     if (!regulator.output) return { because: `the regulator of ${rail.name} has no output voltage` };
     const input = regulator.from && voltage(regulator.from.name);
     // Without a known input it is taken at its word; the input says why it is not known.
     return (input && !isGap(input) && regulatedVoltage(regulator, input)) || regulator.output;
+  };
+  const filtered = (rail: Rail, filter: Filter): Band | Gap => {
+    if (!filter.from) return { because: `the filter of ${rail.name} has no rail in front` };
+    const input = voltage(filter.from.name);
+    return isGap(input) ? input : sagged(input, filterOhms(filter), heaviest(rail.name));
   };
   const compute = (rail: Rail): Band | Gap => {
     const { origin } = rail;
@@ -90,20 +115,20 @@ export function railSolver(
       case 'supply': {
         const supply = supplyOf(board, rail.name);
         if (!supply) return { because: `the voltage of ${origin.supply.name} is not known` };
-        if (!supply.ohms) return supply.band;
-        const draws = weightedModes(board).map(({ name }) => drawn.total(rail.name, name));
-        return sagged(supply.band, supply.ohms, Math.min(...draws), Math.max(...draws));
+        return supply.ohms ? sagged(supply.band, supply.ohms, heaviest(rail.name)) : supply.band;
       }
       case 'regulator':
         return regulated(rail, origin.regulator);
       case 'filter':
-        return { because: 'a filter is not computed yet' };
+        return filtered(rail, origin.filter);
       case 'pump': {
         const setup = setUpPump(board, rail, origin.pump, around(rail));
         if (isGap(setup)) return setup;
         chains.set(rail.name, setup.chains);
-        models.set(rail.name, setup.models);
-        const result = solveRailPump(rail, origin.pump, setup);
+        parts.set(rail.name, setup.parts);
+        const pump = memory.pump(setup.parts, () => solveParts(origin.pump, setup.parts));
+        models.set(rail.name, pump.models);
+        const result = pumpResultOf(rail, pump);
         if (isGap(result)) return result;
         pumps.set(rail.name, result);
         return {
@@ -114,7 +139,25 @@ export function railSolver(
       }
     }
   };
-  return { voltages, pumps, chains, models, voltage };
+  const at = (name: string, mode: string | undefined): number | undefined => {
+    const band = voltages.get(name);
+    const origin = board.rails.get(name)?.origin;
+    if (!band || isGap(band) || !origin) return undefined;
+    if (origin.kind === 'pump') return pumps.get(name)?.points.find((p) => p.mode === mode)?.voltage;
+    const amps = drawn.total(name, mode).typical;
+    if (origin.kind === 'supply') {
+      const supply = supplyOf(board, name);
+      return supply ? supply.band.typical - (supply.ohms?.typical ?? 0) * amps : undefined;
+    }
+    if (origin.kind === 'filter') {
+      const input = origin.filter.from && at(origin.filter.from.name, mode);
+      return input === undefined ? undefined : sag(input, filterOhms(origin.filter).typical * amps);
+    }
+    const input = origin.regulator.from && at(origin.regulator.from.name, mode);
+    if (input === undefined) return band.typical;
+    return regulatedVoltage(origin.regulator, exactly(input))?.typical;
+  };
+  return { voltages, at, pumps, chains, models, parts, voltage };
 }
 
 /** Open voltage and source resistance of the supply that a rail is. */
@@ -125,26 +168,41 @@ function supplyOf(board: Board, railName: string): { band: Band; ohms: Band | nu
   return band ? { band, ohms: supplyResistance(supply) } : undefined;
 }
 
-/** The heaviest current makes the typical and the lowest voltage, the lightest one the highest. */
-function sagged(band: Band, ohms: Band, least: number, most: number): Band {
+/** Most current makes the weakest voltage, least current the strongest; a negative rail is pulled up. */
+function sagged(band: Band, ohms: Band, { min: least, typical, max: most }: Band): Band {
+  const ends = [
+    sag(band.min, band.min < 0 ? ohms.min * least : ohms.max * most),
+    sag(band.max, band.max < 0 ? ohms.max * most : ohms.min * least),
+  ];
   return {
-    min: band.min - ohms.max * most,
-    typical: band.typical - ohms.typical * most,
-    max: band.max - ohms.min * least,
+    min: Math.min(...ends),
+    typical: sag(band.typical, ohms.typical * typical),
+    max: Math.max(...ends),
   };
 }
 
+/** A voltage less a drop in magnitude. */
+function sag(volts: number, drop: number): number {
+  return volts < 0 ? volts + drop : volts - drop;
+}
+
 /** True when the currents of the last round move a rail that gives way. */
-function moves(board: Board, before: Drawn, after: Drawn): boolean {
+function moves(board: Board, solved: RailVoltages, before: Drawn, after: Drawn): boolean {
   for (const { name } of weightedModes(board))
     for (const rail of board.rails.values()) {
-      const change = (of: (drawn: Drawn) => number) => Math.abs(of(after) - of(before));
-      const supply = supplyOf(board, rail.name);
-      const sag = (supply?.ohms ?? exactly(0)).typical * change((d) => d.total(rail.name, name));
-      if (supply && sag > settled * Math.abs(supply.band.typical)) return true;
-      if (rail.origin?.kind !== 'pump') continue;
+      const change = (of: (drawn: Drawn) => Band) => {
+        const [a, b] = [of(before), of(after)];
+        return Math.max(...(['min', 'typical', 'max'] as const).map((end) => Math.abs(b[end] - a[end])));
+      };
+      const { origin } = rail;
+      if (origin?.kind === 'supply' || origin?.kind === 'filter') {
+        const ohms = origin.kind === 'supply' ? supplyOf(board, rail.name)?.ohms : filterOhms(origin.filter);
+        const volts = Math.abs(solved.at(rail.name, name) ?? 0);
+        if (ohms && ohms.max * change((d) => d.total(rail.name, name)) > settled * volts) return true;
+      }
+      if (origin?.kind !== 'pump') continue;
       const below = after.below(rail.name, name);
-      if (change((d) => d.below(rail.name, name)) > settled * below) return true;
+      if (change((d) => d.below(rail.name, name)) > settled * below.max) return true;
     }
   return false;
 }

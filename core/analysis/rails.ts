@@ -1,12 +1,13 @@
 /**
  * Everything about each rail, put together from its voltage, its pump and its currents.
  */
-import type { Board, Rail } from '../model/board';
+import type { Board, Filter, Rail } from '../model/board';
 import type { Band } from '../quantity/figure';
 import type { WeightedMode } from './board-modes';
 import { overModes } from './chips';
-import type { Currents } from './currents';
+import type { CurrentCases, Currents } from './currents';
 import { pumpLoadLine, pumpWaveform } from './curves';
+import { filterFarads, filterOhms, filterRipple } from './filters';
 import { isGap } from './gap';
 import type { ModeModel } from './pump-result';
 import type { RailVoltages } from './rail-voltages';
@@ -17,12 +18,48 @@ import type { PumpResult, RailResult } from './types';
 export function railResults(
   board: Board,
   solved: RailVoltages,
-  currents: Currents,
+  currents: CurrentCases,
   modes: readonly WeightedMode[],
 ): Map<string, RailResult> {
   const results = new Map<string, RailResult>();
   for (const rail of board.rails.values()) results.set(rail.name, railResult(rail, solved, currents, modes));
+  // A filter's ripple is made of the curve of the rail in front, wherever in the file that stands.
+  for (const [name, result] of results) {
+    const { origin } = result.rail;
+    if (origin?.kind === 'filter') results.set(name, filteredRail(result, origin.filter, results));
+  }
   return results;
+}
+
+function filteredRail(
+  result: RailResult,
+  filter: Filter,
+  results: ReadonlyMap<string, RailResult>,
+): RailResult {
+  const { voltage, current } = result;
+  const front = filter.from && results.get(filter.from.name);
+  if (!voltage || current === null) return result;
+  const farads = filterFarads(filter, voltage.typical)?.typical;
+  const wave = front?.waveform?.();
+  const fall = filter.resistor ? filter.resistor.typical * current : undefined;
+  const { typical } = filterOhms(filter);
+  return {
+    ...result,
+    ripple: wave ? filterRipple(filter, wave, voltage.typical, current) : null,
+    inputCurrent: current,
+    efficiency: front?.voltage?.typical ? voltage.typical / front.voltage.typical : null,
+    storedEnergy: farads === undefined ? null : (farads * voltage.typical ** 2) / 2,
+    filter: {
+      drops: fall === undefined ? [] : [{ in: 'filter resistor', volts: fall }],
+      outputResistance:
+        front?.pump === undefined
+          ? filter.resistor
+            ? typical
+            : null
+          : front.pump.heaviest.outputResistance + typical,
+      openCircuit: front?.pump ? front.pump.heaviest.openCircuit : null,
+    },
+  };
 }
 
 function railResult(
@@ -62,12 +99,12 @@ function railResult(
         : null
       : regulatorEfficiency(rail, solved, regulatorIn, powerOut),
     headroom: voltage ? headroom(rail, voltage) : null,
-    storedEnergy: pump ? storedEnergy(rail, pump) : null,
+    storedEnergy: pump ? storedEnergy(pump) : null,
     modes: new Map(
       stated.map((mode) => [
         mode.name!,
         {
-          voltage: pump ? (at(mode.name)?.voltage ?? null) : (voltage?.typical ?? null),
+          voltage: solved.at(rail.name, mode.name) ?? (pump ? null : (voltage?.typical ?? null)),
           current: pump ? (at(mode.name)?.loadCurrent ?? null) : currents.rail(rail.name, mode.name),
         },
       ]),
@@ -152,24 +189,9 @@ function headroom(rail: Rail, voltage: Band): number | null {
 }
 
 /** J, all capacitors of the pump at their largest voltage. */
-function storedEnergy(rail: Rail, pump: PumpResult): number | null {
-  if (rail.origin?.kind !== 'pump') return null;
-  const { flying, smoothing, reservoir } = rail.origin.pump;
-  const farads = new Map<string, number>();
-  for (const [name, list] of [
-    ['flying', flying],
-    ['smoothing', smoothing.length > 0 ? smoothing : flying],
-  ] as const)
-    for (let k = 0; k < 10; k++) {
-      const capacitor = list.length === 1 ? list[0] : list[k];
-      if (capacitor?.value) farads.set(`${rail.name}.${name}[${k}]`, capacitor.value.typical);
-    }
-  if (reservoir?.value) farads.set(`${rail.name}.reservoir`, reservoir.value.typical);
-  let sum = 0;
-  for (const capacitor of pump.heaviest.capacitors) {
-    const value = farads.get(capacitor.key);
-    if (value === undefined) return null;
-    sum += (value * capacitor.voltage ** 2) / 2;
-  }
-  return sum;
+function storedEnergy(pump: PumpResult): number {
+  return pump.heaviest.capacitors.reduce(
+    (sum, { effective, voltage }) => sum + (effective * voltage ** 2) / 2,
+    0,
+  );
 }

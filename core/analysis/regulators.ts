@@ -5,7 +5,7 @@ import { junctionTemperature, linearRegulator, switchingRegulator } from '../com
 import type { Board, Rail, Regulator } from '../model/board';
 import type { Band } from '../quantity/figure';
 import { weightedModes } from './board-modes';
-import type { Currents } from './currents';
+import type { Case, CurrentCases } from './currents';
 import { type Gap, isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
 import type { RegulatorResult } from './types';
@@ -27,10 +27,12 @@ export function regulatorInput(
   outputV: number,
   inputV: number,
   amps: number,
+  which: Case = 'typical',
 ): number | undefined {
-  const ground = regulator.ground?.typical ?? 0;
+  const ground = regulator.ground?.[({ typical: 'typical', most: 'max', least: 'min' } as const)[which]] ?? 0;
   if (regulator.kind !== 'switching') return amps + ground;
-  const efficiency = regulator.efficiency?.typical;
+  const efficiency =
+    regulator.efficiency?.[({ typical: 'typical', most: 'min', least: 'max' } as const)[which]];
   if (efficiency === undefined) return undefined;
   const point = switchingRegulator(inputV, outputV, amps, efficiency);
   return point && point.inputA + ground;
@@ -39,7 +41,7 @@ export function regulatorInput(
 export function regulatorResults(
   board: Board,
   solved: RailVoltages,
-  currents: Currents,
+  currents: CurrentCases,
 ): Map<string, RegulatorResult> {
   const results = new Map<string, RegulatorResult>();
   for (const rail of board.rails.values()) {
@@ -55,7 +57,7 @@ function regulatorResult(
   rail: Rail,
   regulator: Regulator,
   solved: RailVoltages,
-  currents: Currents,
+  currents: CurrentCases,
 ): RegulatorResult | undefined {
   const input: Band | Gap | undefined = regulator.from && solved.voltages.get(regulator.from.name);
   const output = solved.voltages.get(rail.name);
@@ -67,7 +69,8 @@ function regulatorResult(
     if (!current || amps > current.amps) current = { amps, mode };
   }
   if (!current) return undefined;
-  const heat = heatOf(regulator, input.max, output.min, current.amps);
+  const most = currents.most.rail(rail.name, current.mode) ?? current.amps;
+  const heat = heatOf(regulator, input.max, output.min, most);
   const junction =
     heat !== undefined && regulator.thermal
       ? junctionTemperature(board.ambient.max, heat, regulator.thermal.max)

@@ -26,6 +26,14 @@ export interface CornerEnd {
   readonly value: number;
   /** Most influential first. Empty when nothing has a band. */
   readonly settings: readonly CornerSetting[];
+  /** Of a pump: everything else at that corner. */
+  readonly point?: PumpPoint;
+}
+
+/** A pump solved at a corner. */
+export interface CornerPoint {
+  readonly point: PumpPoint;
+  readonly settings: readonly CornerSetting[];
 }
 
 export interface Drop {
@@ -64,7 +72,15 @@ export interface CapacitorFigures {
   readonly key: string;
   /** Largest voltage across it, magnitude, V. */
   readonly voltage: number;
+  /** Signed, from the pumped or held node to the drive or to ground, V. */
+  readonly average: number;
+  readonly lowest: number;
+  readonly highest: number;
   readonly rmsCurrent: number;
+  /** Turned into heat in its series resistance, W. */
+  readonly heat: number;
+  /** Value that works: at its temperature and direct voltage, F. */
+  readonly effective: number;
 }
 
 export interface DiodeFigures {
@@ -133,7 +149,8 @@ export interface PumpResult {
   /** Extremes over modes and corners: `lowest` is the smaller number. */
   readonly voltage: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
   readonly ripple: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
-  /** Largest magnitudes at the corners, in the order of `drives`. */
+  /** In the order of `points`: where the pump draws most and least in that mode; null where it has no solution. */
+  readonly draws: readonly { readonly most: CornerPoint | null; readonly least: CornerPoint | null }[];
   readonly estimate: PumpEstimate | null;
   /** Quantities that move the output, most influential first: change of voltage over the quantity's band, V. */
   readonly influences: readonly { readonly label: string; readonly path: string; readonly volts: number }[];
@@ -170,6 +187,12 @@ export interface RailResult {
   readonly efficiency: number | null;
   readonly headroom: number | null;
   readonly storedEnergy: number | null;
+  /** Only of a filter: its part of the load line. */
+  readonly filter?: {
+    readonly drops: readonly Drop[];
+    readonly outputResistance: number | null;
+    readonly openCircuit: number | null;
+  };
   /** By mode; empty when the board has no modes. */
   readonly modes: ReadonlyMap<string, { readonly voltage: number | null; readonly current: number | null }>;
   readonly pump?: PumpResult;

@@ -77,6 +77,12 @@ export interface CapacitorKind extends PartEntry {
   /** Loss factor at 120 Hz, from which ESR follows when `esr` is not given. */
   readonly loss?: Figure;
   readonly esr?: Figure;
+  /** Leakage current at the rated voltage. */
+  readonly leakage?: Figure;
+  /** Leakage current over capacitance and voltage, 1/s: `0.01` is the rule of 0.01 uA per uF and V. */
+  readonly leakageRate?: Figure;
+  /** Heat that a part of usual size bears, W: what its ripple current is judged by without a rating of its own. */
+  readonly heat?: Figure;
   readonly polarised: boolean;
 }
 

@@ -18,23 +18,26 @@ export const diodeCurrent: Check = {
       worstByPath(
         stressedParts(result).diodes,
         ({ diode }) => diode.path,
-        ({ figures }) => figures.peak,
-      ).flatMap(({ diode, figures }): Finding[] => {
+        ({ highestPeak }) => highestPeak,
+      ).flatMap(({ diode, figures, highestAverage, highestPeak }): Finding[] => {
         const name = diode.ref?.name ?? 'The diode';
         const mode = inMode(result.pump?.heaviest.mode);
         return (['average', 'peak'] as const).flatMap((kind): Finding[] => {
           const rating = diode.data?.[kind];
-          if (!rating || figures[kind] <= rating.min) return [];
+          const most = kind === 'peak' ? highestPeak : highestAverage;
+          if (!rating || most <= rating.min) return [];
           const limit = formatQuantity(rating.min, 'A');
+          const typical = figures[kind] > rating.min;
+          const amps = formatQuantity(typical ? figures[kind] : most, 'A');
           return [
             {
               code: 'diode-current',
-              severity: 'error',
+              severity: typical ? 'error' : 'warning',
               at: diode.path,
               span: diode.ref?.span ?? diode.span,
-              message: `${name} of ${result.rail.name} carries ${formatQuantity(figures[kind], 'A')} ${kind === 'peak' ? 'at the peak of each pulse' : 'on average'}${mode}, more than the ${limit} it is rated for. A larger diode${kind === 'peak' ? ' or a series resistor at the drive' : ''} cures it.`,
+              message: `${name} of ${result.rail.name} carries ${amps} ${kind === 'peak' ? 'at the peak of each pulse' : 'on average'}${typical ? mode : ' at its strongest corner'}, more than the ${limit} it is rated for. A larger diode${kind === 'peak' ? ' or a series resistor at the drive' : ''} cures it.`,
               expected: `at most ${limit}`,
-              actual: formatQuantity(figures[kind], 'A'),
+              actual: amps,
               source: rating.origin.note ?? rating.origin.kind,
             },
           ];

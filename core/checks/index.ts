@@ -2,7 +2,9 @@
  * All rules in one list, sorted by code: adding a rule is one file and one line. No rule depends on the order.
  */
 import type { BoardAnalysis } from '../analysis/types';
+import { capacitorDerated } from './capacitor-derated';
 import { capacitorRating } from './capacitor-rating';
+import { capacitorRippleCurrent } from './capacitor-ripple-current';
 import type { Check } from './check';
 import { chipOverLimit } from './chip-over-limit';
 import { chipVoltage } from './chip-voltage';
@@ -33,7 +35,9 @@ import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
+  capacitorDerated,
   capacitorRating,
+  capacitorRippleCurrent,
   chipOverLimit,
   chipVoltage,
   clockFrequency,

@@ -7,9 +7,8 @@ import type { Check } from './check';
 
 /** Fields of the report, with the words for them. */
 const emptyFields: readonly string[] = [
-  'effective capacitance of capacitors',
   'life of batteries',
-  'ripple, efficiency, load line and drops of rails that no pump makes',
+  'ripple, load line and drops of rails that neither a pump nor a filter makes',
 ];
 
 export const notComputed: Check = {

@@ -159,7 +159,8 @@ function traceInto(
   const index = output >= 0 ? circuit.place[output]! : circuit.nodes + ~output;
   for (let s = 0; s < path.count; s++) {
     if (!isOnCurve(path, s)) continue;
-    trace.time.push(before + path.time[s]!);
+    // The end of one period and the start of the next are one moment; rounding must not turn them round.
+    trace.time.push(Math.max(before + path.time[s]!, trace.time.at(-1) ?? 0));
     trace.output.push(path.volts[s * (circuit.nodes + circuit.knowns) + index]!);
     traced.forEach((k, n) => {
       trace.currents[n]!.push(resistorCurrent(circuit, path, k, s));

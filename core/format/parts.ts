@@ -41,11 +41,11 @@ export const diodePartShape = shape('the data of a diode', 'Data of a diode.', {
   saturation: row(quantity('A', positive), 'Saturation current.', '2.5 nA'),
   ideality: row(quantity('1', { least: 0.5, most: 5 }), 'Ideality factor.', '1.8'),
   resistance: row(quantity('ohm', notNegative), 'Series resistance.', '0.6 ohm'),
-  junction: row(quantity('F', notNegative), 'Junction capacitance without bias.', '4 pF', later),
+  junction: row(quantity('F', notNegative), 'Junction capacitance without bias.', '4 pF'),
   reverse: row(quantity('V', positive), 'Largest reverse voltage.', '30 V'),
   average: row(quantity('A', positive), 'Largest average forward current.', '200 mA'),
   peak: row(quantity('A', positive), 'Largest repeated peak of the forward current.', '500 mA'),
-  leakage: row(quantity('A', notNegative), 'Reverse leakage current.', '2 uA', later),
+  leakage: row(quantity('A', notNegative), 'Reverse leakage current at the reverse rating.', '2 uA'),
 });
 
 export const transistorPartShape = shape('the data of a transistor', 'Data of a bipolar transistor.', {
@@ -119,21 +119,15 @@ export const biasShape = shape('a bias point', 'Capacitance left at a direct vol
 export const capacitorPartShape = shape('the data of a kind of capacitor', 'Data of a kind of capacitor.', {
   source: sourceRow,
   tolerance: row(percent({ least: -1 }), 'Deviation of the value.', '+-20 %'),
-  temperature: row(
-    percent({ least: -1 }),
-    'Change of the value over the temperature range.',
-    '+-15 %',
-    later,
-  ),
+  temperature: row(percent({ least: -1 }), 'Change of the value over the temperature range.', '+-15 %'),
   bias: row(
     list(row(map(biasShape), 'Capacitance left at a direct voltage.', '{ share: 50 %, left: 60 % }')),
     'Capacitance left at a share of the rated voltage.',
     '[{ share: 50 %, left: 60 % }]',
-    later,
   ),
   loss: row(quantity('1', notNegative), 'Loss factor (tan delta) at 120 Hz.', '0.16'),
   esr: row(quantity('ohm', notNegative), 'Equivalent series resistance.', '10 mohm'),
-  leakage: row(quantity('A', notNegative), 'Leakage current.', '3 uA', later),
+  leakage: row(quantity('A', notNegative), 'Leakage current at the rated voltage.', '3 uA'),
   polarised: row(
     choice(
       option('yes', 'One terminal must stay positive.'),

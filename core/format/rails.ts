@@ -29,9 +29,14 @@ export const capacitorShape = shape('a capacitor', 'A capacitor.', {
     'Dielectric: a key of the catalogue or of `parts`.',
     'x7r',
   ),
-  rated: row(quantity('V', positive), 'Rated voltage.', '16 V', later),
+  rated: row(
+    quantity('V', positive),
+    'Rated voltage; what direct voltage leaves of a class 2 ceramic follows from it.',
+    '16 V',
+  ),
   esr: row(quantity('ohm', notNegative), 'Equivalent series resistance.', '50 mohm'),
-  size: row(text, 'Case size, for the loss of capacitance under direct voltage.', '0805', later),
+  ripple: row(quantity('A', positive), 'Rated ripple current, rms.', '120 mA'),
+  size: row(text, 'Case size of a ceramic: small cases lose more under direct voltage.', '0805'),
   'negative-to': row(name('rails', 'ground'), 'Where the negative terminal goes.', 'ground', later),
 });
 
@@ -170,7 +175,7 @@ export const railShape = shape(
       pumpShape.doc,
       '{ topology: inverter, drive: tick, diode: schottky-signal, flying: 1 uF, reservoir: 10 uF }',
     ),
-    filter: row(map(filterShape), filterShape.doc, '{ from: v5, resistor: 10 ohm, capacitor: 10 uF }', later),
+    filter: row(map(filterShape), filterShape.doc, '{ from: v5, resistor: 10 ohm, capacitor: 10 uF }'),
     needs: row(map(needsShape), needsShape.doc, '{ voltage: 5.2..6.5 V, ripple: 30 mV }'),
     loads: row(
       table(

@@ -167,6 +167,8 @@ export interface Capacitor {
   readonly rated?: Figure;
   /** From the file, or the kind's typical value (origin says which). */
   readonly esr?: Figure;
+  /** Rated ripple current, rms, A. */
+  readonly ripple?: Figure;
   readonly size?: Ref;
   readonly negativeTo?: Ref;
 }

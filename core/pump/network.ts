@@ -4,7 +4,7 @@
 import type { Network, Terminal } from '../engine';
 import { addDrive, type DrivePlace } from './drive';
 import { clockPhases, type Phase } from './phases';
-import { ground, type LoadPlace, type RailPlace, Sheet } from './sheet';
+import { type DiodePlace, ground, type LoadPlace, type RailPlace, Sheet, type StoredPlace } from './sheet';
 import type { PumpValues } from './values';
 
 /** Places of the pump's parts in the network: indices into its lists. */
@@ -21,6 +21,15 @@ export interface PumpNetwork {
   readonly reservoir?: number;
   readonly diodes: readonly number[];
   readonly loads: readonly LoadPlace[];
+  /** Resistors that are leakage, beside each part of the same place in its list. */
+  readonly leaks: {
+    readonly flying: readonly (number | undefined)[];
+    readonly smoothing: readonly (number | undefined)[];
+    readonly reservoir?: number;
+    readonly diodes: readonly (number | undefined)[];
+  };
+  /** Capacitors that are junctions of the diodes. */
+  readonly junctions: readonly (number | undefined)[];
 }
 
 /** Undefined when the clock's edges leave no room for its levels. */
@@ -40,26 +49,36 @@ export function pumpNetwork(pump: PumpValues): PumpNetwork | undefined {
     ground,
     rails: sheet.rails,
     drives,
-    flying: parts.flying,
-    smoothing: parts.smoothing,
-    ...(reservoir === undefined ? {} : { reservoir }),
-    diodes: parts.diodes,
+    flying: parts.flying.map(indexOf),
+    smoothing: parts.smoothing.map(indexOf),
+    ...(reservoir === undefined ? {} : { reservoir: reservoir.index }),
+    diodes: parts.diodes.map(indexOf),
     loads,
+    leaks: {
+      flying: parts.flying.map(leakOf),
+      smoothing: parts.smoothing.map(leakOf),
+      ...(reservoir?.leak === undefined ? {} : { reservoir: reservoir.leak }),
+      diodes: parts.diodes.map(leakOf),
+    },
+    junctions: parts.diodes.map(({ junction }) => junction),
   };
 }
 
+const indexOf = ({ index }: StoredPlace): number => index;
+const leakOf = ({ leak }: StoredPlace): number | undefined => leak;
+
 interface Parts {
   readonly output: Terminal;
-  readonly flying: number[];
-  readonly smoothing: number[];
-  readonly diodes: number[];
+  readonly flying: StoredPlace[];
+  readonly smoothing: StoredPlace[];
+  readonly diodes: DiodePlace[];
 }
 
 /** Diodes in a row from the input to the output; each node between them is pumped by a capacitor. */
 function chain(sheet: Sheet, input: Terminal, drives: readonly DrivePlace[]): Parts {
   const { pump } = sheet;
-  const flying: number[] = [];
-  const diodes: number[] = [];
+  const flying: StoredPlace[] = [];
+  const diodes: DiodePlace[] = [];
   let from = input;
   for (let k = 0; k <= pump.stages; k++) {
     const to = sheet.node(k === pump.stages ? 'output' : `pumped ${k + 1}`);
@@ -74,9 +93,9 @@ function chain(sheet: Sheet, input: Terminal, drives: readonly DrivePlace[]): Pa
 /** Half-wave ladder: a coupling column on the drive, a smoothing column on ground, diodes between them. */
 function ladder(sheet: Sheet, input: Terminal, drive: DrivePlace): Parts {
   const { pump } = sheet;
-  const flying: number[] = [];
-  const smoothing: number[] = [];
-  const diodes: number[] = [];
+  const flying: StoredPlace[] = [];
+  const smoothing: StoredPlace[] = [];
+  const diodes: DiodePlace[] = [];
   let coupled = drive.output;
   let smooth = input;
   let foot: Terminal = ground;

@@ -29,6 +29,17 @@ export interface RailPlace {
   readonly resistor?: number;
 }
 
+/** A capacitor, and the resistor that is its leakage. */
+export interface StoredPlace {
+  readonly index: number;
+  readonly leak?: number;
+}
+
+/** A diode of the pump, with its leakage (a resistor) and its junction (a capacitor). */
+export interface DiodePlace extends StoredPlace {
+  readonly junction?: number;
+}
+
 export class Sheet {
   readonly pump: PumpValues;
   readonly phases: readonly Phase[];
@@ -71,8 +82,16 @@ export class Sheet {
     return this.#resistors.push({ name, a, b, ...course }) - 1;
   }
 
-  capacitor(name: string, a: Terminal, b: Terminal, values: CapacitorValues): number {
-    return this.#capacitors.push({ name, a, b, ...values }) - 1;
+  capacitor(
+    name: string,
+    a: Terminal,
+    b: Terminal,
+    { farads, ohms, leakOhms }: CapacitorValues,
+  ): StoredPlace {
+    return {
+      index: this.#capacitors.push({ name, a, b, farads, ohms }) - 1,
+      ...(leakOhms === undefined ? {} : { leak: this.resistor(`${name} leakage`, a, b, leakOhms) }),
+    };
   }
 
   junction(diode: Diode): number {
@@ -80,9 +99,20 @@ export class Sheet {
   }
 
   /** A diode of the pump; a negative pump has every one the other way round. */
-  diode(position: number, from: Terminal, to: Terminal): number {
+  diode(position: number, from: Terminal, to: Terminal): DiodePlace {
     const [a, b] = this.pump.negative ? [to, from] : [from, to];
-    return this.junction({ name: `diode ${position + 1}`, a, b, ...this.pump.diodes[position]! });
+    const name = `diode ${position + 1}`;
+    const { leakOhms, junctionFarads, ...law } = this.pump.diodes[position]!;
+    return {
+      index: this.junction({ name, a, b, ...law }),
+      ...(leakOhms === undefined ? {} : { leak: this.resistor(`${name} leakage`, a, b, leakOhms) }),
+      ...(junctionFarads === undefined
+        ? {}
+        : {
+            junction: this.capacitor(`${name} junction`, a, b, { farads: junctionFarads, ohms: law.ohms })
+              .index,
+          }),
+    };
   }
 
   load(output: Terminal, load: PumpValues['loads'][number]): LoadPlace {

@@ -5,6 +5,8 @@
 export interface CapacitorValues {
   readonly farads: number;
   readonly ohms: number;
+  /** Leakage as a resistance beside it, ohm; absent for none. */
+  readonly leakOhms?: number;
 }
 
 export interface DiodeValues {
@@ -12,6 +14,10 @@ export interface DiodeValues {
   /** Ideality times thermal voltage, V. */
   readonly slope: number;
   readonly ohms: number;
+  /** Reverse leakage as a resistance beside it, ohm; absent for none. */
+  readonly leakOhms?: number;
+  /** Junction capacitance, F; absent where it makes no difference. */
+  readonly junctionFarads?: number;
 }
 
 /** A rail that the pump stands on or is driven from, as the pump sees it. */
@@ -104,7 +110,7 @@ export interface PumpValues {
 export const loadKnee = 0.2;
 
 /** Rail that decides the swing of a drive: the driver's, or the clock's own. */
-export function swingRail(pump: PumpValues, drive: DriveValues): RailValues {
+export function swingRail(pump: Pick<PumpValues, 'rails'>, drive: DriveValues): RailValues {
   return pump.rails[drive.driver?.rail ?? drive.clock.rail]!;
 }
 
@@ -114,7 +120,9 @@ export function inPhase(drive: DriveValues): boolean {
 }
 
 /** Output voltage without load and with perfect parts, every drive swinging from ground to its rail, V. */
-export function idealVoltage(pump: PumpValues): number {
+export function idealVoltage(
+  pump: Pick<PumpValues, 'topology' | 'stages' | 'negative' | 'rails' | 'input' | 'drives'>,
+): number {
   const sign = pump.negative ? -1 : 1;
   let sum = pump.input === undefined ? 0 : pump.rails[pump.input]!.volts;
   for (let k = 0; k < pump.stages; k++) {

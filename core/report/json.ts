@@ -65,8 +65,8 @@ function driverReport({ uses }: DriverResult): DriverReport {
   };
 }
 
-function railReport({ pump, transients, ...rail }: RailResult): RailReport {
-  const point = pump?.heaviest;
+function railReport({ pump, transients, filter, ...rail }: RailResult): RailReport {
+  const point = pump?.heaviest ?? filter;
   const course = transients?.();
   return {
     voltage: band(rail.voltage),
@@ -141,8 +141,11 @@ function partReports(analysis: BoardAnalysis): Record<string, PartReport> {
   const parts: [string, PartReport][] = [];
   for (const { pump } of analysis.rails.values()) {
     if (pump === undefined) continue;
-    for (const { key, voltage, rmsCurrent } of pump.heaviest.capacitors)
-      parts.push([key, { voltage: finite(voltage), rmsCurrent: finite(rmsCurrent), effective: null }]);
+    for (const { key, voltage, rmsCurrent, effective } of pump.heaviest.capacitors)
+      parts.push([
+        key,
+        { voltage: finite(voltage), rmsCurrent: finite(rmsCurrent), effective: finite(effective) },
+      ]);
     for (const { key, reverse, average, peak } of pump.heaviest.diodes)
       parts.push([key, { reverse: finite(reverse), average: finite(average), peak: finite(peak) }]);
   }

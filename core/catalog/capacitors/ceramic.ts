@@ -1,5 +1,5 @@
 /** Ceramic capacitors by dielectric code: one stable kind and three that lose value with voltage and temperature. */
-import { band, memory, practice, standard } from '../figures';
+import { band, exact, memory, practice, standard } from '../figures';
 import type { CapacitorKind } from '../part';
 import { genericBias } from './bias';
 
@@ -13,6 +13,8 @@ const ceramicEsr = band(
   memory('multilayer ceramic of 1 to 10 uF, 10 kHz to 1 MHz'),
 );
 
+const ceramicHeat = exact(0.1, 'W', practice('case size 0805, some 20 K above its surroundings'));
+
 export const c0g: CapacitorKind = {
   key: 'c0g',
   title: 'Ceramic, class 1, C0G',
@@ -20,6 +22,7 @@ export const c0g: CapacitorKind = {
   tolerance: band(-0.05, 0, 0.05, '1', practice('5 % parts are the stocked ones')),
   temperature: band(-0.003, 0, 0.003, '1', code('C0G')),
   esr: band(5e-3, 20e-3, 100e-3, 'ohm', memory('multilayer ceramic of 1 to 100 nF')),
+  heat: ceramicHeat,
   polarised: false,
 };
 
@@ -31,6 +34,7 @@ export const x5r: CapacitorKind = {
   temperature: band(-0.15, 0, 0.15, '1', code('X5R, -55 to 85 degC')),
   bias: genericBias({ weakest: 0.42, usual: 0.6, best: 0.9 }),
   esr: ceramicEsr,
+  heat: ceramicHeat,
   polarised: false,
 };
 
@@ -42,6 +46,7 @@ export const x7r: CapacitorKind = {
   temperature: band(-0.15, 0, 0.15, '1', code('X7R, -55 to 125 degC')),
   bias: genericBias({ weakest: 0.63, usual: 0.9, best: 1.5 }),
   esr: ceramicEsr,
+  heat: ceramicHeat,
   polarised: false,
 };
 
@@ -53,5 +58,6 @@ export const y5v: CapacitorKind = {
   temperature: band(-0.82, 0, 0.22, '1', code('Y5V, -30 to 85 degC')),
   bias: genericBias({ weakest: 0.21, usual: 0.3, best: 0.45 }),
   esr: ceramicEsr,
+  heat: ceramicHeat,
   polarised: false,
 };

@@ -1,5 +1,5 @@
 /** Polarised capacitors: wet aluminium, solid tantalum and conductive polymer. */
-import { band, memory, practice } from '../figures';
+import { band, dataSheet, exact, memory, practice } from '../figures';
 import type { CapacitorKind } from '../part';
 
 const twentyPercent = practice('20 % parts are the stocked ones');
@@ -18,6 +18,14 @@ export const aluminium: CapacitorKind = {
     '1',
     memory('loss factor limits by rated voltage, 6.3 to 100 V', '120 Hz, 20 degC'),
   ),
+  leakageRate: band(
+    0.0002,
+    0.001,
+    0.01,
+    '1',
+    dataSheet('limit of 0.01 uA per uF and V in public part lists; usual parts stay a tenth of it or less'),
+  ),
+  heat: exact(0.05, 'W', practice('ripple ratings of small radial parts times their ESR: 30 to 130 mW')),
   polarised: true,
 };
 
@@ -28,6 +36,8 @@ export const polymer: CapacitorKind = {
   tolerance: band(-0.2, 0, 0.2, '1', twentyPercent),
   temperature: band(-0.1, 0, 0.1, '1', memory('over -55 to 105 degC')),
   esr: band(5e-3, 20e-3, 60e-3, 'ohm', memory('100 kHz')),
+  leakageRate: band(0.002, 0.02, 0.2, '1', memory('limit of 0.2 uA per uF and V of many series')),
+  heat: exact(0.1, 'W', practice('ripple ratings of small parts times their ESR')),
   polarised: true,
 };
 
@@ -38,5 +48,7 @@ export const tantalum: CapacitorKind = {
   tolerance: band(-0.2, 0, 0.2, '1', twentyPercent),
   temperature: band(-0.1, 0, 0.1, '1', memory('over -55 to 85 degC')),
   esr: band(0.1, 1, 4, 'ohm', memory('1 to 100 uF in the usual cases', '100 kHz')),
+  leakageRate: band(0.0002, 0.001, 0.01, '1', memory('limit of 0.01 uA per uF and V, 25 degC')),
+  heat: exact(0.075, 'W', memory('heat that the smallest moulded case bears')),
   polarised: true,
 };

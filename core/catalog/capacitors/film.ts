@@ -1,5 +1,5 @@
 /** Plastic film capacitors: stable, without polarity, large for their value. */
-import { band, memory, practice } from '../figures';
+import { band, exact, memory, practice } from '../figures';
 import type { CapacitorKind } from '../part';
 
 export const film: CapacitorKind = {
@@ -9,5 +9,6 @@ export const film: CapacitorKind = {
   tolerance: band(-0.1, 0, 0.1, '1', practice('5 % and 10 % parts are both stocked; the wider is taken')),
   temperature: band(-0.05, 0, 0.05, '1', memory('polyester over -55 to 100 degC')),
   esr: band(5e-3, 20e-3, 100e-3, 'ohm', memory('0.1 to 10 uF at 10 to 100 kHz')),
+  heat: exact(0.1, 'W', practice('small box, some 20 K above its surroundings')),
   polarised: false,
 };

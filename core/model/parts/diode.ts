@@ -85,6 +85,7 @@ export function capacitorKind(slot: Slot, key: string, base?: CapacitorKind): Ca
       loss: ownLoss ?? (ownEsr ? undefined : loss),
       esr: ownEsr ?? (ownLoss ? undefined : esr),
       bias: bias.length > 0 ? bias : base?.bias,
+      leakage: partFigure(fields, 'leakage', base?.leakage, source),
     }),
   };
 }

@@ -35,6 +35,8 @@ export function capacitorOf(slot: Slot | undefined): Capacitor | undefined {
   const value = reading?.figure;
   const given = useOf(fields?.at('kind'), 'capacitors', context.catalogue.capacitors, capacitorKind);
   const kind = given ? { ...given, assumed: false } : assumedKind(slot, value);
+  const rated = figureOf(fields?.at('rated'));
+  if (kind.data?.bias && !rated && value) sayUnrated(slot, kind.data);
   const esr = figureOf(fields?.at('esr')) ?? (kind.data && value && typicalEsr(kind.data, value));
   return {
     span,
@@ -43,12 +45,25 @@ export function capacitorOf(slot: Slot | undefined): Capacitor | undefined {
     kind,
     ...present({
       value,
-      rated: figureOf(fields?.at('rated')),
+      rated,
       esr,
+      ripple: figureOf(fields?.at('ripple')),
       size: refOf(fields?.at('size')),
       negativeTo: nameOf(fields?.at('negative-to')),
     }),
   };
+}
+
+/** Once for the file: without a rating nothing says how much of the value the direct voltage leaves. */
+function sayUnrated({ context, path, span }: Slot, kind: CapacitorKind): void {
+  if (context.quiet || context.said.has('rated')) return;
+  context.said.add('rated');
+  report(
+    context,
+    'assumed',
+    { path, span },
+    `This \`${kind.key}\` capacitor has no \`rated\`: it is taken to keep its value under direct voltage, which ceramics of this class do not. Write the rated voltage, for example \`rated: 16 V\`.`,
+  );
 }
 
 function assumedKind(slot: Slot, value: Figure | undefined): Capacitor['kind'] {

@@ -11,7 +11,7 @@ describe('not-computed', () => {
       `${bench}
   up:
     ${pump}
-#   ^^^^ information not-computed: effective capacitance of capacitors
+#   ^^^^ information not-computed: neither a pump nor a filter
     loads: { lamp: 2 mA }
   more:
     ${pump}

@@ -82,7 +82,7 @@ describe('the keys are those of the language', () => {
     [['rails', 'x', 'filter'], 'capacitor from inductor resistor'],
     [['rails', 'x', 'needs'], 'discharge headroom ripple start swing voltage'],
     [['rails', 'x', 'pump'], 'diode drive flying input polarity reservoir series smoothing stages topology'],
-    [['rails', 'x', 'pump', 'flying'], 'esr kind negative-to rated size value'],
+    [['rails', 'x', 'pump', 'flying'], 'esr kind negative-to rated ripple size value'],
     [['rails', 'x', 'loads', 'x'], 'amplifier current in least most power resistance'],
     [['rails', 'x', 'loads', 'x', 'amplifier'], 'count output quiescent'],
     [['modes', 'x'], 'share'],

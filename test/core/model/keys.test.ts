@@ -125,7 +125,6 @@ rails:
   v5: { supply: p }
   v3: { regulator: { from: v5, output: 3.3 V, ground: 1 uA, dropout: 1 V, limit: 1 A, kind: linear, efficiency: 90 %, thermal: 9 K/W } }
   vf: { filter: { from: v5, resistor: 1 ohm, capacitor: { value: 1 uF, kind: x7r, rated: 10 V } } }
-  #     ^^^^^^ not-computed
   vm:
     pump:
       topology: multiplier
@@ -136,8 +135,6 @@ rails:
       diode: silicon-a
       series: 1 ohm
       flying: { value: 1 uF, kind: x7r, rated: 10 V, size: 0805, negative-to: ground }
-      #                                 ^^^^^ not-computed
-      #                                              ^^^^ not-computed
       #                                                          ^^^^^^^^^^^ not-computed
       reservoir: { value: 1 uF, kind: x7r }
       smoothing: { value: 1 uF, kind: x7r }

@@ -1,0 +1,90 @@
+/**
+ * Who hangs on each rail and on each chip, found once for the whole board.
+ */
+import type { Board, Chip, Rail } from '../model/board';
+import type { Band } from '../quantity/figure';
+import { clockSource } from './clock-source';
+import { isGap } from './gap';
+import type { RailVoltages } from './rail-voltages';
+
+export interface OnRail {
+  readonly chips: Chip[];
+  readonly regulated: Rail[];
+  readonly filtered: Rail[];
+  readonly pumped: Rail[];
+  /** Own currents of timers and gates that make a clock, A. */
+  readonly oscillators: Band[];
+}
+
+/** A pin's share of one drive of a pump. */
+export interface Driven {
+  /** Rail that the pump makes. */
+  readonly railName: string;
+  readonly index: number;
+  readonly share: number;
+  readonly chip: string;
+  readonly chipRail: string | undefined;
+}
+
+export interface Consumers {
+  readonly on: ReadonlyMap<string, OnRail>;
+  readonly drivenBy: ReadonlyMap<string, readonly Driven[]>;
+  readonly pinsOf: ReadonlyMap<string, readonly Driven[]>;
+}
+
+export function consumersOf(board: Board, solved: RailVoltages): Consumers {
+  const on = new Map<string, OnRail>();
+  const at = (name: string): OnRail => {
+    const known = on.get(name);
+    if (known) return known;
+    const made: OnRail = { chips: [], regulated: [], filtered: [], pumped: [], oscillators: [] };
+    on.set(name, made);
+    return made;
+  };
+  for (const chip of board.chips.values()) if (chip.rail) at(chip.rail.name).chips.push(chip);
+  for (const rail of board.rails.values()) {
+    const { origin } = rail;
+    if (origin?.kind === 'regulator' && origin.regulator.from)
+      at(origin.regulator.from.name).regulated.push(rail);
+    if (origin?.kind === 'filter' && origin.filter.from) at(origin.filter.from.name).filtered.push(rail);
+    if (origin?.kind !== 'pump') continue;
+    const names = new Set<string | undefined>([origin.pump.input?.name]);
+    for (const { source } of solved.chains.get(rail.name) ?? [])
+      names.add(source.railName).add(source.driver?.railName);
+    for (const name of names) if (name !== undefined) at(name).pumped.push(rail);
+  }
+  for (const { railName, amps } of oscillatorCurrents(board, solved)) at(railName).oscillators.push(amps);
+  return { on, ...pins(board, solved) };
+}
+
+function pins(board: Board, solved: RailVoltages): Pick<Consumers, 'drivenBy' | 'pinsOf'> {
+  const all = [...solved.chains].flatMap(([railName, chains]) =>
+    chains.flatMap((chain, index) =>
+      chain.pins.map(({ chip, share }): Driven => {
+        const chipRail = board.chips.get(chip)?.rail?.name;
+        return { railName, index, share, chip, chipRail };
+      }),
+    ),
+  );
+  return { drivenBy: grouped(all, 'chip'), pinsOf: grouped(all, 'railName') };
+}
+
+function grouped(list: readonly Driven[], by: 'chip' | 'railName'): Map<string, Driven[]> {
+  const groups = new Map<string, Driven[]>();
+  for (const item of list) {
+    const group = groups.get(item[by]);
+    if (group) group.push(item);
+    else groups.set(item[by], [item]);
+  }
+  return groups;
+}
+
+/** What timers and gates that make a clock take for themselves, by rail. */
+function oscillatorCurrents(board: Board, solved: RailVoltages): { railName: string; amps: Band }[] {
+  const voltage = (name: string) => solved.voltages.get(name) ?? { because: `${name} is not known` };
+  return [...board.clocks.keys()].flatMap((name) => {
+    const source = clockSource(board, name, voltage);
+    if (isGap(source) || !source.ownCurrent || source.output.railName === undefined) return [];
+    return [{ railName: source.output.railName, amps: source.ownCurrent }];
+  });
+}
