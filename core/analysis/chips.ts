@@ -15,7 +15,7 @@ export function groupResults(board: Board, pins: ReadonlyMap<string, PinResult>)
     for (const group of chip.part?.data?.groups ?? []) {
       const members = group.pins.flatMap((name) => pins.get(`${chip.name}.${name}`) ?? []);
       if (members.length === 0) continue;
-      const { source, sink } = sums(members);
+      const { source, sink, sourceMost, sinkMost } = sums(members);
       const key = `${chip.name}.${group.name}`;
       const sourceLimit = group.source ?? null;
       const sinkLimit = group.sink ?? null;
@@ -25,6 +25,8 @@ export function groupResults(board: Board, pins: ReadonlyMap<string, PinResult>)
         chip,
         source,
         sink,
+        sourceMost,
+        sinkMost,
         sourceLimit,
         sinkLimit,
         use,
@@ -43,9 +45,10 @@ export function chipResults(
   modes: readonly WeightedMode[],
 ): Map<string, ChipResult> {
   const results = new Map<string, ChipResult>();
+  const byChip = new Map<string, PinResult[]>();
+  for (const pin of pins.values()) byChip.set(pin.chip.name, [...(byChip.get(pin.chip.name) ?? []), pin]);
   for (const chip of board.chips.values()) {
-    const own = [...pins.values()].filter((pin) => pin.chip === chip);
-    const { source, sink } = sums(own);
+    const { source, sink, sourceMost, sinkMost } = sums(byChip.get(chip.name) ?? []);
     const data = chip.part?.data ?? null;
     const rail = chip.rail && solved.voltages.get(chip.rail.name);
     results.set(chip.name, {
@@ -55,6 +58,8 @@ export function chipResults(
       current: currentBand(modes, currents, (of, mode) => of.chip(chip, mode)),
       sourceTotal: source,
       sinkTotal: sink,
+      sourceMost,
+      sinkMost,
       use: data ? share(source, sink, data.total.source ?? null, data.total.sink ?? null) : null,
     });
   }
@@ -96,10 +101,14 @@ export function overModes(
   return { min, typical, max };
 }
 
-function sums(pins: readonly PinResult[]): { source: number; sink: number } {
+function sums(pins: readonly PinResult[]) {
+  const sum = (of: (pin: PinResult) => number | null | undefined) =>
+    pins.reduce((total, pin) => total + (of(pin) ?? 0), 0);
   return {
-    source: pins.reduce((sum, pin) => sum + (pin.sourceAverage ?? 0), 0),
-    sink: pins.reduce((sum, pin) => sum + (pin.sinkAverage ?? 0), 0),
+    source: sum((pin) => pin.sourceAverage),
+    sink: sum((pin) => pin.sinkAverage),
+    sourceMost: sum((pin) => pin.corner?.sourceAverage ?? pin.sourceAverage),
+    sinkMost: sum((pin) => pin.corner?.sinkAverage ?? pin.sinkAverage),
   };
 }
 

@@ -9,7 +9,7 @@ import { weightedModes } from './board-modes';
 import { isGap } from './gap';
 import { pinData, pinResistance } from './pin-resistance';
 import type { RailVoltages } from './rail-voltages';
-import type { DriveFigures, PinResult } from './types';
+import type { CornerSetting, DriveFigures, PinResult } from './types';
 
 interface Use {
   /** `mcu.GP15`. */
@@ -27,21 +27,9 @@ export function pinResults(board: Board, solved: RailVoltages): Map<string, PinR
   const uses = pumpUses(solved);
   const results = new Map<string, PinResult>();
   for (const chip of board.chips.values()) {
-    const names = new Set([...chip.pins.keys()]);
-    for (const use of uses) if (use.chip === chip.name) names.add(use.pin);
-    for (const name of names) {
-      const key = `${chip.name}.${name}`;
-      results.set(
-        key,
-        pinResult(
-          board,
-          solved,
-          chip,
-          name,
-          uses.filter((use) => use.key === key),
-        ),
-      );
-    }
+    const driving = uses.get(chip.name);
+    for (const name of new Set([...chip.pins.keys(), ...(driving?.keys() ?? [])]))
+      results.set(`${chip.name}.${name}`, pinResult(board, solved, chip, name, driving?.get(name) ?? []));
   }
   return results;
 }
@@ -57,7 +45,8 @@ function pinResult(
   const data: PinData = chip.part?.data ? pinData(chip.part.data, name, listed) : {};
   const rail = chip.rail && solved.voltages.get(chip.rail.name);
   const supply = rail && !isGap(rail) ? rail.typical : undefined;
-  const figures = worstMode(board, solved, uses, listed?.sources, listed?.sinks);
+  const figures = worstMode(board, solved, uses, listed?.sources, listed?.sinks, 'typical')?.figures;
+  const most = worstMode(board, solved, uses, listed?.sources, listed?.sinks, 'most');
   const limit = data.recommended ?? data.absolute ?? null;
   return {
     key: `${chip.name}.${name}`,
@@ -71,6 +60,7 @@ function pinResult(
     rms: figures?.rms ?? null,
     peakSource: figures?.peakSource ?? null,
     peakSink: figures?.peakSink ?? null,
+    corner: most ? { ...most.figures, settings: most.settings } : null,
     limit,
     limitKind: limit === null ? null : data.recommended ? 'recommended' : 'absolute',
     use: figures && limit ? figures.rms / limit.typical : null,
@@ -79,19 +69,25 @@ function pinResult(
   };
 }
 
-function pumpUses(solved: RailVoltages): Use[] {
-  return [...solved.chains].flatMap(([railName, chains]) =>
-    chains.flatMap((chain, index) =>
-      chain.pins.map(({ chip, pin, share }) => ({
-        key: `${chip}.${pin}`,
-        chip,
-        pin,
-        railName,
-        index,
-        share,
-      })),
-    ),
-  );
+/** By chip, then by pin. */
+function pumpUses(solved: RailVoltages): Map<string, Map<string, Use[]>> {
+  const byChip = new Map<string, Map<string, Use[]>>();
+  for (const [railName, chains] of solved.chains)
+    chains.forEach((chain, index) => {
+      for (const { chip, pin, share } of chain.pins) {
+        const byPin = byChip.get(chip) ?? new Map<string, Use[]>();
+        byChip.set(chip, byPin);
+        const use = { key: `${chip}.${pin}`, chip, pin, railName, index, share };
+        byPin.set(pin, [...(byPin.get(pin) ?? []), use]);
+      }
+    });
+  return byChip;
+}
+
+interface PinPoint {
+  readonly figures: DriveFigures;
+  /** Of the pump that takes most of the current. */
+  readonly settings: readonly CornerSetting[];
 }
 
 /** The mode with the largest rms current; undefined when a pump on the pin has no solution. */
@@ -101,18 +97,27 @@ function worstMode(
   uses: readonly Use[],
   sources: Figure | undefined,
   sinks: Figure | undefined,
-): DriveFigures | undefined {
-  let worst: DriveFigures | undefined;
+  which: 'typical' | 'most',
+): PinPoint | undefined {
+  const end = which === 'most' ? 'max' : 'typical';
+  let worst: PinPoint | undefined;
   for (const { name: mode } of weightedModes(board)) {
     const parts: DriveFigures[] = [];
+    let largest = 0;
+    let settings: readonly CornerSetting[] = [];
     for (const use of uses) {
-      const point = solved.pumps.get(use.railName)?.points.find((p) => p.mode === mode);
+      const pump = solved.pumps.get(use.railName);
+      const index = pump?.points.findIndex((p) => p.mode === mode) ?? -1;
+      const corner = pump?.draws[index]?.most;
+      const point = which === 'most' ? corner?.point : pump?.points[index];
       const figures = point?.drives[use.index];
       if (!figures) return undefined;
       parts.push(scaled(figures, use.share));
+      if (figures.rms > largest) settings = corner?.settings ?? [];
+      largest = Math.max(largest, figures.rms);
     }
-    const total = addUp(parts, sources?.typical ?? 0, sinks?.typical ?? 0);
-    if (!worst || total.rms > worst.rms) worst = total;
+    const figures = addUp(parts, sources?.[end] ?? 0, sinks?.[end] ?? 0);
+    if (!worst || figures.rms > worst.figures.rms) worst = { figures, settings };
   }
   return worst;
 }

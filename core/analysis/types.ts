@@ -220,6 +220,8 @@ export interface PinResult {
   readonly rms: number | null;
   readonly peakSource: number | null;
   readonly peakSink: number | null;
+  /** The same where it carries most over all modes and corners. */
+  readonly corner: (DriveFigures & { readonly settings: readonly CornerSetting[] }) | null;
   /** The limit that `use` is measured against, and which of the data sheet's limits it is. */
   readonly limit: Figure | null;
   readonly limitKind: 'recommended' | 'absolute' | null;
@@ -236,6 +238,9 @@ export interface GroupResult {
   readonly chip: Chip;
   readonly source: number;
   readonly sink: number;
+  /** At the corners of its pins that carry most, A. */
+  readonly sourceMost: number;
+  readonly sinkMost: number;
   readonly sourceLimit: Figure | null;
   readonly sinkLimit: Figure | null;
   readonly use: number | null;
@@ -250,6 +255,9 @@ export interface ChipResult {
   /** Sums over its pins in the worst mode, A. */
   readonly sourceTotal: number;
   readonly sinkTotal: number;
+  /** At the corners of its pins that carry most, A. */
+  readonly sourceMost: number;
+  readonly sinkMost: number;
   readonly use: number | null;
 }
 

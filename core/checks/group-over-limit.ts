@@ -15,27 +15,30 @@ export const groupOverLimit: Check = {
   why: 'Pins share bond wires and supply rails inside the chip; each may be within its own limit while their sum is not.',
   run: (analysis) =>
     [...analysis.groups.values()].flatMap((group) => [
-      ...judge(group, 'source', group.source, group.sourceLimit),
-      ...judge(group, 'sink', group.sink, group.sinkLimit),
+      ...judge(group, 'source', group.source, group.sourceMost, group.sourceLimit),
+      ...judge(group, 'sink', group.sink, group.sinkMost, group.sinkLimit),
     ]),
 };
 
 function judge(
   group: GroupResult,
   way: 'source' | 'sink',
-  amps: number,
+  typical: number,
+  most: number,
   limit: Figure | null,
 ): readonly Finding[] {
-  if (limit === null || !(amps > limit.min * (1 + 1e-9))) return [];
-  const most = formatQuantity(limit.min, 'A');
+  if (limit === null || !(Math.max(typical, most) > limit.min * (1 + 1e-9))) return [];
+  const onlyAtCorner = !(typical > limit.min * (1 + 1e-9));
+  const amps = onlyAtCorner ? most : typical;
+  const allowed = formatQuantity(limit.min, 'A');
   return [
     {
       code: 'group-over-limit',
-      severity: 'error',
+      severity: onlyAtCorner ? 'warning' : 'error',
       at: `${group.chip.path}.pins`,
       span: group.chip.keys.get('pins') ?? group.chip.nameSpan,
-      message: `The pins of ${group.key} together ${way} ${formatQuantity(amps, 'A')}, ${formatPercent(amps / limit.min - 1, 2)} above the ${most} allowed for them. Move a load to a pin of another group, or lighten it.`,
-      expected: `at most ${most}`,
+      message: `The pins of ${group.key} together ${way} ${formatQuantity(amps, 'A')}${onlyAtCorner ? ' where each carries most' : ''}, ${formatPercent(amps / limit.min - 1, 2)} above the ${allowed} allowed for them. Move a load to a pin of another group, or lighten it.`,
+      expected: `at most ${allowed}`,
       actual: formatQuantity(amps, 'A'),
       source: originWords(limit.origin),
       related: group.pins.flatMap((name) => {

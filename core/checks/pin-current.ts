@@ -2,6 +2,7 @@
  * The steady current of a pin in the form that its limits are set against: the largest of its averages and its rms.
  */
 import type { PinResult } from '../analysis/types';
+import { cornerWords } from '../analysis/words';
 import { formatQuantity } from '../quantity/write';
 
 export interface SteadyCurrent {
@@ -9,8 +10,10 @@ export interface SteadyCurrent {
   readonly what: 'average sourced' | 'average sunk' | 'rms';
 }
 
+type Figures = Pick<PinResult, 'rms' | 'sourceAverage' | 'sinkAverage' | 'peakSource' | 'peakSink'>;
+
 /** Undefined when nothing of the pin was computed. */
-export function steadyCurrent(pin: PinResult): SteadyCurrent | undefined {
+export function steadyCurrent(pin: Figures): SteadyCurrent | undefined {
   const known: SteadyCurrent[] = [];
   if (pin.rms !== null) known.push({ amps: pin.rms, what: 'rms' });
   if (pin.sourceAverage !== null) known.push({ amps: pin.sourceAverage, what: 'average sourced' });
@@ -20,7 +23,7 @@ export function steadyCurrent(pin: PinResult): SteadyCurrent | undefined {
 }
 
 /** `18 mA rms (average 7 mA out, 7 mA in, peaks 60 mA)`: what one limit is set against, the rest beside it. */
-export function currentWords(pin: PinResult, { amps, what }: SteadyCurrent): string {
+export function currentWords(pin: Figures, { amps, what }: SteadyCurrent): string {
   const rest = [
     pin.sourceAverage === null ? '' : `average ${formatQuantity(pin.sourceAverage, 'A')} out`,
     pin.sinkAverage === null ? '' : `${formatQuantity(pin.sinkAverage, 'A')} in`,
@@ -29,4 +32,25 @@ export function currentWords(pin: PinResult, { amps, what }: SteadyCurrent): str
       : `peaks ${formatQuantity(Math.max(pin.peakSource ?? 0, pin.peakSink ?? 0), 'A')}`,
   ].filter((part) => part !== '');
   return `${formatQuantity(amps, 'A')} ${what} (${rest.join(', ')})`;
+}
+
+/** A pin beyond a limit: at typical values, or only at the corner that is then named. */
+export interface Excess {
+  readonly current: SteadyCurrent;
+  /** `18 mA rms (average ...)`, with the corner behind it where there is one. */
+  readonly words: string;
+  readonly onlyAtCorner: boolean;
+}
+
+/** Undefined when the pin keeps the limit everywhere. */
+export function excessOver(pin: PinResult, limitA: number): Excess | undefined {
+  const beyond = (current: SteadyCurrent | undefined) => current && current.amps > limitA * (1 + 1e-9);
+  const typical = steadyCurrent(pin);
+  if (typical && beyond(typical))
+    return { current: typical, words: currentWords(pin, typical), onlyAtCorner: false };
+  const corner = pin.corner && steadyCurrent(pin.corner);
+  if (!pin.corner || !corner || !beyond(corner)) return undefined;
+  const settings = cornerWords({ value: corner.amps, settings: pin.corner.settings });
+  const at = settings ? ` at the corner: ${settings}` : ' at the end of its tolerance';
+  return { current: corner, words: `${currentWords(pin.corner, corner)}${at}`, onlyAtCorner: true };
 }

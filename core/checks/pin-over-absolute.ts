@@ -6,7 +6,7 @@ import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { currentWords, steadyCurrent } from './pin-current';
+import { excessOver } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
 export const pinOverAbsolute: Check = {
@@ -19,17 +19,18 @@ export const pinOverAbsolute: Check = {
 
 function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
   const limit = pin.data.absolute;
-  const current = steadyCurrent(pin);
-  if (limit === undefined || current === undefined || !(current.amps > limit.min * (1 + 1e-9))) return [];
+  const excess = limit && excessOver(pin, limit.min);
+  if (!limit || !excess) return [];
+  const { current } = excess;
   const most = formatQuantity(limit.min, 'A');
   const over = formatPercent(current.amps / limit.min - 1, 2);
   const pins = Math.ceil(current.amps / limit.min);
   return [
     {
       code: 'pin-over-absolute',
-      severity: 'error',
+      severity: excess.onlyAtCorner ? 'warning' : 'error',
       ...pinPlace(analysis, pin),
-      message: `${pin.key} carries ${currentWords(pin, current)}, ${over} above its absolute maximum of ${most}. A lighter load, at least ${pins} pins in parallel or a driver stage takes it off the pin.`,
+      message: `${pin.key} carries ${excess.words}, ${over} above its absolute maximum of ${most}. A lighter load, at least ${pins} pins in parallel or a driver stage takes it off the pin.`,
       expected: `at most ${most}`,
       actual: `${formatQuantity(current.amps, 'A')} ${current.what}`,
       source: originWords(limit.origin),

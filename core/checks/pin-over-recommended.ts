@@ -7,7 +7,7 @@ import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
-import { currentWords, steadyCurrent } from './pin-current';
+import { excessOver } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
 export const pinOverRecommended: Check = {
@@ -20,19 +20,19 @@ export const pinOverRecommended: Check = {
 
 function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
   const { recommended, absolute } = pin.data;
-  const current = steadyCurrent(pin);
-  if (recommended === undefined || current === undefined) return [];
-  if (!(current.amps > recommended.min * (1 + 1e-9))) return [];
+  const excess = recommended && excessOver(pin, recommended.min);
+  if (!recommended || !excess) return [];
   // The graver finding about the same current says it already.
-  if (absolute && current.amps > absolute.min * (1 + 1e-9)) return [];
+  if (absolute && excessOver(pin, absolute.min)?.onlyAtCorner === excess.onlyAtCorner) return [];
+  const { current } = excess;
   const most = formatQuantity(recommended.min, 'A');
   const over = formatPercent(current.amps / recommended.min - 1, 2);
   return [
     {
       code: 'pin-over-recommended',
-      severity: 'warning',
+      severity: excess.onlyAtCorner ? 'information' : 'warning',
       ...pinPlace(analysis, pin),
-      message: `${pin.key} carries ${currentWords(pin, current)}, ${over} above the ${most} up to which its levels are specified. ${cure(pin, current.amps)}`,
+      message: `${pin.key} carries ${excess.words}, ${over} above the ${most} up to which its levels are specified. ${cure(pin, current.amps)}`,
       expected: `at most ${most}`,
       actual: `${formatQuantity(current.amps, 'A')} ${current.what}`,
       source: originWords(recommended.origin),
