@@ -3,6 +3,7 @@
  * `analyse` runs once per text; every other function reads its immutable result and never parses again.
  */
 import { analyseBoard } from './analysis/analyse-board';
+import { Memory } from './analysis/memory';
 import type { BoardAnalysis } from './analysis/types';
 import { catalogue } from './catalog';
 import { runChecks, sortFindings } from './checks';
@@ -40,13 +41,27 @@ export interface Analysis {
   readonly board: BoardAnalysis;
 }
 
+export interface AnalyseOptions {
+  /** Only a name to show. */
+  readonly file: string;
+  /** Solved pumps of earlier analyses: with it an edit costs no more than the pumps that it reaches. */
+  readonly memory?: PumpMemory;
+}
+
+/** What a caller keeps from one analysis of a text to the next. Its inside is nobody's business. */
+export type PumpMemory = Memory;
+
+export function newMemory(): PumpMemory {
+  return new Memory();
+}
+
 /**
  * Reads and computes a whole board. Never throws: what cannot be read or computed stands in the findings.
  * A byte-order mark is taken off first and counts nowhere; `options.file` is only a name to show.
  */
-export function analyse(text: string, options: { readonly file: string }): Analysis {
+export function analyse(text: string, options: AnalyseOptions): Analysis {
   const plain = stripBom(text);
-  const board = analyseBoard(plain, options.file, catalogue);
+  const board = analyseBoard(plain, options.file, catalogue, options.memory);
   const findings = sortFindings([...board.reading.findings, ...board.problems, ...runChecks(board)]);
   let report: Report | undefined;
   return {

@@ -3,7 +3,7 @@
  * and not before: an editor full of other YAML files never pays for it.
  */
 import type * as vscode from 'vscode';
-import type { Analysis } from '../core/index';
+import type { Analysis, PumpMemory } from '../core/index';
 import { describe, type Log } from './log';
 
 export type Core = typeof import('../core/index');
@@ -16,6 +16,7 @@ interface Kept {
 export class Analyses {
   private core: Promise<Core> | undefined;
   private readonly kept = new WeakMap<vscode.TextDocument, Kept>();
+  private readonly memories = new WeakMap<vscode.TextDocument, PumpMemory>();
 
   constructor(private readonly log: Log) {}
 
@@ -43,7 +44,10 @@ export class Analyses {
       if (kept?.version === document.version) return kept.analysis;
       const start = performance.now();
       const { version } = document;
-      const analysis = core.analyse(document.getText(), { file: fileName(document.uri) });
+      const analysis = core.analyse(document.getText(), {
+        file: fileName(document.uri),
+        memory: this.memoryOf(document, core),
+      });
       this.kept.set(document, { version, analysis });
       this.log.debug(`${fileName(document.uri)}, version ${version}, computed in ${elapsed(start)}.`);
       return analysis;
@@ -51,6 +55,15 @@ export class Analyses {
       this.log.error(`${document.uri.toString()} could not be computed: ${describe(error)}`);
       return undefined;
     }
+  }
+
+  /** Pumps of the versions before: typing recomputes only what it reaches. */
+  private memoryOf(document: vscode.TextDocument, core: Core): PumpMemory {
+    const known = this.memories.get(document);
+    if (known) return known;
+    const memory = core.newMemory();
+    this.memories.set(document, memory);
+    return memory;
   }
 }
 

@@ -108,7 +108,7 @@ function worstMode(
     for (const use of uses) {
       const pump = solved.pumps.get(use.railName);
       const index = pump?.points.findIndex((p) => p.mode === mode) ?? -1;
-      const corner = pump?.draws[index]?.most;
+      const corner = pump?.draws[index]?.sharpest;
       const point = which === 'most' ? corner?.point : pump?.points[index];
       const figures = point?.drives[use.index];
       if (!figures) return undefined;

@@ -61,7 +61,7 @@ export function assemblePump(parts: PumpParts): PumpModel | undefined {
     addDriveVariables(book, source, k, railIndex, ambient, series),
   );
   const { clock } = parts;
-  const frequency = book.add(`${clock.label} frequency`, clock.path, 'Hz', clock.frequency);
+  const frequency = book.add(`${clock.label} frequency`, clock.path, 'Hz', clock.frequency, { sharpens: -1 });
   const duty = book.add(`${clock.label} duty`, clock.path, '1', clock.duty);
 
   const known = new Map<Capacitor, CapacitorPart | undefined>();
@@ -219,7 +219,7 @@ const leastPowerVoltage = 0.5;
 function addLoads(book: Book, { rail, mode, below }: PumpParts): ((p: Point) => LoadValues)[] {
   const loads: ((p: Point) => LoadValues)[] = [];
   const add = (label: string, path: string, unit: 'ohm' | 'A' | 'W', band: Band) => {
-    const variable = book.add(label, path, unit, band, unit === 'ohm' ? -1 : 1);
+    const variable = book.add(label, path, unit, band, { draws: unit === 'ohm' ? -1 : 1 });
     const k = loads.length;
     book.ties((_p, at, tie) => {
       const { index } = at.loads[k]!;

@@ -19,9 +19,14 @@ export class Book {
   readonly #rails = new Map<string, number>();
   readonly #ties: Tying[] = [];
 
-  add(label: string, path: string, unit: Unit, { min, typical, max }: Band, draws?: 1 | -1): number {
-    const band = { min, typical, max };
-    return this.variables.push({ label, path, unit, band, ...(draws === undefined ? {} : { draws }) }) - 1;
+  add(
+    label: string,
+    path: string,
+    unit: Unit,
+    { min, typical, max }: Band,
+    traits: Pick<Variable, 'draws' | 'sharpens'> = {},
+  ): number {
+    return this.variables.push({ label, path, unit, band: { min, typical, max }, ...traits }) - 1;
   }
 
   /** A rail that serves twice is one variable, since it cannot sit at both ends of its band. */

@@ -20,6 +20,8 @@ export interface CapacitorPart {
   at(label: string, volts: number | undefined): PlacedCapacitor;
 }
 
+const sharp = { sharpens: -1 } as const;
+
 /** Undefined when the capacitor has no usable value. `cool`: the board stays at 25 degC, where values are stated. */
 export function capacitorPart(
   book: Book,
@@ -30,23 +32,30 @@ export function capacitorPart(
   const { value, esr, path } = capacitor;
   if (!value || !(value.min > 0)) return undefined;
   const kind = capacitor.kind.data;
-  const farads = book.add(label, path, 'F', nominalBand(capacitor, value));
+  const farads = book.add(label, path, 'F', nominalBand(capacitor, value), sharp);
   const ohms = esr && esr.min > 0 ? book.add(`${label} ESR`, path, 'ohm', esr) : undefined;
   const change = kind?.temperature;
   const warmth =
     change && !cool && change.max > change.min
-      ? book.add(`${label} temperature factor`, path, '1', {
-          min: 1 + change.min,
-          typical: 1 + change.typical,
-          max: 1 + change.max,
-        })
+      ? book.add(
+          `${label} temperature factor`,
+          path,
+          '1',
+          {
+            min: 1 + change.min,
+            typical: 1 + change.typical,
+            max: 1 + change.max,
+          },
+          sharp,
+        )
       : undefined;
   const leak = leakOf(capacitor);
   const leakage = leak && book.add(`${label} leakage resistance`, path, 'ohm', leak);
   return {
     at: (place, volts) => {
       const bias = volts === undefined ? undefined : biasOf(capacitor, volts);
-      const left = bias && book.add(`${place} value left under its direct voltage`, path, '1', bias.band);
+      const left =
+        bias && book.add(`${place} value left under its direct voltage`, path, '1', bias.band, sharp);
       return {
         values: (p, climb) => ({
           farads:

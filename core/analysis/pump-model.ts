@@ -14,6 +14,8 @@ export interface Variable {
   readonly band: Band;
   /** Of a load: +1 when a larger value draws more current, -1 when it draws less. */
   readonly draws?: 1 | -1;
+  /** -1 when a smaller value makes the same charge flow in shorter and higher pulses. */
+  readonly sharpens?: -1;
 }
 
 /** How an engine parameter moves with a variable: `d parameter / d variable` at the given point. */

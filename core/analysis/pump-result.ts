@@ -47,6 +47,7 @@ export function solvePump(topology: Topology, modes: readonly SettledMode[]): Pu
     draws: solved.map(({ mode, at }) => ({
       most: drawCorner(mode.model, mode.mode, at, 1) ?? null,
       least: drawCorner(mode.model, mode.mode, at, -1) ?? null,
+      sharpest: drawCorner(mode.model, mode.mode, at, 1, true) ?? null,
     })),
     estimate: estimatePump(topology, values, point.loadCurrent),
     influences: influences(heaviest.mode.model, heaviest.at),

@@ -31,7 +31,9 @@ export function solvedPoints(pump: PumpResult): readonly PumpPoint[] {
   return [
     ...pump.points,
     ...ends.flatMap(({ point }) => (point ? [point] : [])),
-    ...pump.draws.flatMap(({ most, least }) => [most, least].flatMap((each) => (each ? [each.point] : []))),
+    ...pump.draws.flatMap(({ most, least, sharpest }) =>
+      [most, least, sharpest].flatMap((each) => (each ? [each.point] : [])),
+    ),
   ];
 }
 

@@ -76,16 +76,16 @@ export function railSolver(
   };
   const around = (rail: Rail): Surroundings => ({
     voltage,
-    below: (mode) => drawn.below(rail.name, mode),
+    below: (mode) => rounded(drawn.below(rail.name, mode)),
     source: (name, mode) => {
       const band = voltage(name);
       if (isGap(band)) return band;
       const supply = supplyOf(board, name);
-      if (!supply?.ohms) return { name, band };
+      if (!supply?.ohms) return { name, band: rounded(band) };
       const all = drawn.total(name, mode);
       const own = drawn.byPump(name, mode, rail.name);
       const others = { min: all.min - own.min, typical: all.typical - own.typical, max: all.max - own.max };
-      return { name, band: sagged(supply.band, supply.ohms, others), ohms: supply.ohms };
+      return { name, band: rounded(sagged(supply.band, supply.ohms, others)), ohms: supply.ohms };
     },
   });
   /** Over all modes: the heaviest makes the typical voltage. */
@@ -179,6 +179,15 @@ function sagged(band: Band, ohms: Band, { min: least, typical, max: most }: Band
     typical: sag(band.typical, ohms.typical * typical),
     max: Math.max(...ends),
   };
+}
+
+/**
+ * Six digits: far finer than the solver's own error, and coarse enough that a change elsewhere on the board which no
+ * meter would see does not ask for every pump to be solved again.
+ */
+function rounded({ min, typical, max }: Band): Band {
+  const digits = (value: number) => Number(value.toPrecision(6));
+  return { min: digits(min), typical: digits(typical), max: digits(max) };
 }
 
 /** A voltage less a drop in magnitude. */

@@ -150,7 +150,12 @@ export interface PumpResult {
   readonly voltage: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
   readonly ripple: { readonly lowest: CornerEnd; readonly highest: CornerEnd };
   /** In the order of `points`: where the pump draws most and least in that mode; null where it has no solution. */
-  readonly draws: readonly { readonly most: CornerPoint | null; readonly least: CornerPoint | null }[];
+  readonly draws: readonly {
+    readonly most: CornerPoint | null;
+    readonly least: CornerPoint | null;
+    /** As `most`, with the highest pulses. */
+    readonly sharpest: CornerPoint | null;
+  }[];
   readonly estimate: PumpEstimate | null;
   /** Quantities that move the output, most influential first: change of voltage over the quantity's band, V. */
   readonly influences: readonly { readonly label: string; readonly path: string; readonly volts: number }[];
