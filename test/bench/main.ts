@@ -2,6 +2,7 @@
  * `npm run bench`: prints every table; `RANDOM_CIRCUITS` sets how many random circuits are tried.
  */
 import type { SimplePump } from '../support/simple-pump';
+import { benchBoardGrowth } from './board-growth';
 import { benchEngine, benchGrowth, benchRandom } from './engine';
 import { benchDerivatives, benchRivals, benchScaling } from './rivals';
 
@@ -38,6 +39,7 @@ console.log(
     }),
     benchDerivatives(),
     benchScaling(),
+    benchBoardGrowth(),
     benchRandom(count),
   ].join('\n\n'),
 );
