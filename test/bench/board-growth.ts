@@ -7,13 +7,13 @@ import { table } from './table';
 /** Doublers side by side on one regulated rail; `changed` is the flying capacitor of the one in the middle. */
 function board(count: number, changed: string): string {
   const clocks = Array.from(
-    { length: count },
+    { length: Math.min(count, 50) },
     (_, k) => `  c${k}: { pin: mcu.P${k}, frequency: 100 kHz, duty: 50 % }`,
   );
   const rails = Array.from({ length: count }, (_, k) => {
     const flying = k === Math.floor(count / 2) ? changed : '1 uF';
     return `  r${k}:
-    pump: { topology: doubler, input: v5, drive: c${k}, diode: d, flying: { value: ${flying}, kind: x7r, rated: 16 V }, reservoir: { value: 10 uF, kind: x7r, rated: 25 V } }
+    pump: { topology: doubler, input: v5, drive: c${k % 50}, diode: d, flying: { value: ${flying}, kind: x7r, rated: 16 V }, reservoir: { value: 10 uF, kind: x7r, rated: 25 V } }
     needs: { voltage: 8..10 V }
     loads: { x: ${(1 + (k % 10) / 10).toFixed(1)} mA }`;
   });
@@ -32,6 +32,14 @@ ${rails.join('\n')}
 `;
 }
 
+/** Milliseconds of processor time, which other work on the machine disturbs least. */
+function busy(run: () => void): number {
+  const start = process.cpuUsage();
+  run();
+  const { user, system } = process.cpuUsage(start);
+  return (user + system) / 1000;
+}
+
 interface Cost {
   readonly count: number;
   readonly whole: number;
@@ -48,13 +56,15 @@ function costOf(count: number): Cost {
   let edited = 0;
   for (let round = 0; round < rounds; round++) {
     const memory = newMemory();
-    const start = performance.now();
-    analyse(board(count, '1 uF'), { file: 'rails.yaml', memory });
-    const middle = performance.now();
+    whole = Math.min(
+      whole,
+      busy(() => analyse(board(count, '1 uF'), { file: 'rails.yaml', memory })),
+    );
     solved = memory.solved;
-    analyse(board(count, '2.2 uF'), { file: 'rails.yaml', memory });
-    edit = Math.min(edit, performance.now() - middle);
-    whole = Math.min(whole, middle - start);
+    edit = Math.min(
+      edit,
+      busy(() => analyse(board(count, '2.2 uF'), { file: 'rails.yaml', memory })),
+    );
     edited = memory.solved;
   }
   return { count, whole, solved, edit, edited };
