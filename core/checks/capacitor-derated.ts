@@ -5,6 +5,7 @@ import { stressedParts } from '../analysis/pump-stress';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
+import { rateFor } from './fixes';
 import { worstByPath } from './worst-parts';
 
 /** Share of the value below which a smaller part of a better kind would serve as well (common practice, no source). */
@@ -37,6 +38,7 @@ export const capacitorDerated: Check = {
             expected: `at least ${formatPercent(leastLeft)} of the value`,
             actual: formatPercent(left, 2),
             source: kind.data.bias[0]?.left.origin.note ?? 'curve of the kind',
+            fixes: rateFor(capacitor, 2 * rated.typical),
           },
         ];
       }),

@@ -5,6 +5,7 @@ import { stressedParts } from '../analysis/pump-stress';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
+import { rateFor } from './fixes';
 import { worstByPath } from './worst-parts';
 
 /** Share of the rating that is used at most (common practice, no source): solid tantalum fails shorted. */
@@ -43,6 +44,7 @@ export const capacitorRating: Check = {
             expected: `at most ${formatQuantity(allowed, 'V')}`,
             actual: stands,
             source: 'rating of the file; derating common practice, no source',
+            fixes: rateFor(capacitor, highest / share),
           },
         ];
       }),

@@ -6,6 +6,7 @@ import { inMode } from '../analysis/words';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
 import type { Finding } from './finding';
+import { diodeFor } from './fixes';
 import { worstByPath } from './worst-parts';
 
 export const diodeCurrent: Check = {
@@ -19,7 +20,7 @@ export const diodeCurrent: Check = {
         stressedParts(result).diodes,
         ({ diode }) => diode.path,
         ({ highestPeak }) => highestPeak,
-      ).flatMap(({ diode, figures, highestAverage, highestPeak }): Finding[] => {
+      ).flatMap(({ diode, figures, highest, highestAverage, highestPeak }): Finding[] => {
         const name = diode.ref?.name ?? 'The diode';
         const mode = inMode(result.pump?.heaviest.mode);
         return (['average', 'peak'] as const).flatMap((kind): Finding[] => {
@@ -39,6 +40,11 @@ export const diodeCurrent: Check = {
               expected: `at most ${limit}`,
               actual: amps,
               source: rating.origin.note ?? rating.origin.kind,
+              fixes: diodeFor(analysis, diode, {
+                reverse: highest,
+                average: highestAverage,
+                peak: highestPeak,
+              }),
             },
           ];
         });

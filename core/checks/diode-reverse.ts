@@ -4,6 +4,7 @@
 import { stressedParts } from '../analysis/pump-stress';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
+import { diodeFor } from './fixes';
 import { worstByPath } from './worst-parts';
 
 export const diodeReverse: Check = {
@@ -17,7 +18,7 @@ export const diodeReverse: Check = {
         stressedParts(result).diodes,
         ({ diode }) => diode.path,
         ({ highest }) => highest,
-      ).flatMap(({ diode, figures, highest }) => {
+      ).flatMap(({ diode, figures, highest, highestAverage, highestPeak }) => {
         const rating = diode.data?.reverse;
         if (!rating || highest <= rating.min) return [];
         const limit = formatQuantity(rating.min, 'V');
@@ -32,6 +33,11 @@ export const diodeReverse: Check = {
             expected: `at most ${limit}`,
             actual: formatQuantity(highest, 'V'),
             source: rating.origin.note ?? rating.origin.kind,
+            fixes: diodeFor(analysis, diode, {
+              reverse: highest,
+              average: highestAverage,
+              peak: highestPeak,
+            }),
           },
         ];
       }),

@@ -2,8 +2,10 @@
  * A push-pull stage whose bases hang on one resistor: both emitter junctions stand in series across the supply.
  */
 import { formatQuantity } from '../quantity/write';
+import type { Span } from '../text/span';
 import type { Check } from './check';
 import { stagesOf } from './driver-stages';
+import type { Fix } from './finding';
 
 export const driverSharedBase: Check = {
   code: 'driver-shared-base',
@@ -25,7 +27,17 @@ export const driverSharedBase: Check = {
           expected: 'one resistor for each base',
           actual: 'one for both',
           source: 'solution of the circuit at typical values',
+          fixes: separate(analysis.text, shared.span),
         },
       ];
     }),
 };
+
+/** One resistor of the same value for each base. */
+function separate(text: string, value: Span | undefined): readonly Fix[] {
+  const key = value ? text.lastIndexOf('shared-base', value.start) : -1;
+  if (!value || key < 0) return [];
+  const ohms = text.slice(value.start, value.end);
+  const edit = { span: { start: key, end: value.end }, text: `base: { npn: ${ohms}, pnp: ${ohms} }` };
+  return [{ title: `Give each base ${ohms} of its own`, edits: [edit], preferred: true }];
+}

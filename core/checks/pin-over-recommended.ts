@@ -5,8 +5,10 @@
 import type { BoardAnalysis, PinResult } from '../analysis/types';
 import { originWords } from '../analysis/words';
 import { formatPercent, formatQuantity } from '../quantity/write';
+import { insertAfter, insertFirst } from '../text/insert-key';
 import type { Check } from './check';
-import type { Finding } from './finding';
+import type { Finding, Fix } from './finding';
+import { replaceWith } from './fixes';
 import { excessOver } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
@@ -37,14 +39,46 @@ function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
       actual: `${formatQuantity(current.amps, 'A')} ${current.what}`,
       source: originWords(recommended.origin),
       related: drivenRails(analysis, pin),
+      fixes: strengthen(analysis, pin, current.amps),
     },
   ];
 }
 
-function cure(pin: PinResult, amps: number): string {
+/** The weakest drive setting that covers the current. */
+function enough(pin: PinResult, amps: number): string | undefined {
   const chip = pin.chip.part?.data;
   const settings = chip?.pin[pin.name]?.strengths ?? chip?.pins.strengths ?? {};
-  const enough = Object.entries(settings).find(([, data]) => (data.recommended?.min ?? 0) >= amps);
-  if (enough !== undefined) return `Its ${enough[0]} drive setting covers that.`;
+  return Object.entries(settings).find(([, data]) => (data.recommended?.min ?? 0) >= amps)?.[0];
+}
+
+function strengthen({ text }: BoardAnalysis, pin: PinResult, amps: number): readonly Fix[] {
+  const setting = enough(pin, amps);
+  if (setting === undefined) return [];
+  const title = `Set ${pin.key} to ${setting}`;
+  const listed = pin.chip.pins.get(pin.name);
+  if (listed?.strength) return replaceWith(title, listed.strength.span, setting);
+  const edit = listed
+    ? insertFirst(text, listed.keys.values(), 'strength', setting)
+    : pin.chip.pins.size > 0
+      ? insertFirst(
+          text,
+          [...pin.chip.pins.values()].map(({ nameSpan }) => nameSpan),
+          pin.name,
+          `{ strength: ${setting} }`,
+        )
+      : pin.chip.part?.ref &&
+        insertAfter(
+          text,
+          pin.chip.keys.values(),
+          pin.chip.part.ref.span,
+          'pins',
+          `{ ${pin.name}: { strength: ${setting} } }`,
+        );
+  return edit ? [{ title, edits: [edit], preferred: true }] : [];
+}
+
+function cure(pin: PinResult, amps: number): string {
+  const setting = enough(pin, amps);
+  if (setting !== undefined) return `Its ${setting} drive setting covers that.`;
   return 'A lighter load, pins in parallel or a driver stage brings it back.';
 }

@@ -6,7 +6,8 @@ import { originWords } from '../analysis/words';
 import { nextPreferredUp } from '../quantity/preferred';
 import { formatQuantity } from '../quantity/write';
 import type { Check } from './check';
-import type { Finding } from './finding';
+import type { Finding, Fix } from './finding';
+import { seriesOf } from './fixes';
 import { steadyCurrent } from './pin-current';
 import { drivenRails, pinPlace } from './pin-place';
 
@@ -37,14 +38,30 @@ function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
       actual: formatQuantity(peak, 'A'),
       source: originWords(limit.origin),
       related: drivenRails(analysis, pin),
+      fixes: fixesFor(analysis, pin, peak / limit.min),
     },
   ];
 }
 
-/** The peak is a voltage over the resistance in its way: the missing resistance follows from the ratio. */
+/** With more resistance the capacitors no longer equalise, and the voltage behind the peak grows by about this. */
+const grows = 1.4;
+
+/** The peak is a voltage over the resistance in its way: what is missing there follows from the ratio. */
+function missingOhms(pin: PinResult, ratio: number, series = 0): number | undefined {
+  const present = Math.max(pin.highResistance?.typical ?? 0, pin.lowResistance?.typical ?? 0) + series;
+  return present > 0 ? nextPreferredUp(present * (grows * ratio - 1), 'E12') : undefined;
+}
+
+/** Only where one pump hangs on the pin is its series resistor the whole answer. */
+function fixesFor(analysis: BoardAnalysis, pin: PinResult, ratio: number): readonly Fix[] {
+  const rail = pin.drives.length === 1 ? analysis.rails.get(pin.drives[0]!)?.rail : undefined;
+  const present = rail?.origin?.kind === 'pump' ? (rail.origin.pump.series?.typical ?? 0) : 0;
+  const ohms = missingOhms(pin, ratio, present);
+  return rail && ohms ? seriesOf(analysis, rail, nextPreferredUp(present + ohms, 'E12')) : [];
+}
+
 function cure(pin: PinResult, ratio: number): string {
-  const present = Math.max(pin.highResistance?.typical ?? 0, pin.lowResistance?.typical ?? 0);
-  if (!(present > 0)) return 'A resistor in series with the drive bounds them.';
-  const proposed = nextPreferredUp(present * (ratio - 1), 'E12');
+  const proposed = missingOhms(pin, ratio);
+  if (proposed === undefined) return 'A resistor in series with the drive bounds them.';
   return `A resistor of about ${formatQuantity(proposed, 'ohm')} in series with the drive (\`series\`) bounds them; the rail pays for it.`;
 }
