@@ -18,6 +18,8 @@ import { toReport } from './report/json';
 import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
+import { yieldMarkdown as writeYieldMarkdown } from './report/yield-markdown';
+import { yieldText as writeYieldText } from './report/yield-text';
 import { stripBom } from './text/bom';
 
 export { mostSamples, usualSamples } from './analysis/monte-carlo';
@@ -123,4 +125,17 @@ export function yieldRun(
   options: YieldOptions,
 ): Generator<YieldProgress, YieldResult, void> {
   return monteCarlo(analysis.board, options);
+}
+
+/** The result of a Monte Carlo run for a terminal of `width` characters. */
+export function yieldText(
+  result: YieldResult,
+  { colour, width }: { readonly colour: boolean; readonly width: number },
+): string {
+  return writeYieldText(result, { palette: colour ? colourPalette : plainPalette, width });
+}
+
+/** The same as a Markdown document. */
+export function yieldMarkdown(result: YieldResult): string {
+  return writeYieldMarkdown(result);
 }

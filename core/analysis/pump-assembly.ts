@@ -161,9 +161,7 @@ function all<T>(list: readonly (T | undefined)[]): readonly T[] | undefined {
 function addRail(book: Book, { name, band, ohms }: RailSource, k: number) {
   const volts = book.rail(name, band);
   const resistance =
-    ohms && ohms.max > 0
-      ? book.add(sourceLabel(name), `rails.${name}`, 'ohm', ohms)
-      : undefined;
+    ohms && ohms.max > 0 ? book.add(sourceLabel(name), `rails.${name}`, 'ohm', ohms) : undefined;
   book.ties((_p, at, tie) => {
     const place = at.rails[k]!;
     tie(volts, { kind: 'volts', index: place.known }, 1);

@@ -149,12 +149,7 @@ class Planner {
   }
 
   /** Values of all of a pump's variables in the present sample; undefined when a rail below has no steady state. */
-  #point(
-    rail: Rail,
-    model: PumpModel,
-    mode: number,
-    used: Set<number>,
-  ): () => readonly number[] | undefined {
+  #point(rail: Rail, model: PumpModel, mode: number, used: Set<number>): () => readonly number[] | undefined {
     const readers = model.variables.map((variable) => this.#variable(rail, variable, mode, used));
     return () => {
       const at: number[] = [];

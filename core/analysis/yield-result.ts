@@ -44,7 +44,11 @@ export interface RailYield {
   readonly outcome: Outcome | null;
   readonly because?: string;
   /** Samples that miss the weak end of the window, its strong end, the ripple; null where that is no need. */
-  readonly misses: { readonly low: number | null; readonly high: number | null; readonly ripple: number | null };
+  readonly misses: {
+    readonly low: number | null;
+    readonly high: number | null;
+    readonly ripple: number | null;
+  };
   /** In magnitude the lowest and highest voltage, and the largest ripple, of all samples and modes. */
   readonly weakest: Seen | null;
   readonly strongest: Seen | null;

@@ -77,7 +77,11 @@ export class RailTally {
       missed.low ||= this.#weak !== undefined && isBeyond(this.#weak, volts);
       missed.high ||= this.#strong !== undefined && isBeyond(this.#strong, volts);
       this.#spreads[k]!.volts.push(volts);
-      const seen = (value: number): Seen => ({ value, ...(mode === undefined ? {} : { mode }), sample: number });
+      const seen = (value: number): Seen => ({
+        value,
+        ...(mode === undefined ? {} : { mode }),
+        sample: number,
+      });
       const sign = this.#sign;
       size = Math.min(size, sign * volts);
       if (!this.#weakest || sign * volts < sign * this.#weakest.value) this.#weakest = seen(volts);

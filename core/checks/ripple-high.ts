@@ -28,7 +28,9 @@ function judge(result: RailResult, pump: PumpResult, allowed: Figure): readonly 
   const worst = pump.points.reduce((a, b) => (b.ripple > a.ripple ? b : a));
   if (isTooMuchRipple(allowed, worst.ripple)) return [toFinding(result, allowed, worst.ripple, worst)];
   const corner = pump.ripple.highest;
-  return isTooMuchRipple(allowed, corner.value) ? [toFinding(result, allowed, corner.value, worst, corner)] : [];
+  return isTooMuchRipple(allowed, corner.value)
+    ? [toFinding(result, allowed, corner.value, worst, corner)]
+    : [];
 }
 
 function toFinding(
