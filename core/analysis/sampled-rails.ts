@@ -1,29 +1,36 @@
 /**
- * The rails of a board in one sample of it: supplies and regulators within their bands, and each pump solved on the
- * voltages that the same sample has below it. Currents that sag a supply are those of the typical board.
+ * The rails of a board in one sample of it: each pump solved on the voltages that the same sample has below it.
  */
-import type { Board, Rail, Regulator } from '../model/board';
+import type { Board, Rail } from '../model/board';
 import { weightedModes } from './board-modes';
 import { boardCurrents } from './currents';
-import { type Drawn, drawnFrom } from './drawn';
+import { drawnFrom } from './drawn';
 import { type Gap, isGap } from './gap';
-import type { Lots, Reader } from './lots';
+import type { Lots } from './lots';
 import { railLabel, sourceLabel } from './pump-book';
 import type { PumpModel, Variable } from './pump-model';
 import { type Reached, samplePump } from './pump-sample';
 import { type RailVoltages, railVoltages } from './rail-voltages';
-import { supplyResistance, supplyVoltage } from './supply-voltage';
+import {
+  type Around,
+  type SampledSource,
+  sampledFilter,
+  sampledRegulator,
+  sampledSupply,
+  sourceOhms,
+} from './sampled-sources';
 
 /** What a rail reaches in the present sample in the mode of that index; undefined when it has no steady state. */
 type Reach = (mode: number) => Reached | undefined;
+type Value = () => number | undefined;
 
 export interface SampledRail {
   readonly rail: Rail;
   readonly reach: Reach;
   /** Lots that it depends on, its own and those of the rails below. */
   readonly used: ReadonlySet<number>;
-  /** As the pump behind another rail's name sees it: without that pump's own current. */
-  readonly behind: (pump: string, mode: number) => number | undefined;
+  /** As the pump of that name sees it: without that pump's own current. `used` learns of further lots. */
+  behind(pump: string, mode: number, used: Set<number>): Value;
 }
 
 export interface SampledBoard {
@@ -38,9 +45,10 @@ export interface SampledBoard {
 export function sampledBoard(board: Board, lots: Lots): SampledBoard {
   const solved = railVoltages(board);
   const drawn = drawnFrom(board, solved, boardCurrents(board, solved));
-  const planner = new Planner(board, lots, solved, drawn);
+  const modes = weightedModes(board).map(({ name }) => name);
+  const planner = new Planner({ board, lots, drawn, modes }, solved);
   return {
-    modes: planner.modes,
+    modes,
     next: () => planner.next(),
     rail: (name) => {
       const voltage = solved.voltages.get(name);
@@ -51,18 +59,13 @@ export function sampledBoard(board: Board, lots: Lots): SampledBoard {
 }
 
 class Planner {
-  readonly modes: readonly (string | undefined)[];
   readonly #planned = new Map<string, SampledRail | undefined>();
   readonly #memos: Map<number, Reached | undefined>[] = [];
 
   constructor(
-    private readonly board: Board,
-    private readonly lots: Lots,
+    private readonly around: Around,
     private readonly solved: RailVoltages,
-    private readonly drawn: Drawn,
-  ) {
-    this.modes = weightedModes(board).map(({ name }) => name);
-  }
+  ) {}
 
   next(): void {
     for (const memo of this.#memos) memo.clear();
@@ -71,7 +74,7 @@ class Planner {
   /** Undefined for a rail without a voltage. */
   rail(name: string): SampledRail | undefined {
     if (this.#planned.has(name)) return this.#planned.get(name);
-    const rail = this.board.rails.get(name);
+    const rail = this.around.board.rails.get(name);
     const voltage = this.solved.voltages.get(name);
     const planned = rail && voltage && !isGap(voltage) ? this.#plan(rail) : undefined;
     this.#planned.set(name, planned);
@@ -79,73 +82,53 @@ class Planner {
   }
 
   #plan(rail: Rail): SampledRail | undefined {
-    switch (rail.origin?.kind) {
+    const { origin } = rail;
+    switch (origin?.kind) {
       case 'supply':
-        return this.#supply(rail, rail.origin.supply.name);
-      case 'regulator':
-        return this.#regulator(rail, rail.origin.regulator);
+        return this.#source(rail, sampledSupply(this.around, rail, origin.supply.name));
+      case 'regulator': {
+        const { from } = origin.regulator;
+        return this.#source(
+          rail,
+          sampledRegulator(this.around, rail, origin.regulator, from && this.rail(from.name)),
+        );
+      }
+      case 'filter': {
+        const input = origin.filter.from && this.rail(origin.filter.from.name);
+        return input && this.#source(rail, sampledFilter(this.around, rail, origin.filter, input));
+      }
       case 'pump':
         return this.#pump(rail);
-      default: {
-        const used = new Set<number>();
-        const band = this.solved.voltages.get(rail.name);
-        if (!band || isGap(band)) return undefined;
-        const volts = this.lots.reader(railLabel(rail.name), rail.path, band, used);
-        return this.#finish(rail, used, () => ({ volts: volts(), ripple: null }));
-      }
+      default:
+        return undefined;
     }
   }
 
-  #supply(rail: Rail, name: string): SampledRail | undefined {
-    const supply = this.board.supplies.get(name);
-    const open = supply && supplyVoltage(supply);
-    if (!supply || !open) return undefined;
-    const used = new Set<number>();
-    const volts = this.lots.reader(`supply ${name}`, supply.path, open, used);
-    const ohms = this.#source(rail, used);
-    const total = (mode: number) => this.drawn.total(rail.name, this.modes[mode]);
-    const reach: Reach = (mode) => ({ volts: volts() - (ohms?.() ?? 0) * total(mode), ripple: null });
-    const behind = (pump: string, mode: number) => {
-      const own = this.drawn.byPump(rail.name, this.modes[mode], pump);
-      return volts() - (ohms?.() ?? 0) * (total(mode) - own);
-    };
-    return { ...this.#finish(rail, used, reach), behind };
-  }
-
-  /** Source resistance of the supply that a rail is, one for all rails of that supply. */
-  #source(rail: Rail, used: Set<number>): Reader | undefined {
-    const supply =
-      rail.origin?.kind === 'supply' ? this.board.supplies.get(rail.origin.supply.name) : undefined;
-    const ohms = supply && supplyResistance(supply);
-    return ohms ? this.lots.reader(`supply ${supply.name} resistance`, supply.path, ohms, used) : undefined;
-  }
-
-  #regulator(rail: Rail, regulator: Regulator): SampledRail | undefined {
-    const { output, dropout, from, kind } = regulator;
-    if (!output) return undefined;
-    const used = new Set<number>();
-    const path = `${rail.path}.regulator`;
-    const held = this.lots.reader(`${rail.name} regulator output`, path, output, used);
-    const input = from && this.rail(from.name);
-    // As in the analysis: without a known input, or where its dropout does not matter, it is taken at its word.
-    if (!input || !dropout || kind === 'switching')
-      return this.#finish(rail, used, () => ({ volts: held(), ripple: null }));
-    const lost = this.lots.reader(`${rail.name} regulator dropout`, path, dropout, used);
-    return this.#finish(rail, new Set([...used, ...input.used]), (mode) => {
-      const below = input.reach(mode);
-      return below && { volts: Math.min(held(), below.volts - lost()), ripple: null };
+  #source(rail: Rail, source: SampledSource | undefined): SampledRail | undefined {
+    if (!source) return undefined;
+    const { behind } = source;
+    const reach = this.#once((mode) => {
+      const volts = source.volts(mode);
+      return volts === undefined ? undefined : { volts, ripple: null };
     });
+    return {
+      rail,
+      used: source.used,
+      reach,
+      behind: behind ?? ((_pump, mode) => () => reach(mode)?.volts),
+    };
   }
 
   #pump(rail: Rail): SampledRail | undefined {
     const models = this.solved.models.get(rail.name);
-    if (!models || models.length !== this.modes.length) return undefined;
+    if (!models || models.length !== this.around.modes.length) return undefined;
     const used = new Set<number>();
     const points = models.map(({ model }, mode) => this.#point(rail, model, mode, used));
-    return this.#finish(rail, used, (mode) => {
+    const reach = this.#once((mode) => {
       const at = points[mode]!();
       return at && samplePump(models[mode]!.model, at);
     });
+    return { rail, used, reach, behind: (_pump, mode) => () => reach(mode)?.volts };
   }
 
   /** Values of all of a pump's variables in the present sample; undefined when a rail below has no steady state. */
@@ -162,34 +145,27 @@ class Planner {
     };
   }
 
-  #variable(
-    rail: Rail,
-    { label, path, band }: Variable,
-    mode: number,
-    used: Set<number>,
-  ): () => number | undefined {
-    for (const below of this.board.rails.values()) {
+  /** Voltages below the pump are those of the sample, everything else is drawn. */
+  #variable(rail: Rail, { label, path, band }: Variable, mode: number, used: Set<number>): Value {
+    for (const below of this.around.board.rails.values()) {
       if (path !== below.path) continue;
-      if (label === sourceLabel(below.name)) {
-        const source = this.#source(below, used);
-        if (source) return source;
-      }
+      const ohms = label === sourceLabel(below.name) ? sourceOhms(this.around, below, used) : undefined;
+      if (ohms) return ohms;
       const planned = label === railLabel(below.name) ? this.rail(below.name) : undefined;
       if (!planned) continue;
       for (const lot of planned.used) used.add(lot);
-      return () => planned.behind(rail.name, mode);
+      return planned.behind(rail.name, mode, used);
     }
-    return this.lots.reader(label, path, band, used);
+    return this.around.lots.reader(label, path, band, used);
   }
 
   /** Each rail is reached once in a sample and mode. */
-  #finish(rail: Rail, used: ReadonlySet<number>, compute: Reach): SampledRail {
+  #once(compute: Reach): Reach {
     const memo = new Map<number, Reached | undefined>();
     this.#memos.push(memo);
-    const reach: Reach = (mode) => {
+    return (mode) => {
       if (!memo.has(mode)) memo.set(mode, compute(mode));
       return memo.get(mode);
     };
-    return { rail, used, reach, behind: (_pump, mode) => reach(mode)?.volts };
   }
 }

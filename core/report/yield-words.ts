@@ -153,7 +153,7 @@ export function confidenceWords(result: YieldResult): readonly string[] {
       : [`Not judged here: ${notJudged.map(({ rail, need }) => `needs.${need} of ${rail}`).join(', ')}.`]),
     'Parts are drawn independently of each other, and what the file states once for several parts is drawn once. ' +
       'Parts from one reel may all lie at the same end: see the corners for the worst. ' +
-      'What rails take from each other is typical.',
+      'What rails take from each other is drawn between its least and its most.',
   ];
 }
 

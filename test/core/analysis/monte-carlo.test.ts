@@ -28,6 +28,20 @@ rails: { v5: { supply: lab, needs: { voltage: 4.75..5.05 V }, loads: { x: 100 mA
     expect(v5.leading[0]!.correlation).toBeCloseTo(-1, 9);
   });
 
+  it('a supply and a filter that give way to a load with a band', () => {
+    // Behind 1 ohm, 5 V on 100..300 mA is even in 4.7..4.9 V: above 4.75 V three quarters, above 4.8 V half. Behind
+    // 5 ohm more and 10 mA of its own, the filter loses another 50 mV.
+    const board = `supplies: { lab: { voltage: 5 V, resistance: 1 ohm } }
+rails:
+  v5: { supply: lab, needs: { voltage: 4.75 V }, loads: { x: 90..190..290 mA } }
+  quiet: { filter: { from: v5, resistor: 5 ohm, capacitor: 10 uF }, needs: { voltage: 4.75 V }, loads: { y: 10 mA } }`;
+    const result = yieldOf(board, { samples });
+    expectShare(railOf(result, 'v5').outcome!.met, samples, 3 / 4);
+    expectShare(railOf(result, 'quiet').outcome!.met, samples, 1 / 2);
+    expect(result.outcome!.met).toBe(railOf(result, 'quiet').outcome!.met);
+    expect(railOf(result, 'quiet').leading.map(({ label }) => label)).toEqual(['current out of v5']);
+  });
+
   it('a regulator that runs short of input', () => {
     // Holds 5 V where the input, even in 5.2..5.8 V, is more than the dropout, even in 0.3..0.5 V, above: 2/3.
     const result = yieldOf(
