@@ -4,7 +4,9 @@
  */
 import { analyseBoard } from './analysis/analyse-board';
 import { Memory } from './analysis/memory';
+import { monteCarlo } from './analysis/monte-carlo';
 import type { BoardAnalysis } from './analysis/types';
+import type { YieldOptions, YieldProgress, YieldResult } from './analysis/yield-result';
 import { catalogue } from './catalog';
 import { runChecks, sortFindings } from './checks';
 import type { Finding } from './checks/finding';
@@ -16,8 +18,12 @@ import { toReport } from './report/json';
 import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
+import { yieldMarkdown as writeYieldMarkdown } from './report/yield-markdown';
+import { yieldText as writeYieldText } from './report/yield-text';
 import { stripBom } from './text/bom';
 
+export { mostSamples, usualSamples } from './analysis/monte-carlo';
+export type { YieldOptions, YieldProgress, YieldResult } from './analysis/yield-result';
 export type { Finding, FindingCode, Fix, Related, Severity } from './checks/finding';
 export type { Card, Picture, Theme } from './features/card';
 export type { PumpRail } from './features/rails';
@@ -108,4 +114,28 @@ export function railAt(analysis: Analysis, offset: number): string | undefined {
 /** Smallest preferred capacitors with which a pump rail meets its needs. */
 export function sizeRail(analysis: Analysis, rail: string): Sizing {
   return size(analysis.board, rail, catalogue);
+}
+
+/**
+ * A Monte Carlo run of the board against its needs, one sample for each step: a host shows the progress that it
+ * yields, stops when told to, and finds the result in the last step. The first step comes before any work.
+ */
+export function yieldRun(
+  analysis: Analysis,
+  options: YieldOptions,
+): Generator<YieldProgress, YieldResult, void> {
+  return monteCarlo(analysis.board, options);
+}
+
+/** The result of a Monte Carlo run for a terminal of `width` characters. */
+export function yieldText(
+  result: YieldResult,
+  { colour, width }: { readonly colour: boolean; readonly width: number },
+): string {
+  return writeYieldText(result, { palette: colour ? colourPalette : plainPalette, width });
+}
+
+/** The same as a Markdown document. */
+export function yieldMarkdown(result: YieldResult): string {
+  return writeYieldMarkdown(result);
 }

@@ -4,8 +4,9 @@
  */
 import * as vscode from 'vscode';
 import { Analyses } from './analyses';
-import { showLogCommand, sizeRailCommand } from './commands/names';
+import { runYieldCommand, showLogCommand, sizeRailCommand } from './commands/names';
 import { sizeRailHandler } from './commands/size-rail';
+import { yieldHandler } from './commands/yield';
 import { registerDiagnostics } from './diagnostics';
 import { selector } from './files';
 import { createLog } from './log';
@@ -33,6 +34,7 @@ export function activate(context: vscode.ExtensionContext): Api {
       sizeRailCommand,
       sizeRailHandler(analyses, showLog, (line) => log.info(line)),
     ),
+    vscode.commands.registerCommand(runYieldCommand, yieldHandler(analyses)),
     vscode.commands.registerCommand(showLogCommand, showLog),
   );
   return { coreLoaded: () => analyses.coreLoaded };

@@ -10,7 +10,7 @@ import { idealVoltage, type LoadValues, type PumpValues } from '../pump/values';
 import type { Band } from '../quantity/figure';
 import { activeIn } from './board-modes';
 import type { DriveSource } from './drive-source';
-import { Book, type Point } from './pump-book';
+import { Book, type Point, sourceLabel } from './pump-book';
 import { type CapacitorPart, capacitorPart, type PlacedCapacitor } from './pump-capacitors';
 import { addDriveVariables } from './pump-drives';
 import type { PumpModel } from './pump-model';
@@ -161,9 +161,7 @@ function all<T>(list: readonly (T | undefined)[]): readonly T[] | undefined {
 function addRail(book: Book, { name, band, ohms }: RailSource, k: number) {
   const volts = book.rail(name, band);
   const resistance =
-    ohms && ohms.max > 0
-      ? book.add(`rail ${name} source resistance`, `rails.${name}`, 'ohm', ohms)
-      : undefined;
+    ohms && ohms.max > 0 ? book.add(sourceLabel(name), `rails.${name}`, 'ohm', ohms) : undefined;
   book.ties((_p, at, tie) => {
     const place = at.rails[k]!;
     tie(volts, { kind: 'volts', index: place.known }, 1);

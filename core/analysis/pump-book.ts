@@ -14,6 +14,10 @@ export type Tie = (variable: number | undefined, parameter: Parameter, weight?: 
 
 type Tying = (point: Point, at: PumpNetwork, tie: Tie) => void;
 
+/** Labels under which a pump's model holds a rail's voltage and its source resistance. */
+export const railLabel = (name: string): string => `rail ${name}`;
+export const sourceLabel = (name: string): string => `rail ${name} source resistance`;
+
 export class Book {
   readonly variables: Variable[] = [];
   readonly #rails = new Map<string, number>();
@@ -33,7 +37,7 @@ export class Book {
   rail(name: string, band: Band): number {
     const known = this.#rails.get(name);
     if (known !== undefined) return known;
-    const index = this.add(`rail ${name}`, `rails.${name}`, 'V', band);
+    const index = this.add(railLabel(name), `rails.${name}`, 'V', band);
     this.#rails.set(name, index);
     return index;
   }

@@ -15,6 +15,7 @@ import type { PumpParts } from './pump-assembly';
 import type { ModeModel } from './pump-result';
 import { pumpResultOf, type RailVoltage, type Surroundings, setUpPump, solveParts } from './pump-solution';
 import { regulatedVoltage } from './regulators';
+import { sag } from './sign';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 import type { PumpResult } from './types';
 
@@ -188,11 +189,6 @@ function sagged(band: Band, ohms: Band, { min: least, typical, max: most }: Band
 function rounded({ min, typical, max }: Band): Band {
   const digits = (value: number) => Number(value.toPrecision(6));
   return { min: digits(min), typical: digits(typical), max: digits(max) };
-}
-
-/** A voltage less a drop in magnitude. */
-function sag(volts: number, drop: number): number {
-  return volts < 0 ? volts + drop : volts - drop;
 }
 
 /** True when the currents of the last round move a rail that gives way. */

@@ -3,7 +3,7 @@
  * zero, "strong" the side away from it, and both keep their sign when they are written.
  */
 
-import type { Figure } from '../quantity/figure';
+import type { Band, Figure } from '../quantity/figure';
 import { isNegative } from './sign';
 import type { CornerEnd, RailResult } from './types';
 
@@ -24,30 +24,55 @@ export interface Miss {
   readonly corner?: CornerEnd;
 }
 
+/** One end of a window. */
+export interface Edge {
+  /** V, signed. */
+  readonly limit: number;
+  /** True when voltages above the limit miss it. */
+  readonly upper: boolean;
+}
+
+/** The end of the window on that side; none where the window is open. */
+export function edgeOf(needed: Band, side: Side): Edge | undefined {
+  // One figure instead of a window asks for at least that much: every rail has some tolerance.
+  if (side === 'strong' && needed.min === needed.max) return undefined;
+  const upper = isNegative(needed) === (side === 'weak');
+  return { limit: upper ? needed.max : needed.min, upper };
+}
+
+/** How far a voltage is past the edge, V; negative while it is not. */
+export function beyond({ limit, upper }: Edge, voltage: number): number {
+  return upper ? voltage - limit : limit - voltage;
+}
+
+/** True past the edge by more than rounding makes. */
+export function isBeyond(edge: Edge, voltage: number): boolean {
+  return beyond(edge, voltage) > 1e-9 * Math.max(1, Math.abs(edge.limit));
+}
+
+/** True for more ripple than allowed by more than rounding makes. */
+export function isTooMuchRipple(allowed: Band, ripple: number): boolean {
+  return ripple > allowed.max * (1 + 1e-9);
+}
+
 /** The rail's miss on that side of its needed window, if it has one. */
 export function missOf(result: RailResult, side: Side): Miss | undefined {
   const needed = result.rail.needs?.voltage;
-  return needed && result.voltage ? judge(result, needed, side) : undefined;
+  const edge = needed && edgeOf(needed, side);
+  return edge && result.voltage ? judge(result, needed, edge) : undefined;
 }
 
-function judge(result: RailResult, needed: Figure, side: Side): Miss | undefined {
-  // One figure instead of a window asks for at least that much: every rail has some tolerance.
-  if (side === 'strong' && needed.min === needed.max) return undefined;
-  const negative = isNegative(needed);
-  const upper = negative === (side === 'weak');
-  const limit = upper ? needed.max : needed.min;
-  const beyond = (voltage: number) => (upper ? voltage - limit : limit - voltage);
-  const slack = 1e-9 * Math.max(1, Math.abs(limit));
-
+function judge(result: RailResult, needed: Figure, edge: Edge): Miss | undefined {
+  const { limit } = edge;
   const typical = typicalVoltages(result).reduce((worst, point) =>
-    beyond(point.voltage) > beyond(worst.voltage) ? point : worst,
+    beyond(edge, point.voltage) > beyond(edge, worst.voltage) ? point : worst,
   );
-  const by = beyond(typical.voltage);
-  if (by > slack) return { result, needed, limit, by, ...typical };
+  if (isBeyond(edge, typical.voltage))
+    return { result, needed, limit, by: beyond(edge, typical.voltage), ...typical };
 
-  const corner = cornerOf(result, upper);
-  if (corner === undefined || !(beyond(corner.value) > slack)) return undefined;
-  return { result, needed, limit, voltage: corner.value, by: beyond(corner.value), corner };
+  const corner = cornerOf(result, edge.upper);
+  if (corner === undefined || !isBeyond(edge, corner.value)) return undefined;
+  return { result, needed, limit, voltage: corner.value, by: beyond(edge, corner.value), corner };
 }
 
 function typicalVoltages(

@@ -2,6 +2,7 @@
  * More ripple than the rail may have: at typical values an error, at a corner only a warning that names it.
  */
 import type { CornerEnd, PumpPoint, PumpResult, RailResult } from '../analysis/types';
+import { isTooMuchRipple } from '../analysis/window';
 import { cornerWords, inMode } from '../analysis/words';
 import type { Capacitor } from '../model/board';
 import type { Figure } from '../quantity/figure';
@@ -24,11 +25,12 @@ export const rippleHigh: Check = {
 };
 
 function judge(result: RailResult, pump: PumpResult, allowed: Figure): readonly Finding[] {
-  const limit = allowed.max;
   const worst = pump.points.reduce((a, b) => (b.ripple > a.ripple ? b : a));
-  if (worst.ripple > limit * (1 + 1e-9)) return [toFinding(result, allowed, worst.ripple, worst)];
+  if (isTooMuchRipple(allowed, worst.ripple)) return [toFinding(result, allowed, worst.ripple, worst)];
   const corner = pump.ripple.highest;
-  return corner.value > limit * (1 + 1e-9) ? [toFinding(result, allowed, corner.value, worst, corner)] : [];
+  return isTooMuchRipple(allowed, corner.value)
+    ? [toFinding(result, allowed, corner.value, worst, corner)]
+    : [];
 }
 
 function toFinding(

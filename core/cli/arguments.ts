@@ -1,6 +1,7 @@
 /**
  * What was asked for on the command line. Wrong use is an answer with a sentence, not an exception.
  */
+import { mostSamples, usualSamples } from '../index';
 
 export interface CheckRequest {
   readonly command: 'check';
@@ -12,24 +13,50 @@ export interface CheckRequest {
   readonly stdinName: string;
 }
 
+export interface YieldRequest {
+  readonly command: 'yield';
+  /** As written; `-` is standard input. Absent: look for a board. */
+  readonly file: string | undefined;
+  readonly format: Format;
+  readonly color: ColorChoice;
+  readonly stdinName: string;
+  readonly samples: number;
+  readonly seed: number;
+  readonly distribution: Distribution;
+}
+
 export type Request =
   | CheckRequest
+  | YieldRequest
   | { readonly command: 'help' }
   | { readonly command: 'version' }
   | { readonly command: 'wrong'; readonly because: string };
 
-const formats = ['text', 'json'] as const;
-const colorChoices = ['auto', 'always', 'never'] as const;
-export type Format = (typeof formats)[number];
-export type ColorChoice = (typeof colorChoices)[number];
+export type Format = 'text' | 'json';
+export type ColorChoice = 'auto' | 'always' | 'never';
+export type Distribution = 'uniform' | 'triangular';
 
-const options = ['--format', '--color', '--stdin-filename', '--help', '--version'];
+const commands = ['check', 'yield'] as const;
+type Command = (typeof commands)[number];
+
+interface Option {
+  readonly of: readonly Command[];
+  /** Why a value will not do; anything will where this is left out. */
+  readonly fault?: (value: string) => string | undefined;
+}
+
+const options: Readonly<Record<string, Option>> = {
+  '--format': { of: commands, fault: oneOf('text', 'json') },
+  '--color': { of: commands, fault: oneOf('auto', 'always', 'never') },
+  '--stdin-filename': { of: commands },
+  '--samples': { of: ['yield'], fault: wholeNumber(1, mostSamples) },
+  '--seed': { of: ['yield'], fault: wholeNumber(0, Number.MAX_SAFE_INTEGER) },
+  '--distribution': { of: ['yield'], fault: oneOf('uniform', 'triangular') },
+};
 
 export function readArguments(args: readonly string[]): Request {
   const files: string[] = [];
-  let format: Format = 'text';
-  let color: ColorChoice = 'auto';
-  let stdinName = 'standard-input.rails.yaml';
+  const given = new Map<string, string>();
   let command: string | undefined;
   let onlyNames = false;
 
@@ -48,28 +75,64 @@ export function readArguments(args: readonly string[]): Request {
     if (arg === '--version' || arg === '-V') return { command: 'version' };
     const equals = arg.indexOf('=');
     const name = equals < 0 ? arg : arg.slice(0, equals);
-    if (!options.includes(name))
-      return wrong(`There is no option ${name}; the options are ${options.join(', ')}.`);
+    const option = Object.hasOwn(options, name) ? options[name] : undefined;
+    if (!option) {
+      const known = [...Object.keys(options), '--help', '--version'].join(', ');
+      return wrong(`There is no option ${name}; the options are ${known}.`);
+    }
     const value = equals < 0 ? args[++k] : arg.slice(equals + 1);
     if (value === undefined) return wrong(`${name} needs a value.`);
-    if (name === '--stdin-filename') stdinName = value;
-    else if (name === '--format' && isOneOf(formats, value)) format = value;
-    else if (name === '--color' && isOneOf(colorChoices, value)) color = value;
-    else
-      return wrong(
-        `${name} is ${(name === '--format' ? formats : colorChoices).join(' or ')}, not ${value}.`,
-      );
+    const fault = option.fault?.(value);
+    if (fault !== undefined) return wrong(`${name} is ${fault}, not ${value}.`);
+    given.set(name, value);
   }
 
   if (command === undefined) return wrong('There is nothing to do: say rail-ledger check, or --help.');
-  if (command !== 'check') return wrong(`There is no command ${command}; the command is check.`);
-  return { command: 'check', files, format, color, stdinName };
+  if (!isCommand(command))
+    return wrong(`There is no command ${command}; the commands are ${commands.join(' and ')}.`);
+  for (const name of given.keys())
+    if (!options[name]?.of.includes(command)) return wrong(`${command} has no option ${name}.`);
+  return command === 'check' ? { command, files, ...common(given) } : yieldRequest(files, given);
+}
+
+type Given = ReadonlyMap<string, string>;
+
+// The casts hold what the options' own checks have let through.
+function common(given: Given): Pick<CheckRequest, 'format' | 'color' | 'stdinName'> {
+  return {
+    format: (given.get('--format') ?? 'text') as Format,
+    color: (given.get('--color') ?? 'auto') as ColorChoice,
+    stdinName: given.get('--stdin-filename') ?? 'standard-input.rails.yaml',
+  };
+}
+
+function yieldRequest(files: readonly string[], given: Given): Request {
+  if (files.length > 1) return wrong(`yield takes one file, not ${files.length}.`);
+  return {
+    command: 'yield',
+    file: files[0],
+    ...common(given),
+    samples: Number(given.get('--samples') ?? usualSamples),
+    seed: Number(given.get('--seed') ?? 1),
+    distribution: (given.get('--distribution') ?? 'uniform') as Distribution,
+  };
 }
 
 function wrong(because: string): Request {
   return { command: 'wrong', because };
 }
 
-function isOneOf<T extends string>(list: readonly T[], value: string): value is T {
-  return (list as readonly string[]).includes(value);
+function isCommand(word: string): word is Command {
+  return (commands as readonly string[]).includes(word);
+}
+
+function oneOf(...list: readonly string[]) {
+  return (value: string) => (list.includes(value) ? undefined : list.join(' or '));
+}
+
+function wholeNumber(least: number, most: number) {
+  return (value: string) => {
+    const fits = /^\d+$/.test(value) && Number(value) >= least && Number(value) <= most;
+    return fits ? undefined : `a whole number from ${least} to ${most}`;
+  };
 }

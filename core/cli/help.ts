@@ -3,8 +3,9 @@ export const helpText = `Rail Ledger: voltage, ripple and pin budget of a board'
 
 Usage
   rail-ledger check [FILE...]
+  rail-ledger yield [FILE] [--samples N] [--seed S]
 
-Checks board files and prints a ledger for each: rails, pins, supplies and
+check: checks board files and prints a ledger for each: rails, pins, supplies and
 findings, one finding on a line as
 
   file:line:column severity code message
@@ -12,17 +13,26 @@ findings, one finding on a line as
 Without FILE it takes the rails.yaml of the present folder or of the nearest
 folder above it. The file - is standard input.
 
+yield: draws boards by lot within the tolerances of their parts, solves each in
+every mode and counts how many meet their needs. The same seed draws the same
+boards.
+
 Options
   --format text|json       json prints the report with plain SI numbers: one
                            object for one file, a list for several
   --color auto|always|never
   --stdin-filename NAME    name to show for standard input
+  --samples N              boards that yield draws (1000)
+  --seed S                 a whole number (1)
+  --distribution uniform|triangular
+                           within each tolerance: all values alike (cautious),
+                           or the typical one likeliest
   --help, -h
   --version, -V
 
 Exit code
-  0  no finding of severity error
-  1  at least one
+  0  no finding of severity error; yield: every sample met every need
+  1  at least one; yield: a sample missed a need, or could not be judged
   2  wrong use, or a file that cannot be read
 
 Colour in auto: off when NO_COLOR is set, on when FORCE_COLOR is set, otherwise

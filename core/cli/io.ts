@@ -8,6 +8,8 @@ export interface Io {
   /** Is standard output a terminal, and how wide. */
   readonly isTerminal: boolean;
   readonly width: number | undefined;
+  /** Is standard error a terminal: progress goes nowhere else. */
+  readonly errorIsTerminal?: boolean;
   out(text: string): void;
   err(text: string): void;
   /** Bytes of a file; rejects as Node's file system does. */

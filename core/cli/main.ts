@@ -10,6 +10,7 @@ const io: Io = {
   env: process.env,
   isTerminal: process.stdout.isTTY === true,
   width: process.stdout.isTTY ? process.stdout.columns : undefined,
+  errorIsTerminal: process.stderr.isTTY === true,
   out: (text) => process.stdout.write(text),
   err: (text) => process.stderr.write(text),
   readFile: (path) => readFile(path),

@@ -1,6 +1,6 @@
 /**
- * The command line as a function from arguments to an exit code: 0 clean, 1 findings of severity error, 2 wrong use
- * or a file that cannot be read. Reports go to standard output, everything else to standard error.
+ * The command line as a function from arguments to an exit code: 0 clean, 1 findings of severity error or a need that
+ * a sample missed, 2 wrong use or a file that cannot be read. Reports go to standard output, everything else to standard error.
  */
 import { type Analysis, analyse, ledgerText, toolName, toolVersion } from '../index';
 import { type CheckRequest, readArguments } from './arguments';
@@ -8,8 +8,8 @@ import { useColour } from './colour';
 import { boardFileName, findBoard, readSource } from './files';
 import { helpText } from './help';
 import type { Io } from './io';
-
-export type ExitCode = 0 | 1 | 2;
+import { complain, type ExitCode, usualWidth } from './output';
+import { runYield } from './yield';
 
 export async function run(args: readonly string[], io: Io): Promise<ExitCode> {
   const request = readArguments(args);
@@ -24,6 +24,8 @@ export async function run(args: readonly string[], io: Io): Promise<ExitCode> {
       return complain(io, `${request.because}\nTry rail-ledger --help.`);
     case 'check':
       return check(request, io);
+    case 'yield':
+      return runYield(request, io);
   }
 }
 
@@ -50,9 +52,6 @@ async function foundFiles(io: Io): Promise<readonly string[]> {
   return found === undefined ? [] : [found];
 }
 
-/** Columns where there is no terminal to ask, as in a log: enough for every table. */
-const usualWidth = 120;
-
 function print(analyses: readonly Analysis[], asked: number, request: CheckRequest, io: Io): void {
   if (analyses.length === 0) return;
   if (request.format === 'json') {
@@ -63,9 +62,4 @@ function print(analyses: readonly Analysis[], asked: number, request: CheckReque
   const colour = useColour(request.color, io);
   const width = io.width ?? usualWidth;
   io.out(analyses.map((analysis) => ledgerText(analysis, { colour, width })).join('\n'));
-}
-
-function complain(io: Io, sentence: string): 2 {
-  io.err(`rail-ledger: ${sentence}\n`);
-  return 2;
 }

@@ -2,4 +2,5 @@
  * Command ids, as the manifest declares them.
  */
 export const sizeRailCommand = 'railLedger.sizeRail';
+export const runYieldCommand = 'railLedger.runYield';
 export const showLogCommand = 'railLedger.showLog';

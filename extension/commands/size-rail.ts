@@ -6,7 +6,7 @@ import * as vscode from 'vscode';
 import type { Sizing } from '../../core/index';
 import type { Analyses } from '../analyses';
 import { toRange, toWorkspaceEdit } from '../convert';
-import { isOurs } from '../files';
+import { findDocument } from './find-document';
 import { confirmSizing, pickRail } from './size-rail-pick';
 
 export interface SizeRailOptions {
@@ -64,15 +64,6 @@ async function write(
     tell(
       `${sizing.rail} was not changed: ${stale ? 'the file changed meanwhile' : 'the editor refused the change'}.`,
     );
-}
-
-async function findDocument(uri: string | undefined): Promise<vscode.TextDocument | undefined> {
-  if (uri !== undefined) {
-    const document = await vscode.workspace.openTextDocument(vscode.Uri.parse(uri));
-    return isOurs(document) ? document : undefined;
-  }
-  const active = vscode.window.activeTextEditor?.document;
-  return active !== undefined && isOurs(active) ? active : undefined;
 }
 
 async function railToSize(analyses: Analyses, document: vscode.TextDocument): Promise<string | undefined> {

@@ -8,6 +8,7 @@ import { diagnosticsTests } from './suites/diagnostics';
 import { hoverTests } from './suites/hover';
 import { quickFixTests } from './suites/quick-fix';
 import { sizeRailTests } from './suites/size-rail';
+import { yieldTests } from './suites/yield';
 
 export async function run(): Promise<void> {
   activationTests();
@@ -15,5 +16,6 @@ export async function run(): Promise<void> {
   hoverTests();
   quickFixTests();
   sizeRailTests();
+  yieldTests();
   await runTests();
 }

@@ -1,51 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import type { Io } from '../../../core/cli/io';
-import { run } from '../../../core/cli/run';
+import { type Machine, rail } from '../../support/terminal';
 
 const clean =
   'supplies: { lab: { voltage: 5 V, current: 1 A } }\nrails: { v5: { supply: lab, loads: { x: 1 mA } } }\n';
 const faulty = clean.replace('1 mA', '2 A');
-
-interface Machine {
-  readonly files?: Readonly<Record<string, string | Uint8Array>>;
-  readonly input?: string;
-  readonly cwd?: string;
-  readonly env?: Record<string, string>;
-  readonly isTerminal?: boolean;
-}
-
-/** Runs against files in memory. */
-async function rail(args: string, machine: Machine = {}) {
-  const { files = {}, input = '', cwd = '/home/board', env = {}, isTerminal = false } = machine;
-  const bytes = (content: string | Uint8Array) =>
-    typeof content === 'string' ? new TextEncoder().encode(content) : content;
-  let out = '';
-  let err = '';
-  const io: Io = {
-    cwd,
-    env,
-    isTerminal,
-    width: undefined,
-    out: (text) => {
-      out += text;
-    },
-    err: (text) => {
-      err += text;
-    },
-    readFile: async (path) => {
-      const content = files[path];
-      if (content === undefined) throw Object.assign(new Error('missing'), { code: 'ENOENT' });
-      return bytes(content);
-    },
-    isFile: async (path) => Object.hasOwn(files, path),
-    readInput: async () => bytes(input),
-  };
-  const code = await run(
-    args.split(' ').filter((word) => word !== ''),
-    io,
-  );
-  return { code, out, err };
-}
 
 describe('exit codes and streams', () => {
   it('is 0 and silent on standard error for a board without errors', async () => {
