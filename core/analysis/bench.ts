@@ -1,0 +1,52 @@
+/**
+ * Entries of `bench`: each measured point against the prediction at its own load, typical and over tolerance and
+ * temperature, and what would explain the difference.
+ */
+import type { BenchPoint, Board } from '../model/board';
+import { compareBench } from './bench-compare';
+import { explainBench } from './bench-explain';
+import { benchModel } from './bench-model';
+import { isGap } from './gap';
+import { once } from './once';
+import type { RailVoltages } from './rail-voltages';
+import type { BenchResult } from './types';
+
+export function benchResults(board: Board, solved: RailVoltages): readonly BenchResult[] {
+  return board.bench.map((point) => benchResult(board, solved, point));
+}
+
+function benchResult(board: Board, solved: RailVoltages, point: BenchPoint): BenchResult {
+  const rail = point.rail && board.rails.get(point.rail.name);
+  if (!rail) return nothing(point, 'it names no rail of the board');
+  if (!point.load) return { ...nothing(point, 'its load is not known'), rail };
+  const model = benchModel(board, solved, rail, point, point.load);
+  if (isGap(model)) return { ...nothing(point, model.because), rail };
+  const predicted = model.bands();
+  const voltage = point.voltage ? compareBench('voltage', point.voltage, predicted.voltage) : null;
+  const ripple =
+    point.ripple && predicted.ripple ? compareBench('ripple', point.ripple, predicted.ripple) : null;
+  const compared = [voltage, ripple].filter((comparison) => comparison !== null);
+  return {
+    point,
+    rail,
+    ...(model.mode === undefined ? {} : { mode: model.mode }),
+    predicted,
+    voltage,
+    ripple,
+    inside: compared.length > 0 ? compared.every(({ outside }) => outside === 0) : null,
+    outputResistance: model.typical.outputResistance,
+    explanation: once(() => explainBench(model, { voltage, ripple })),
+  };
+}
+
+function nothing(point: BenchPoint, because: string): BenchResult {
+  return {
+    point,
+    predicted: null,
+    voltage: null,
+    ripple: null,
+    inside: null,
+    outputResistance: null,
+    because,
+  };
+}
