@@ -31,12 +31,16 @@ export function explainBench(model: BenchModel, compared: Compared): BenchExplan
     const comparison = compared[target];
     return comparison !== null && !reads(comparison, comparison.predicted.typical);
   });
-  const outside = off.find((target) => compared[target]?.outside !== 0);
   const none: BenchExplanation = {
     moves: [],
     together: false,
     all: null,
-    beyond: outside ? beyondTheirBand(model, compared, goalOf(outside, compared[outside]!)) : [],
+    beyond: off.flatMap((target) => {
+      const comparison = compared[target];
+      return comparison && comparison.outside !== 0
+        ? beyondTheirBand(model, compared, goalOf(target, comparison))
+        : [];
+    }),
   };
   const target = off.find((candidate) => compared[candidate]?.outside === 0);
   if (!target) return none;

@@ -3,6 +3,7 @@
  */
 import type { BoardAnalysis } from '../analysis/types';
 import { capacitorDerated } from './capacitor-derated';
+import { benchDisagrees } from './bench-disagrees';
 import { capacitorRating } from './capacitor-rating';
 import { capacitorRippleCurrent } from './capacitor-ripple-current';
 import type { Check } from './check';
@@ -36,6 +37,7 @@ import { unused } from './unused';
 
 export const checks: readonly Check[] = [
   capacitorDerated,
+  benchDisagrees,
   capacitorRating,
   capacitorRippleCurrent,
   chipOverLimit,

@@ -3,6 +3,7 @@
  * something is not computed.
  */
 import type {
+  BenchResult,
   BoardAnalysis,
   ChipResult,
   ClockResult,
@@ -17,6 +18,7 @@ import type { Finding } from '../checks/finding';
 import type { Band } from '../quantity/figure';
 import { type LineIndex, lineIndex } from '../text/lines';
 import type {
+  BenchReport,
   ChipReport,
   ClockReport,
   DriverReport,
@@ -46,6 +48,7 @@ export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], 
     drivers: mapped(analysis.drivers, driverReport),
     supplies: mapped(analysis.supplies, supplyReport),
     parts: partReports(analysis),
+    bench: analysis.bench().map(benchReport),
     balance: finite(analysis.balance),
     findings: findings.map((finding) => findingReport(finding, lines)),
   };
@@ -150,6 +153,29 @@ function partReports(analysis: BoardAnalysis): Record<string, PartReport> {
       parts.push([key, { reverse: finite(reverse), average: finite(average), peak: finite(peak) }]);
   }
   return Object.fromEntries(parts);
+}
+
+function benchReport({ point, predicted, voltage, ripple, inside, explanation }: BenchResult): BenchReport {
+  const { load } = point;
+  const explained = explanation?.();
+  return {
+    rail: point.rail?.name ?? null,
+    load: finite(load?.typical),
+    unit: load ? (load.unit === 'ohm' ? 'ohm' : 'A') : null,
+    measured: { voltage: finite(point.voltage?.typical), ripple: finite(point.ripple?.typical) },
+    predicted: { voltage: band(predicted?.voltage ?? null), ripple: band(predicted?.ripple ?? null) },
+    deviation: { voltage: finite(voltage?.deviation), ripple: finite(ripple?.deviation) },
+    inside,
+    explained: (explained?.moves ?? []).map(({ label, path, value, unit, typical }) => ({
+      by: label,
+      at: path,
+      value,
+      unit,
+      typical,
+    })),
+    together: explained?.together ?? false,
+    note: point.note ?? null,
+  };
 }
 
 function findingReport(finding: Finding, lines: LineIndex): FindingReport {
