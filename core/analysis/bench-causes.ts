@@ -1,91 +1,154 @@
 /**
- * What usually makes a bench differ from a prediction when no tolerance does, fitted to the sign of the difference.
- * Common practice, no source.
+ * What usually makes a bench differ from a prediction when no tolerance does: fitted to the sign of the difference,
+ * and left out where it could not make a tenth of it. Common practice, no source, the sizes included.
  */
+import { diodeCount } from '../compute/pump-topology';
+import type { BenchPoint, Pump, Rail } from '../model/board';
 import { formatQuantity } from '../quantity/write';
+import type { BenchModel } from './bench-model';
 import type { Target } from './pump-corners';
-import type { BenchComparison, BenchResult } from './types';
+import type { BenchComparison } from './types';
 import { volts } from './words';
 
+interface Cause {
+  readonly words: string;
+  /** V that it may well make; absent where nobody can say. */
+  readonly volts?: number;
+}
+
+/** What one cause must make of the deviation to be worth a word. */
+const worthTelling = 0.1;
 /** Causes told at once: more are a textbook. */
 const mostTold = 4;
 
-/** Clauses for a list, the most common first; empty without a comparison of the target. */
-export function usualCauses(result: BenchResult, target: Target): readonly string[] {
-  const comparison = result[target];
-  if (!comparison) return [];
-  const list = target === 'ripple' ? rippleCauses(comparison) : voltageCauses(result, comparison);
-  return list.slice(0, mostTold);
-}
-
-function voltageCauses(result: BenchResult, comparison: BenchComparison): readonly string[] {
-  const { measured, predicted } = comparison;
-  if (measured.typical * predicted.typical < 0)
-    return [
-      `a sign: this rail is ${predicted.typical < 0 ? 'negative' : 'positive'}, or the leads were swapped`,
-    ];
-  const weak = Math.abs(measured.typical) < Math.abs(predicted.typical);
-  switch (result.rail?.origin?.kind) {
-    case 'pump':
-      return weak
-        ? [
-            ...loading(result, comparison),
-            'a flying capacitor that lost capacitance to its d.c. bias, or is of another kind',
-            'a supply below its nominal voltage',
-            'resistance of leads and breadboard contacts in the path of the drive',
-            'diodes with a larger drop than named here',
-          ]
-        : [
-            'a supply above its nominal voltage',
-            'a load that draws less than entered',
-            'diodes with a smaller drop than named here',
-          ];
-    case 'regulator':
-      return weak
-        ? [
-            'resistance of leads and breadboard contacts between the regulator and the meter',
-            'an input that sags below the output and the dropout',
-            'a regulator at its current limit',
-          ]
-        : ['a load below the least one that the regulator needs', 'a ground lead that carries current'];
-    default:
-      return weak
-        ? [
-            'a supply below its nominal voltage',
-            'resistance of leads and breadboard contacts',
-            ...loading(result, comparison),
-          ]
-        : ['a supply above its nominal voltage', 'a load that draws less than entered'];
-  }
-}
-
-/** Input resistance of a scope's plain probe; a handheld meter's is ten times as large. */
-const probeOhms = 1e6;
-/** Less than this share of the deviation is not worth a word. */
-const worthTelling = 0.1;
-
-function loading(
-  { outputResistance }: BenchResult,
-  { measured, deviation }: BenchComparison,
+/** Clauses for a list, the most common first. */
+export function usualCauses(
+  model: BenchModel,
+  rail: Rail,
+  point: BenchPoint,
+  target: Target,
+  comparison: BenchComparison,
 ): readonly string[] {
-  const amps = Math.abs(measured.typical) / probeOhms;
-  const drop = amps * (outputResistance ?? 0);
-  if (!(drop >= worthTelling * Math.abs(deviation))) return [];
+  const size = Math.abs(comparison.deviation);
+  const causes =
+    target === 'ripple' ? rippleCauses(comparison) : voltageCauses(model, rail, point, comparison);
+  const fitting = causes.filter((cause) => (cause.volts ?? size) >= worthTelling * size);
+  return fitting.length > 0
+    ? fitting.slice(0, mostTold).map(({ words }) => words)
+    : ['a wrong connection or a part of another value, since nothing usual moves it that far'];
+}
+
+/** A lead and its two contacts on a breadboard, ohm. */
+const contactOhms = 1;
+/** A supply's setting or a worn battery, as a share of its voltage. */
+const supplyShare = 0.05;
+/** Between kinds of diodes: about 0.6 V of silicon against 0.3 V of a small Schottky diode. */
+const diodeVolts = 0.3;
+
+function voltageCauses(
+  model: BenchModel,
+  rail: Rail,
+  point: BenchPoint,
+  { measured, predicted }: BenchComparison,
+): readonly Cause[] {
+  if (measured.typical * predicted.typical < 0) {
+    const sign = predicted.typical < 0 ? 'negative' : 'positive';
+    return [{ words: `a sign or swapped leads, since ${rail.name} is ${sign}` }];
+  }
+  const weak = Math.abs(measured.typical) < Math.abs(predicted.typical);
+  const amps = loadAmps(point, predicted.typical);
+  if (rail.origin?.kind === 'pump') return pumpCauses(model, rail.origin.pump, amps, weak);
+  const regulated = rail.origin?.kind === 'regulator';
+  if (!weak)
+    return [
+      regulated
+        ? { words: 'a load below the least one that the regulator needs' }
+        : { words: 'a supply above its nominal voltage' },
+      { words: 'a load that draws less than entered' },
+    ];
   return [
-    `the probe as a load (1 Mohm takes ${formatQuantity(amps, 'A', 2)}, which costs ${volts(drop)} here)`,
+    regulated
+      ? { words: 'an input that sags below the output and the dropout, or a regulator at its limit' }
+      : { words: 'a supply below its nominal voltage' },
+    { words: 'the resistance of leads and breadboard contacts', volts: amps * contactOhms },
   ];
 }
 
-function rippleCauses({ deviation }: BenchComparison): readonly string[] {
+function pumpCauses(model: BenchModel, pump: Pump, amps: number, weak: boolean): readonly Cause[] {
+  const stages = Math.round(pump.stages?.typical ?? 1);
+  const way = weak ? 'below' : 'above';
+  const supply = {
+    words: `a supply ${way} its nominal voltage`,
+    volts: supplyShare * changeOf(model, ({ unit, path }) => unit === 'V' && /^rails\.[^.]+$/.test(path)),
+  };
+  const diodes = {
+    words: `diodes of a kind with a ${weak ? 'larger' : 'smaller'} drop`,
+    volts: diodeVolts * (pump.topology ? diodeCount(pump.topology, stages) : 1),
+  };
+  if (!weak) return [supply, { words: 'a load that draws less than entered' }, diodes];
+  return [
+    ...loading(model),
+    {
+      words: 'a flying capacitor that its d.c. bias or its kind leaves short of capacitance',
+      volts: changeOf(model, ({ unit, path }) => unit === 'F' && path.includes('.pump.flying')),
+    },
+    supply,
+    {
+      // In the path of the drive a resistance counts 1/D + 1/(1 - D) times: M. D. Seeman, S. R. Sanders, IEEE
+      // Trans. Power Electronics 23(2), 2008 (from memory: confirm).
+      words: 'the resistance of leads and breadboard contacts at the drive',
+      volts: 4 * stages * amps * contactOhms,
+    },
+    diodes,
+  ];
+}
+
+/** V by which the rail changes when the quantities that are meant change by their whole value, by the derivatives. */
+function changeOf(
+  { variables, typical }: BenchModel,
+  meant: (variable: (typeof variables)[number]) => boolean,
+) {
+  return variables.reduce(
+    (sum, variable, k) =>
+      meant(variable) ? sum + Math.abs((typical.slopes.voltage[k] || 0) * variable.band.typical) : sum,
+    0,
+  );
+}
+
+const instruments = [
+  { name: 'the meter', ohms: 10e6 },
+  { name: 'a scope probe without divider', ohms: 1e6 },
+] as const;
+
+/** The least instrument that loads the rail enough to matter is told with what it does, the next one otherwise. */
+function loading({ typical, withProbe }: BenchModel): readonly Cause[] {
+  return instruments.flatMap(({ name, ohms }) => {
+    const reached = withProbe(ohms);
+    if (reached === undefined) return [];
+    const drop = Math.abs(typical.voltage) - Math.abs(reached);
+    const words = `${name} as a load of ${formatQuantity(ohms, 'ohm')}, which costs ${volts(drop)}`;
+    return drop > 0 ? [{ words, volts: drop }] : [];
+  });
+}
+
+function loadAmps({ load }: BenchPoint, predicted: number): number {
+  if (!load) return 0;
+  return load.unit === 'ohm' ? Math.abs(predicted) / load.typical : load.typical;
+}
+
+function rippleCauses({ deviation }: BenchComparison): readonly Cause[] {
   return deviation > 0
     ? [
-        'a long ground lead of the probe that picks up the edges of the clock',
-        'a reservoir that lost capacitance to its d.c. bias, or has more series resistance than its kind',
-        'a load that draws in pulses',
+        { words: 'a long ground lead of the probe that picks up the edges of the clock' },
+        {
+          words:
+            'a reservoir short of capacitance by its d.c. bias, or with more series resistance than its kind',
+        },
+        { words: 'a load that draws in pulses' },
       ]
     : [
-        'a bandwidth limit or an averaging meter that hides the peaks',
-        'more capacitance on the rail than the file names, such as that of the load',
-        'a load that draws less than entered',
+        { words: 'a bandwidth limit or an averaging meter that hides the peaks' },
+        { words: 'more capacitance on the rail than the file names, such as that of the load' },
+        { words: 'a load that draws less than entered' },
       ];
 }

@@ -16,7 +16,7 @@ import {
   speed,
 } from './bench-search';
 import type { Target } from './pump-corners';
-import { hasBand } from './pump-model';
+import { hasBand, type Variable } from './pump-model';
 import type { BenchComparison, BenchExplanation, BenchMove } from './types';
 
 export type Compared = Readonly<Record<Target, BenchComparison | null>>;
@@ -48,7 +48,7 @@ export function explainBench(model: BenchModel, compared: Compared): BenchExplan
   const ways = approaches(model, goal);
   const singles = singleMoves(model, compared, goal, ways);
   const second = compared[other(target)];
-  if (singles[0]?.brings !== 'both' && second?.outside === 0) {
+  if (!singles[0]?.both && second?.outside === 0) {
     const goals = [goal, goalOf(other(target), second)] as const;
     const pair = pairForBoth(model, goals);
     if (pair) {
@@ -75,8 +75,7 @@ function singleMoves(
       const found = settle(model, [step], goal, share);
       return found ? [moveOf(model, compared, goal, step.index, found)] : [];
     });
-  const rank = ({ brings }: BenchMove) => (brings === 'both' ? 0 : 1);
-  return byShare(moves).sort((a, b) => rank(a) - rank(b));
+  return byRank(moves);
 }
 
 /** The two quantities with the largest reach, or all of them, by the same share of their way. */
@@ -112,8 +111,7 @@ function beyondTheirBand(model: BenchModel, compared: Compared, goal: Goal): Ben
     .flatMap((variable, index): (Approach & { most: number })[] => {
       const { min, typical, max } = variable.band;
       const slope = model.typical.slopes[goal.target][index]!;
-      // The temperature of a bench is known.
-      if (variable.unit === 'K' || !(typical > 0) || !(need * slope !== 0)) return [];
+      if (!canBeElse(variable) || !(typical > 0) || !(need * slope !== 0)) return [];
       const upward = need * slope > 0;
       const own = hasBand(variable) ? (upward ? max : min) : typical;
       const factor =
@@ -129,7 +127,12 @@ function beyondTheirBand(model: BenchModel, compared: Compared, goal: Goal): Ben
       const found = settle(model, [step], goal, share, most);
       return found ? [moveOf(model, compared, goal, step.index, found)] : [];
     });
-  return byShare(moves).slice(0, 2);
+  return byRank(moves).slice(0, 2);
+}
+
+/** The temperature of a bench is known, and what has no unit and no band is the form of a curve. */
+function canBeElse(variable: Variable): boolean {
+  return variable.unit !== 'K' && (variable.unit !== '1' || hasBand(variable));
 }
 
 function moveOf(
@@ -152,12 +155,17 @@ function moveOf(
     typical: band.typical,
     end,
     share: end === band.typical ? Number.POSITIVE_INFINITY : (value - band.typical) / (end - band.typical),
-    brings: both ? 'both' : target,
+    explains: target,
+    both,
   };
 }
 
 function byShare(moves: readonly BenchMove[]): BenchMove[] {
   return [...moves].sort((a, b) => a.share - b.share);
+}
+
+function byRank(moves: readonly BenchMove[]): BenchMove[] {
+  return byShare(moves).sort((a, b) => Number(b.both) - Number(a.both));
 }
 
 function goalOf(target: Target, { measured, deviation }: BenchComparison): Goal {

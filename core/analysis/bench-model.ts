@@ -4,6 +4,7 @@
  */
 import type { BenchPoint, Board, Load, Pump, Rail } from '../model/board';
 import { type Band, exactly, type Figure, type Unit } from '../quantity/figure';
+import { pumpVoltage } from './curves';
 import { type Gap, isGap } from './gap';
 import { corner, type Target } from './pump-corners';
 import type { Variable } from './pump-model';
@@ -20,7 +21,6 @@ export interface BenchReading {
   readonly ripple: number | null;
   /** Change per unit of each variable; NaN where only trying tells. */
   readonly slopes: Readonly<Record<Target, readonly number[]>>;
-  readonly outputResistance: number;
 }
 
 export interface BenchModel {
@@ -31,6 +31,8 @@ export interface BenchModel {
   at(values: readonly number[]): BenchReading | undefined;
   /** Typical values and extremes over tolerance and temperature. */
   bands(): { readonly voltage: Band; readonly ripple: Band | null };
+  /** Voltage at typical values with an instrument of that resistance beside the load; undefined where not solved. */
+  withProbe(ohms: number): number | undefined;
 }
 
 export function benchModel(
@@ -84,6 +86,13 @@ function pumpModel(board: Board, solved: RailVoltages, rail: Rail, pump: Pump, l
       return 'reason' in reached ? undefined : pumpReading(reached);
     },
     bands: () => ({ voltage: ends('voltage'), ripple: ends('ripple') }),
+    withProbe: (ohms) => {
+      const values = model.values(typicals(variables));
+      return pumpVoltage({
+        ...values,
+        loads: [...values.loads, { name: 'probe', kind: 'resistance', ohms }],
+      });
+    },
   };
 }
 
@@ -95,8 +104,7 @@ function lightest(models: readonly ModeModel[]): ModeModel {
 }
 
 function pumpReading({ point, slopes }: SolvedPoint): BenchReading {
-  const { voltage, ripple, outputResistance } = point;
-  return { voltage, ripple, slopes, outputResistance };
+  return { voltage: point.voltage, ripple: point.ripple, slopes };
 }
 
 /** Ohm's law behind the source resistance; a current that the supply cannot give leaves nothing. */
@@ -111,7 +119,7 @@ function supplyModel(board: Board, name: string, point: BenchPoint, load: Figure
     variables.push(variable(`supply ${name} resistance`, at('resistance'), 'ohm', ohms));
     variables.push(variable('load on the bench', `${point.path}.load`, load.unit, load));
   }
-  return plainModel(variables, ohms?.typical ?? 0, ([volts = 0, source = 0, drawn = 0]) => {
+  return plainModel(variables, ([volts = 0, source = 0, drawn = 0]) => {
     if (load.unit === 'ohm') return drawn > 0 ? (volts * drawn) / (drawn + source) : volts;
     return Math.sign(volts) * Math.max(0, Math.abs(volts) - source * drawn);
   });
@@ -124,7 +132,7 @@ function heldModel(solved: RailVoltages, rail: Rail): BenchModel | Gap {
   const regulator = rail.origin?.kind === 'regulator' ? rail.origin.regulator : undefined;
   const { output, dropout, from } = regulator ?? {};
   if (!regulator || !output)
-    return plainModel([variable(`rail ${rail.name}`, rail.path, 'V', known)], 0, ([volts = 0]) => volts);
+    return plainModel([variable(`rail ${rail.name}`, rail.path, 'V', known)], ([volts = 0]) => volts);
   const variables = [variable('regulator output', `${rail.path}.regulator.output`, 'V', output)];
   const input = from && solved.voltages.get(from.name);
   if (from && input && !isGap(input) && dropout) {
@@ -132,7 +140,7 @@ function heldModel(solved: RailVoltages, rail: Rail): BenchModel | Gap {
     variables.push(variable('dropout', `${rail.path}.regulator.dropout`, 'V', dropout));
   }
   const fixed = (figure: Figure, value: number): Figure => ({ ...figure, ...exactly(value) });
-  return plainModel(variables, 0, ([held = 0, above, drop]) => {
+  return plainModel(variables, ([held = 0, above, drop]) => {
     if (above === undefined || drop === undefined || !dropout) return held;
     const moved = { ...regulator, output: fixed(output, held), dropout: fixed(dropout, drop) };
     return regulatedVoltage(moved, exactly(above))?.typical ?? held;
@@ -142,14 +150,12 @@ function heldModel(solved: RailVoltages, rail: Rail): BenchModel | Gap {
 /** A closed form that rises or falls steadily with each variable, so that its extremes are at ends of bands. */
 function plainModel(
   variables: readonly Variable[],
-  outputResistance: number,
   volts: (values: readonly number[]) => number,
 ): BenchModel {
   const read = (values: readonly number[]): BenchReading => ({
     voltage: volts(values),
     ripple: null,
     slopes: { voltage: slopesOf(volts, values), ripple: values.map(() => 0) },
-    outputResistance,
   });
   const typical = read(typicals(variables));
   const ends = variables.reduce<number[][]>(
@@ -166,6 +172,8 @@ function plainModel(
       voltage: { min: Math.min(...extremes), typical: typical.voltage, max: Math.max(...extremes) },
       ripple: null,
     }),
+    // What gives way by ohms does not feel megohms.
+    withProbe: () => typical.voltage,
   };
 }
 

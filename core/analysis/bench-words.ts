@@ -55,7 +55,7 @@ export function moveWords({ label, value, typical, unit }: BenchMove): string {
 
 /** One sentence for each thing that is known; empty where there is nothing to explain. */
 export function explanationWords(explanation: BenchExplanation): readonly string[] {
-  const { moves, together, all, beyond } = explanation;
+  const { moves, together, all } = explanation;
   const sentences: string[] = [];
   if (moves.length > 0)
     sentences.push(
@@ -67,24 +67,24 @@ export function explanationWords(explanation: BenchExplanation): readonly string
     sentences.push(
       `No two quantities would explain it; all of them at ${formatPercent(all, 2)} of the way to their corner would.`,
     );
-  if (beyond.length > 0) sentences.push(`${beyond.map(beyondWords).join('; or ')}.`);
-  return sentences;
+  return [...sentences, ...beyondWords(explanation, 'voltage'), ...beyondWords(explanation, 'ripple')];
 }
 
 function explained([first]: readonly BenchMove[]): string {
-  return first?.brings === 'both'
-    ? 'voltage and ripple'
-    : first?.brings === 'ripple'
-      ? 'the ripple'
-      : 'the voltage';
+  return first?.both ? 'voltage and ripple' : `the ${first?.explains}`;
 }
 
-function beyondWords(move: BenchMove, k: number): string {
-  const { label, value, typical, unit, end } = move;
-  const lead = k === 0 ? `Alone, ${label} would have to be ` : `${label} `;
-  const limit =
-    end === typical
-      ? `instead of ${formatQuantity(typical, unit)}`
-      : `where its tolerance ends at ${formatQuantity(end, unit)}`;
-  return `${lead}${formatQuantity(value, unit)}, ${limit}`.replace(', instead', ' instead');
+/** What would have to leave its tolerance, one sentence or none. */
+export function beyondWords({ beyond }: BenchExplanation, target: Target): readonly string[] {
+  const moves = beyond.filter(({ explains }) => explains === target);
+  if (moves.length === 0) return [];
+  const words = moves.map(({ label, value, typical, unit, end, both }) => {
+    const limit =
+      end === typical
+        ? ` instead of ${formatQuantity(typical, unit)}`
+        : `, where its tolerance ends at ${formatQuantity(end, unit)}`;
+    const too = both ? ` (then the ${target === 'voltage' ? 'ripple' : 'voltage'} fits too)` : '';
+    return `${label} at ${formatQuantity(value, unit)}${limit}${too}`;
+  });
+  return [`One quantity alone would explain the ${target}: ${words.join('; or ')}.`];
 }

@@ -3,6 +3,7 @@
  * temperature, and what would explain the difference.
  */
 import type { BenchPoint, Board } from '../model/board';
+import { usualCauses } from './bench-causes';
 import { compareBench } from './bench-compare';
 import { explainBench } from './bench-explain';
 import { benchModel } from './bench-model';
@@ -34,8 +35,12 @@ function benchResult(board: Board, solved: RailVoltages, point: BenchPoint): Ben
     voltage,
     ripple,
     inside: compared.length > 0 ? compared.every(({ outside }) => outside === 0) : null,
-    outputResistance: model.typical.outputResistance,
     explanation: once(() => explainBench(model, { voltage, ripple })),
+    causes: (of) => {
+      const comparison = { voltage, ripple }[of];
+      if (!comparison || comparison.outside === 0) return [];
+      return usualCauses(model, rail, point, of, comparison);
+    },
   };
 }
 
@@ -46,7 +51,6 @@ function nothing(point: BenchPoint, because: string): BenchResult {
     voltage: null,
     ripple: null,
     inside: null,
-    outputResistance: null,
     because,
   };
 }

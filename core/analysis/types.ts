@@ -340,7 +340,9 @@ export interface BenchMove {
   readonly end: number;
   /** Part of the way from typical to that end; more than 1 has left the band. */
   readonly share: number;
-  readonly brings: 'voltage' | 'ripple' | 'both';
+  /** What it was moved for, and whether the other measured figure comes in with it. */
+  readonly explains: 'voltage' | 'ripple';
+  readonly both: boolean;
 }
 
 export interface BenchExplanation {
@@ -366,10 +368,10 @@ export interface BenchResult {
   readonly ripple: BenchComparison | null;
   /** Null when nothing could be compared. */
   readonly inside: boolean | null;
-  /** At the bench load, ohm. */
-  readonly outputResistance: number | null;
   /** Computed at the first call. */
   readonly explanation?: () => BenchExplanation;
+  /** Clauses: what usually makes such a difference on a bench; empty for what lies inside the band. */
+  readonly causes?: (of: 'voltage' | 'ripple') => readonly string[];
   /** One clause when nothing is predicted. */
   readonly because?: string;
 }

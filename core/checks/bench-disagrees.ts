@@ -1,8 +1,7 @@
 /**
  * A bench measurement that no tolerance of the board explains.
  */
-import { usualCauses } from '../analysis/bench-causes';
-import { benchLoad, explanationWords, sideWords } from '../analysis/bench-words';
+import { benchLoad, beyondWords, sideWords } from '../analysis/bench-words';
 import type { BenchComparison, BenchResult } from '../analysis/types';
 import { inMode, volts } from '../analysis/words';
 import { formatBand, formatQuantity } from '../quantity/write';
@@ -56,20 +55,8 @@ function edgeWords(comparison: BenchComparison): string {
 }
 
 function reasons(result: BenchResult, target: 'voltage' | 'ripple'): readonly string[] {
-  const causes = usualCauses(result, target);
-  const turned = causes.length === 1;
-  const beyond = turned ? [] : explanationWords({ ...none, beyond: beyondOf(result, target) });
-  if (causes.length === 0) return beyond;
-  const lead = turned ? 'Look for ' : 'No tolerance explains it; usual on a bench (common practice) are ';
-  return [`${lead}${listed(causes)}.`, ...beyond];
-}
-
-const none = { moves: [], together: false, all: null, beyond: [] };
-
-function beyondOf({ explanation }: BenchResult, target: 'voltage' | 'ripple') {
-  return (explanation?.().beyond ?? []).filter(({ brings }) => brings === target || brings === 'both');
-}
-
-function listed(causes: readonly string[]): string {
-  return causes.length < 2 ? causes.join('') : `${causes.slice(0, -1).join(', ')}, or ${causes.at(-1)}`;
+  const causes = result.causes?.(target) ?? [];
+  const beyond = result.explanation ? beyondWords(result.explanation(), target) : [];
+  const usual = `No tolerance explains it; usual on a bench (common practice): ${causes.join('; ')}.`;
+  return causes.length === 0 ? beyond : [usual, ...beyond];
 }

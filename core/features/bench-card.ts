@@ -1,7 +1,6 @@
 /**
  * The card of a bench entry: is it inside the predicted band, by how much it is off, and what would explain that.
  */
-import { usualCauses } from '../analysis/bench-causes';
 import { benchLoad, benchWords, explanationWords } from '../analysis/bench-words';
 import type { BenchComparison, BenchResult, BoardAnalysis } from '../analysis/types';
 import { inMode } from '../analysis/words';
@@ -59,9 +58,7 @@ function tableOf({ point, voltage, ripple }: BenchResult): Pick<Card, 'head' | '
 /** What to look at on the bench when tolerances do not explain it. */
 function causes(result: BenchResult): readonly string[] {
   return (['voltage', 'ripple'] as const).flatMap((target) => {
-    const comparison = result[target];
-    if (!comparison || comparison.outside === 0) return [];
-    const list = usualCauses(result, target);
+    const list = result.causes?.(target) ?? [];
     return list.length === 0 ? [] : [`Usual for such a ${target} (common practice): ${list.join('; ')}.`];
   });
 }

@@ -166,12 +166,13 @@ function benchReport({ point, predicted, voltage, ripple, inside, explanation }:
     predicted: { voltage: band(predicted?.voltage ?? null), ripple: band(predicted?.ripple ?? null) },
     deviation: { voltage: finite(voltage?.deviation), ripple: finite(ripple?.deviation) },
     inside,
-    explained: (explained?.moves ?? []).map(({ label, path, value, unit, typical }) => ({
+    explained: (explained?.moves ?? []).map(({ label, path, value, unit, typical, explains, both }) => ({
       by: label,
       at: path,
       value,
       unit,
       typical,
+      explains: both ? 'both' : explains,
     })),
     together: explained?.together ?? false,
     note: point.note ?? null,

@@ -98,6 +98,8 @@ export interface BenchMoveReport {
   readonly value: number;
   readonly unit: string;
   readonly typical: number;
+  /** Which of the two measured figures it brings to the prediction. */
+  readonly explains: 'voltage' | 'ripple' | 'both';
 }
 
 /** A measured point against the prediction at the same load. */
