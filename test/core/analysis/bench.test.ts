@@ -109,7 +109,7 @@ describe('bench entries of a pump', () => {
       board(up, `  - { rail: up, load: 10 mA +-1 %, voltage: ${volts} V }\n`, '20 kHz +-10 %');
     const { min, typical } = at(8).report.bench[0]!.predicted.voltage!;
     const fall = doubler(10e-3, 1e-6, 10e-6).voltage - doubler(10.1e-3, 0.9e-6, 10e-6, 18e3).voltage;
-    expectNear(typical - min, fall, 0.01);
+    expectNear(typical - min, fall, 0.02);
     const pair = at(typical - 0.08).report.bench[0]!;
     expect(pair.together).toBe(true);
     expect(pair.explained.map(({ by }) => by).sort()).toEqual(['a frequency', 'flying capacitor']);
