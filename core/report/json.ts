@@ -3,7 +3,6 @@
  * something is not computed.
  */
 import type {
-  BenchResult,
   BoardAnalysis,
   ChipResult,
   ClockResult,
@@ -15,10 +14,10 @@ import type {
   SupplyResult,
 } from '../analysis/types';
 import type { Finding } from '../checks/finding';
-import type { Band } from '../quantity/figure';
 import { type LineIndex, lineIndex } from '../text/lines';
+import { benchReport } from './json-bench';
+import { band, finite } from './plain';
 import type {
-  BenchReport,
   ChipReport,
   ClockReport,
   DriverReport,
@@ -155,30 +154,6 @@ function partReports(analysis: BoardAnalysis): Record<string, PartReport> {
   return Object.fromEntries(parts);
 }
 
-function benchReport({ point, predicted, voltage, ripple, inside, explanation }: BenchResult): BenchReport {
-  const { load } = point;
-  const explained = explanation?.();
-  return {
-    rail: point.rail?.name ?? null,
-    load: finite(load?.typical),
-    unit: load ? (load.unit === 'ohm' ? 'ohm' : 'A') : null,
-    measured: { voltage: finite(point.voltage?.typical), ripple: finite(point.ripple?.typical) },
-    predicted: { voltage: band(predicted?.voltage ?? null), ripple: band(predicted?.ripple ?? null) },
-    deviation: { voltage: finite(voltage?.deviation), ripple: finite(ripple?.deviation) },
-    inside,
-    explained: (explained?.moves ?? []).map(({ label, path, value, unit, typical, explains, both }) => ({
-      by: label,
-      at: path,
-      value,
-      unit,
-      typical,
-      explains: both ? 'both' : explains,
-    })),
-    together: explained?.together ?? false,
-    note: point.note ?? null,
-  };
-}
-
 function findingReport(finding: Finding, lines: LineIndex): FindingReport {
   const position = (offset: number): Position => ({ ...lines.position(offset), offset });
   return {
@@ -200,14 +175,4 @@ function findingReport(finding: Finding, lines: LineIndex): FindingReport {
 /** `fromEntries` keeps even a name such as `__proto__` as an own property. */
 function mapped<T, R>(entries: ReadonlyMap<string, T>, convert: (value: T) => R): Record<string, R> {
   return Object.fromEntries([...entries].map(([name, value]) => [name, convert(value)]));
-}
-
-/** Only the three numbers, whatever else the figure carries; a number that JSON cannot hold is not computed. */
-function band(value: Band | null): Band | null {
-  if (value === null || ![value.min, value.typical, value.max].every(Number.isFinite)) return null;
-  return { min: value.min, typical: value.typical, max: value.max };
-}
-
-function finite(value: number | null | undefined): number | null {
-  return value !== null && value !== undefined && Number.isFinite(value) ? value : null;
 }
