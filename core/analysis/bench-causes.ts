@@ -57,7 +57,7 @@ function voltageCauses(
   }
   const weak = Math.abs(measured.typical) < Math.abs(predicted.typical);
   const amps = loadAmps(point, predicted.typical);
-  if (rail.origin?.kind === 'pump') return pumpCauses(model, rail.origin.pump, amps, weak);
+  if (model.pump) return pumpCauses(model, model.pump, amps, weak);
   const regulated = rail.origin?.kind === 'regulator';
   if (!weak)
     return [

@@ -6,7 +6,7 @@ import type { BenchPoint, Board } from '../model/board';
 import { usualCauses } from './bench-causes';
 import { compareBench } from './bench-compare';
 import { explainBench } from './bench-explain';
-import { benchModel } from './bench-model';
+import { benchModel } from './bench-rail';
 import { isGap } from './gap';
 import { once } from './once';
 import type { RailVoltages } from './rail-voltages';

@@ -31,6 +31,8 @@ export interface RailVoltages {
   readonly parts: ReadonlyMap<string, readonly PumpParts[]>;
   /** How the board looks from the pump that makes the rail. */
   around(rail: Rail): Surroundings;
+  /** Currents with which the rails that give way were computed. */
+  readonly drawn: Drawn;
 }
 
 /** Rounds after which a board that still moves is taken as it is. */
@@ -159,7 +161,7 @@ export function railSolver(
     if (input === undefined) return band.typical;
     return regulatedVoltage(origin.regulator, exactly(input))?.typical;
   };
-  return { voltages, at, pumps, chains, models, parts, around, voltage };
+  return { voltages, at, pumps, chains, models, parts, around, drawn, voltage };
 }
 
 /** Open voltage and source resistance of the supply that a rail is. */

@@ -2,8 +2,8 @@
  * All rules in one list, sorted by code: adding a rule is one file and one line. No rule depends on the order.
  */
 import type { BoardAnalysis } from '../analysis/types';
-import { capacitorDerated } from './capacitor-derated';
 import { benchDisagrees } from './bench-disagrees';
+import { capacitorDerated } from './capacitor-derated';
 import { capacitorRating } from './capacitor-rating';
 import { capacitorRippleCurrent } from './capacitor-ripple-current';
 import type { Check } from './check';
@@ -36,8 +36,8 @@ import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
-  capacitorDerated,
   benchDisagrees,
+  capacitorDerated,
   capacitorRating,
   capacitorRippleCurrent,
   chipOverLimit,

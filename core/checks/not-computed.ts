@@ -51,7 +51,7 @@ function uncomparedBench(analysis: BoardAnalysis): readonly Finding[] {
       return [finding('', point.rail?.span ?? point.span, why)];
     }
     if (!point.ripple || predicted.ripple) return [];
-    const why = `This ripple is not compared: no pump makes ${rail.name}, and no ripple of it is computed.`;
+    const why = `This ripple is not compared: no pump makes ${rail.name}, and bench entries are set against the ripple of pumps only.`;
     return [finding('.ripple', point.ripple.span ?? point.span, why)];
   });
 }

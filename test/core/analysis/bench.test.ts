@@ -215,6 +215,39 @@ describe('bench entries of other rails', () => {
     );
     expect(starved.report.bench[0]!.predicted.voltage!.typical).toBeCloseTo(3.1, 9);
   });
+
+  it('behind a filter load the pump in front through the resistor', () => {
+    const rails = (loads: string) => `  up:
+    ${pump('1 uF', '10 uF')}
+    loads: ${loads}
+  quiet:
+    filter: { from: up, resistor: 100 ohm +-10 %, capacitor: { value: 1 uF, kind: film } }
+    loads: { y: 3 mA }
+`;
+    const entry = (lines: string, load: string, rail = 'quiet') =>
+      board(lines, `  - { rail: ${rail}, load: ${load}, voltage: 8 V }\n`).report.bench[0]!.predicted;
+    // Ohm's law: the pump alone with both currents, less 5 mA through 100 ohm and its tolerance.
+    const front = entry(rails('{ x: 1 mA }'), '7 mA', 'up').voltage!;
+    const current = entry(rails('{ x: 2 mA }'), '5 mA');
+    expectNear(current.voltage!.typical, front.typical - 0.5, 1e-5);
+    expectNear(front.min - current.voltage!.min, 5e-3 * 110, 1e-3);
+    expectNear(front.max - current.voltage!.max, 5e-3 * 90, 1e-3);
+    expect(current.ripple).toBeNull();
+    // The same point as a resistance.
+    const ohms = entry(rails('{ x: 2 mA }'), `${current.voltage!.typical / 5e-3} ohm`);
+    expectNear(ohms.voltage!.typical, current.voltage!.typical, 1e-5);
+    const found = board(
+      rails('{ x: 2 mA }'),
+      `  - { rail: quiet, load: 5 mA, voltage: ${current.voltage!.typical - 0.03} V }\n`,
+    ).report.bench[0]!;
+    expect(found.explained[0]).toMatchObject({ by: 'filter resistor', at: 'rails.quiet.filter.resistor' });
+    expectNear(found.explained[0]!.value, 106, 1e-3);
+    // Behind a rail that holds, nothing but the resistor gives way.
+    const held = '  calm: { filter: { from: v5, resistor: 10 ohm, capacitor: 1 uF } }\n';
+    expect(entry(held, '20 mA', 'calm').voltage!.typical).toBeCloseTo(5 - 0.2, 9);
+    expect(entry(held, '90 ohm', 'calm').voltage!.typical).toBeCloseTo(4.5, 9);
+    expect(entry(held, '0 mA', 'calm').voltage!.typical).toBeCloseTo(5, 9);
+  });
 });
 
 describe('bench entries without a prediction', () => {

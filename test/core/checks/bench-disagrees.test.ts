@@ -3,7 +3,7 @@ import { bench } from '../../support/bench-board';
 import { checkRule, checkSilent } from '../../support/check-rule';
 
 const parts = (flying: string) =>
-  `drive: tick, diode: schottky-signal, flying: { value: ${flying}, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film }`;
+  `drive: tick, diode: schottky-signal, flying: { value: ${flying}, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film, esr: 5 mohm }`;
 const up = `  up:
     pump: { topology: doubler, input: v5, ${parts('22 nF +-10 %')} }
     loads: { lamp: 1 mA }

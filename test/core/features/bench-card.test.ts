@@ -3,7 +3,7 @@ import { bench } from '../../support/bench-board';
 import { hoverAt } from '../../support/hover-at';
 
 const text = (entry: string) => `${bench}  up:
-    pump: { topology: doubler, input: v5, drive: tick, diode: schottky-signal, flying: { value: 22 nF +-20 %, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film } }
+    pump: { topology: doubler, input: v5, drive: tick, diode: schottky-signal, flying: { value: 22 nF +-20 %, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film, esr: 5 mohm } }
     loads: { lamp: 5 mA }
 bench:
   - { rail: up, ${entry}, note: 'board 3, bench meter' }

@@ -3,7 +3,7 @@ import { analyse, ledgerText } from '../../../core/index';
 import { bench } from '../../support/bench-board';
 
 const board = `${bench}  up:
-    pump: { topology: doubler, input: v5, drive: tick, diode: schottky-signal, flying: { value: 22 nF +-20 %, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film } }
+    pump: { topology: doubler, input: v5, drive: tick, diode: schottky-signal, flying: { value: 22 nF +-20 %, kind: film }, reservoir: { value: 10 uF +-10 %, kind: film, esr: 5 mohm } }
     loads: { lamp: 5 mA }
   stray: { pump: { topology: ladder, drive: tick, diode: schottky-signal, flying: 1 uF } }
 bench:
