@@ -58,7 +58,7 @@ export function computeBoard(
     drivers: driverResults(board, solved),
     regulators: regulatorResults(board, solved, currents),
     supplies: supplyResults(board, currents),
-    bench: once(() => benchResults(board, solved)),
+    bench: once(() => benchResults({ board, solved, memory })),
     balance: balances.length > 0 ? Math.max(...balances) : null,
     problems: [
       ...gapFindings(solved),

@@ -57,7 +57,7 @@ function voltageCauses(
   }
   const weak = Math.abs(measured.typical) < Math.abs(predicted.typical);
   const amps = loadAmps(point, predicted.typical);
-  if (model.pump) return pumpCauses(model, model.pump, amps, weak);
+  if (model.pump) return pumpCauses(model, model.pump, predicted.typical, amps, weak);
   const regulated = rail.origin?.kind === 'regulator';
   if (!weak)
     return [
@@ -74,7 +74,13 @@ function voltageCauses(
   ];
 }
 
-function pumpCauses(model: BenchModel, pump: Pump, amps: number, weak: boolean): readonly Cause[] {
+function pumpCauses(
+  model: BenchModel,
+  pump: Pump,
+  predicted: number,
+  amps: number,
+  weak: boolean,
+): readonly Cause[] {
   const stages = Math.round(pump.stages?.typical ?? 1);
   const way = weak ? 'below' : 'above';
   const supply = {
@@ -87,7 +93,7 @@ function pumpCauses(model: BenchModel, pump: Pump, amps: number, weak: boolean):
   };
   if (!weak) return [supply, { words: 'a load that draws less than entered' }, diodes];
   return [
-    ...loading(model),
+    ...loading(model, predicted),
     {
       words: 'a flying capacitor that its d.c. bias or its kind leaves short of capacitance',
       volts: changeOf(model, ({ unit, path }) => unit === 'F' && path.includes('.pump.flying')),
@@ -108,9 +114,10 @@ function changeOf(
   { variables, typical }: BenchModel,
   meant: (variable: (typeof variables)[number]) => boolean,
 ) {
+  const { slopes } = typical();
   return variables.reduce(
     (sum, variable, k) =>
-      meant(variable) ? sum + Math.abs((typical.slopes.voltage[k] || 0) * variable.band.typical) : sum,
+      meant(variable) ? sum + Math.abs((slopes.voltage[k] || 0) * variable.band.typical) : sum,
     0,
   );
 }
@@ -121,11 +128,11 @@ const instruments = [
 ] as const;
 
 /** The least instrument that loads the rail enough to matter is told with what it does, the next one otherwise. */
-function loading({ typical, withProbe }: BenchModel): readonly Cause[] {
+function loading({ withProbe }: BenchModel, predicted: number): readonly Cause[] {
   return instruments.flatMap(({ name, ohms }) => {
     const reached = withProbe(ohms);
     if (reached === undefined) return [];
-    const drop = Math.abs(typical.voltage) - Math.abs(reached);
+    const drop = Math.abs(predicted) - Math.abs(reached);
     const words = `${name} as a load of ${formatQuantity(ohms, 'ohm')}, which costs ${volts(drop)}`;
     return drop > 0 ? [{ words, volts: drop }] : [];
   });

@@ -106,11 +106,11 @@ const usualTolerance = 0.1;
 const mostFactor = 5;
 
 function beyondTheirBand(model: BenchModel, compared: Compared, goal: Goal): BenchMove[] {
-  const need = goal.value - readingOf(model.typical, goal.target);
+  const need = goal.value - readingOf(model.typical(), goal.target);
   const moves = model.variables
     .flatMap((variable, index): (Approach & { most: number })[] => {
       const { min, typical, max } = variable.band;
-      const slope = model.typical.slopes[goal.target][index]!;
+      const slope = model.typical().slopes[goal.target][index]!;
       if (!canBeElse(variable) || !(typical > 0) || !(need * slope !== 0)) return [];
       const upward = need * slope > 0;
       const own = hasBand(variable) ? (upward ? max : min) : typical;

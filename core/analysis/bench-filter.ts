@@ -2,23 +2,30 @@
  * A rail behind a filter with the load that stood on it at the bench: the rail in front carries that load beside its
  * own, and the filter's resistor takes its share.
  */
-import type { BenchPoint, Board, Filter, Rail } from '../model/board';
+import type { BenchPoint, Filter, Rail } from '../model/board';
 import type { Band, Figure } from '../quantity/figure';
-import { type BenchModel, type BenchReading, plainModel, typicals, variable } from './bench-model';
+import {
+  type BenchModel,
+  type BenchReading,
+  type BenchSite,
+  plainModel,
+  typicals,
+  variable,
+} from './bench-model';
 import { benchLoad, pumpModel } from './bench-pump';
 import { filterOhms } from './filters';
 import { type Gap, isGap } from './gap';
+import { once } from './once';
 import type { Variable } from './pump-model';
-import type { RailVoltages } from './rail-voltages';
 
 export function filterModel(
-  board: Board,
-  solved: RailVoltages,
+  site: BenchSite,
   rail: Rail,
   filter: Filter,
   point: BenchPoint,
   load: Figure,
 ): BenchModel | Gap {
+  const { board, solved } = site;
   const front = filter.from && board.rails.get(filter.from.name);
   if (!front) return { because: `the filter of ${rail.name} has no rail in front` };
   const ohms = filterOhms(filter);
@@ -26,11 +33,10 @@ export function filterModel(
   // To the rail in front the load and the resistor before it are one resistor, and a current stays a current.
   const seen: Figure = load.unit === 'ohm' ? { ...load, ...added(load, ohms) } : load;
   if (front.origin?.kind === 'pump') {
-    const own = solved.drawn;
     const below = (mode: string | undefined) =>
-      without(solved.around(front).below(mode), own.total(rail.name, mode));
+      without(solved.around(front).below(mode), solved.drawn.total(rail.name, mode));
     const loads = [...front.loads.values(), benchLoad(point, seen)];
-    const inner = pumpModel(board, solved, front, front.origin.pump, loads, below);
+    const inner = pumpModel(site, front, front.origin.pump, loads, below);
     return isGap(inner) ? inner : behind(inner, `${point.path}.load`, resistor);
   }
   const known = solved.voltages.get(front.name) ?? { because: `${front.name} is not known` };
@@ -72,7 +78,7 @@ function behind(inner: BenchModel, loadPath: string, resistor: Variable): BenchM
       slopes: { voltage: [...own, slope(1)], ripple: variables.map(() => 0) },
     };
   };
-  const typical = read(inner.typical, typicals(variables));
+  const typical = once(() => read(inner.typical(), typicals(variables)));
   /** With the load and the resistor at the ends that take most, or least. */
   const end = (volts: number, most: boolean) => {
     const heavy = most === (load?.unit === 'A');
@@ -91,16 +97,20 @@ function behind(inner: BenchModel, loadPath: string, resistor: Variable): BenchM
       return reading && read(reading, values);
     },
     bands: () => {
-      const { min, max } = inner.bands().voltage;
+      const { min, typical: middle, max } = inner.bands().voltage;
       const ends = [end(min, min > 0), end(max, max < 0)];
       return {
-        voltage: { min: Math.min(...ends), typical: typical.voltage, max: Math.max(...ends) },
+        voltage: {
+          min: Math.min(...ends),
+          typical: output(middle, resistor.band.typical, load?.band.typical ?? 0),
+          max: Math.max(...ends),
+        },
         ripple: null,
       };
     },
     withProbe: (ohms) => {
       const volts = inner.withProbe(ohms);
-      return volts === undefined ? undefined : volts - (inner.typical.voltage - typical.voltage);
+      return volts === undefined ? undefined : output(volts, resistor.band.typical, load?.band.typical ?? 0);
     },
   };
 }

@@ -2,10 +2,20 @@
  * A rail with the load that stood on it at the bench, and nothing else: the quantities that its voltage depends on,
  * and what it comes to at any values of them.
  */
-import type { Pump } from '../model/board';
+import type { Board, Pump } from '../model/board';
 import type { Band, Unit } from '../quantity/figure';
+import type { Memory } from './memory';
+import { once } from './once';
 import type { Target } from './pump-corners';
 import type { Variable } from './pump-model';
+import type { RailVoltages } from './rail-voltages';
+
+/** The board that was measured, as far as it is computed. */
+export interface BenchSite {
+  readonly board: Board;
+  readonly solved: RailVoltages;
+  readonly memory: Memory;
+}
 
 export interface BenchReading {
   readonly voltage: number;
@@ -20,7 +30,8 @@ export interface BenchModel {
   readonly mode: string | undefined;
   /** The pump that makes the rail, or feeds its filter. */
   readonly pump?: Pump;
-  readonly typical: BenchReading;
+  /** Solved at the first call: the bands need no derivatives. */
+  typical(): BenchReading;
   /** With the variables at `values`; undefined where no steady state is found. */
   at(values: readonly number[]): BenchReading | undefined;
   /** Typical values and extremes over tolerance and temperature. */
@@ -39,7 +50,7 @@ export function plainModel(
     ripple: null,
     slopes: { voltage: slopesOf(volts, values), ripple: values.map(() => 0) },
   });
-  const typical = read(typicals(variables));
+  const typical = once(() => read(typicals(variables)));
   const ends = variables.reduce<number[][]>(
     (points, { band }) => points.flatMap((point) => [band.min, band.max].map((end) => [...point, end])),
     [[]],
@@ -51,11 +62,15 @@ export function plainModel(
     typical,
     at: read,
     bands: () => ({
-      voltage: { min: Math.min(...extremes), typical: typical.voltage, max: Math.max(...extremes) },
+      voltage: {
+        min: Math.min(...extremes),
+        typical: volts(typicals(variables)),
+        max: Math.max(...extremes),
+      },
       ripple: null,
     }),
     // What gives way by ohms does not feel megohms.
-    withProbe: () => typical.voltage,
+    withProbe: () => volts(typicals(variables)),
   };
 }
 

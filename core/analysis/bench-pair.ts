@@ -21,7 +21,7 @@ export function pairForBoth(model: BenchModel, goals: readonly [Goal, Goal]): Fo
   return movable
     .flatMap((a, n) =>
       movable.slice(n + 1).flatMap((b) => {
-        const moved = newton(model, goals, [a, b], start, model.typical);
+        const moved = newton(model, goals, [a, b], start, model.typical());
         const share = moved ? Math.max(shareOf(model, a, moved), shareOf(model, b, moved)) : Infinity;
         // Far from straight lines a part of the way too much may turn out to be enough.
         return share < 1.5 ? [{ pair: [a, b] as const, share }] : [];
@@ -39,7 +39,7 @@ function follow(
   pair: readonly [number, number],
 ): FoundPair | undefined {
   let values = typicals(model.variables);
-  let reading: BenchReading | undefined = model.typical;
+  let reading: BenchReading | undefined = model.typical();
   for (let round = 0; round < mostRounds; round++) {
     const moved = newton(model, goals, pair, values, reading);
     reading = moved && model.at(moved);

@@ -1,18 +1,16 @@
 /**
  * A pump with the load that stood on it at the bench.
  */
-import type { BenchPoint, Board, Load, Pump, Rail } from '../model/board';
+import type { BenchPoint, Load, Pump, Rail } from '../model/board';
 import type { Band, Figure } from '../quantity/figure';
-import type { BenchModel, BenchReading } from './bench-model';
+import type { BenchModel, BenchReading, BenchSite } from './bench-model';
 import { pumpVoltage } from './curves';
 import { type Gap, isGap } from './gap';
-import { assemblePump, type PumpParts } from './pump-assembly';
-import { settlePump } from './pump-bias';
-import { corner, type Target } from './pump-corners';
+import { once } from './once';
+import type { PumpParts } from './pump-assembly';
 import { typicalPoint } from './pump-model';
-import { type SolvedPoint, solvePoint } from './pump-point';
-import { setUpPump } from './pump-solution';
-import type { RailVoltages } from './rail-voltages';
+import { solvePoint } from './pump-point';
+import { setUpPump, solveParts } from './pump-solution';
 
 /** The load of the entry as a load of the rail. */
 export function benchLoad({ span, path }: BenchPoint, load: Figure): Load {
@@ -28,8 +26,7 @@ export function benchLoad({ span, path }: BenchPoint, load: Figure): Load {
 
 /** `below`: what else stands on the rail in a mode, A. */
 export function pumpModel(
-  board: Board,
-  solved: RailVoltages,
+  { board, solved, memory }: BenchSite,
   rail: Rail,
   pump: Pump,
   loads: readonly Load[],
@@ -38,26 +35,38 @@ export function pumpModel(
   const loaded: Rail = { ...rail, loads: new Map(loads.map((load) => [load.path, load])) };
   const setup = setUpPump(board, loaded, pump, { ...solved.around(rail), below });
   if (isGap(setup)) return setup;
-  const parts = lightest(setup.parts);
-  const { mode } = parts;
-  const settled = settlePump(pump, mode, (bears) => assemblePump(bears ? { ...parts, bears } : parts));
-  if (!settled) return { because: 'a capacitor or a diode of it has no usable value' };
-  const { model, at: from } = settled;
-  if ('reason' in from) return { because: `no steady state was found at this load: ${from.reason}` };
-  const ends = (target: Target): Band => ({
-    min: corner(model, mode, from, target, -1).value,
-    typical: from.point[target],
-    max: corner(model, mode, from, target, 1).value,
+  const parts = [lightest(setup.parts)];
+  const { models, result } = memory.pump(parts, () => solveParts(pump, parts));
+  const [found] = models;
+  if (!found) return { because: 'a capacitor or a diode of it has no usable value' };
+  if ('reason' in result) return { because: `no steady state was found at this load: ${result.reason}` };
+  const { mode, model } = found;
+  const { heaviest } = result;
+  const ends = (target: 'voltage' | 'ripple'): Band => ({
+    min: result[target].lowest.value,
+    typical: heaviest[target],
+    max: result[target].highest.value,
   });
+  const at = (values: readonly number[]): BenchReading | undefined => {
+    const reached = solvePoint(model, values, mode);
+    if ('reason' in reached) return undefined;
+    const { point, slopes } = reached;
+    return { voltage: point.voltage, ripple: point.ripple, slopes };
+  };
+  const flat = model.variables.map(() => 0);
   return {
     variables: model.variables,
     mode,
     pump,
-    typical: readingAt(from),
-    at: (values) => {
-      const reached = solvePoint(model, values, mode);
-      return 'reason' in reached ? undefined : readingAt(reached);
-    },
+    typical: once(
+      () =>
+        at(typicalPoint(model)) ?? {
+          voltage: heaviest.voltage,
+          ripple: heaviest.ripple,
+          slopes: { voltage: flat, ripple: flat },
+        },
+    ),
+    at,
     bands: () => ({ voltage: ends('voltage'), ripple: ends('ripple') }),
     withProbe: (ohms) => {
       const values = model.values(typicalPoint(model));
@@ -73,8 +82,4 @@ export function pumpModel(
 function lightest(modes: readonly PumpParts[]): PumpParts {
   const height = ({ rails }: PumpParts) => rails.reduce((sum, { band }) => sum + Math.abs(band.typical), 0);
   return modes.reduce((best, candidate) => (height(candidate) > height(best) ? candidate : best));
-}
-
-function readingAt({ point, slopes }: SolvedPoint): BenchReading {
-  return { voltage: point.voltage, ripple: point.ripple, slopes };
 }

@@ -4,30 +4,24 @@
 import type { BenchPoint, Board, Rail } from '../model/board';
 import { exactly, type Figure } from '../quantity/figure';
 import { filterModel } from './bench-filter';
-import { type BenchModel, plainModel, variable } from './bench-model';
+import { type BenchModel, type BenchSite, plainModel, variable } from './bench-model';
 import { benchLoad, pumpModel } from './bench-pump';
 import { type Gap, isGap } from './gap';
 import type { RailVoltages } from './rail-voltages';
 import { regulatedVoltage } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
 
-export function benchModel(
-  board: Board,
-  solved: RailVoltages,
-  rail: Rail,
-  point: BenchPoint,
-  load: Figure,
-): BenchModel | Gap {
+export function benchModel(site: BenchSite, rail: Rail, point: BenchPoint, load: Figure): BenchModel | Gap {
   const { origin } = rail;
   switch (origin?.kind) {
     case 'pump':
-      return pumpModel(board, solved, rail, origin.pump, [benchLoad(point, load)], () => exactly(0));
+      return pumpModel(site, rail, origin.pump, [benchLoad(point, load)], () => exactly(0));
     case 'filter':
-      return filterModel(board, solved, rail, origin.filter, point, load);
+      return filterModel(site, rail, origin.filter, point, load);
     case 'supply':
-      return supplyModel(board, origin.supply.name, point, load);
+      return supplyModel(site.board, origin.supply.name, point, load);
     default:
-      return heldModel(solved, rail);
+      return heldModel(site.solved, rail);
   }
 }
 

@@ -35,7 +35,7 @@ export interface Found {
 
 /** All variables that tolerance can move towards the goal, those that need the smallest share first. */
 export function approaches(model: BenchModel, goal: Goal): Approach[] {
-  const need = goal.value - readingOf(model.typical, goal.target);
+  const need = goal.value - readingOf(model.typical(), goal.target);
   return model.variables
     .flatMap((variable, index): Approach[] => {
       if (!hasBand(variable)) return [];
@@ -52,10 +52,10 @@ export function approaches(model: BenchModel, goal: Goal): Approach[] {
 /** Change of the target at share 1 if the derivative held; where there is none, the solver is asked. */
 function gainOf(model: BenchModel, step: Step, target: Target): number {
   const { typical } = model.variables[step.index]!.band;
-  const slope = model.typical.slopes[target][step.index]!;
+  const slope = model.typical().slopes[target][step.index]!;
   if (!Number.isNaN(slope)) return slope * speed(typical, step.end);
   const reached = model.at(along(model, [step], 1));
-  return reached ? readingOf(reached, target) - readingOf(model.typical, target) : Number.NaN;
+  return reached ? readingOf(reached, target) - readingOf(model.typical(), target) : Number.NaN;
 }
 
 /** Rounds in which the share may be corrected; the derivative is close, so that two usually do. */
@@ -69,7 +69,7 @@ export function settle(
   first: number,
   most = 1,
 ): Found | undefined {
-  let before = { share: 0, off: readingOf(model.typical, goal.target) - goal.value };
+  let before = { share: 0, off: readingOf(model.typical(), goal.target) - goal.value };
   let share = first;
   for (let round = 0; round < mostRounds; round++) {
     if (!(share > 0)) return undefined;

@@ -2,25 +2,25 @@
  * Entries of `bench`: each measured point against the prediction at its own load, typical and over tolerance and
  * temperature, and what would explain the difference.
  */
-import type { BenchPoint, Board } from '../model/board';
+import type { BenchPoint } from '../model/board';
 import { usualCauses } from './bench-causes';
 import { compareBench } from './bench-compare';
 import { explainBench } from './bench-explain';
+import type { BenchSite } from './bench-model';
 import { benchModel } from './bench-rail';
 import { isGap } from './gap';
 import { once } from './once';
-import type { RailVoltages } from './rail-voltages';
 import type { BenchResult } from './types';
 
-export function benchResults(board: Board, solved: RailVoltages): readonly BenchResult[] {
-  return board.bench.map((point) => benchResult(board, solved, point));
+export function benchResults(site: BenchSite): readonly BenchResult[] {
+  return site.board.bench.map((point) => benchResult(site, point));
 }
 
-function benchResult(board: Board, solved: RailVoltages, point: BenchPoint): BenchResult {
-  const rail = point.rail && board.rails.get(point.rail.name);
+function benchResult(site: BenchSite, point: BenchPoint): BenchResult {
+  const rail = point.rail && site.board.rails.get(point.rail.name);
   if (!rail) return nothing(point, 'it names no rail of the board');
   if (!point.load) return { ...nothing(point, 'its load is not known'), rail };
-  const model = benchModel(board, solved, rail, point, point.load);
+  const model = benchModel(site, rail, point, point.load);
   if (isGap(model)) return { ...nothing(point, model.because), rail };
   const predicted = model.bands();
   const voltage = point.voltage ? compareBench('voltage', point.voltage, predicted.voltage) : null;
