@@ -168,9 +168,12 @@ function byRank(moves: readonly BenchMove[]): BenchMove[] {
   return byShare(moves).sort((a, b) => Number(b.both) - Number(a.both));
 }
 
-function goalOf(target: Target, { measured, deviation }: BenchComparison): Goal {
+/** What is inside the band by the instrument's error alone is sought at the band's end. */
+function goalOf(target: Target, { measured, predicted, deviation, outside }: BenchComparison): Goal {
   const width = (measured.max - measured.min) / 2;
-  return { target, value: measured.typical, within: Math.max(0.01 * Math.abs(deviation), 0.1 * width) };
+  const value =
+    outside === 0 ? Math.min(predicted.max, Math.max(predicted.min, measured.typical)) : measured.typical;
+  return { target, value, within: Math.max(0.01 * Math.abs(deviation), 0.1 * width) };
 }
 
 function other(target: Target): Target {
