@@ -6,6 +6,7 @@ import type { Finding } from '../checks/finding';
 import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
 import { formatQuantity } from '../quantity/write';
+import { benchResults } from './bench';
 import { weightedModes } from './board-modes';
 import { chipResults, currentBand, groupResults } from './chips';
 import { clockSource } from './clock-source';
@@ -13,6 +14,7 @@ import { boardCurrents, type CurrentCases } from './currents';
 import { driverResults } from './drivers';
 import { isGap } from './gap';
 import { Memory } from './memory';
+import { once } from './once';
 import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
@@ -56,6 +58,7 @@ export function computeBoard(
     drivers: driverResults(board, solved),
     regulators: regulatorResults(board, solved, currents),
     supplies: supplyResults(board, currents),
+    bench: once(() => benchResults({ board, solved, memory })),
     balance: balances.length > 0 ? Math.max(...balances) : null,
     problems: [
       ...gapFindings(solved),

@@ -53,10 +53,13 @@ export function pumpLoadLine({ model }: ModeModel, most: number, points: number)
 }
 
 function voltageAt(values: PumpValues, amps: number): number | null {
-  const placed = pumpNetwork({
-    ...values,
-    loads: amps > 0 ? [{ name: 'load line', kind: 'current', amps }] : [],
-  });
+  const loads: PumpValues['loads'] = amps > 0 ? [{ name: 'load line', kind: 'current', amps }] : [];
+  return pumpVoltage({ ...values, loads }) ?? null;
+}
+
+/** Average output of a pump; undefined where no steady state was found. */
+export function pumpVoltage(values: PumpValues): number | undefined {
+  const placed = pumpNetwork(values);
   const solved = placed && solve(placed.network);
-  return placed && solved?.converged ? solved.nodes[placed.output]!.average : null;
+  return placed && solved?.converged ? solved.nodes[placed.output]!.average : undefined;
 }

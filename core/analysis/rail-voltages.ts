@@ -30,6 +30,10 @@ export interface RailVoltages {
   readonly models: ReadonlyMap<string, readonly ModeModel[]>;
   /** What each pump is made of, one for each mode. */
   readonly parts: ReadonlyMap<string, readonly PumpParts[]>;
+  /** How the board looks from the pump that makes the rail. */
+  around(rail: Rail): Surroundings;
+  /** Currents with which the rails that give way were computed. */
+  readonly drawn: Drawn;
 }
 
 /** Rounds after which a board that still moves is taken as it is. */
@@ -158,7 +162,7 @@ export function railSolver(
     if (input === undefined) return band.typical;
     return regulatedVoltage(origin.regulator, exactly(input))?.typical;
   };
-  return { voltages, at, pumps, chains, models, parts, voltage };
+  return { voltages, at, pumps, chains, models, parts, around, drawn, voltage };
 }
 
 /** Open voltage and source resistance of the supply that a rail is. */

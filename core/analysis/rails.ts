@@ -9,6 +9,7 @@ import type { CurrentCases, Currents } from './currents';
 import { pumpLoadLine, pumpWaveform } from './curves';
 import { filterFarads, filterOhms, filterRipple } from './filters';
 import { isGap } from './gap';
+import { once } from './once';
 import type { ModeModel } from './pump-result';
 import type { RailVoltages } from './rail-voltages';
 import { regulatorInput } from './regulators';
@@ -126,15 +127,6 @@ function onDemand(
     waveform: once(() => pumpWaveform(model)),
     loadLine: (most = 2 * pump.heaviest.askedCurrent || 1e-3, points = 17) =>
       pumpLoadLine(model, most, points),
-  };
-}
-
-/** The value of the first call for all further ones. */
-function once<T>(compute: () => T): () => T {
-  let known: { readonly value: T } | undefined;
-  return () => {
-    known ??= { value: compute() };
-    return known.value;
   };
 }
 

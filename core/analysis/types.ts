@@ -4,7 +4,7 @@
  */
 import type { ChipData, PinData } from '../catalog/part';
 import type { Finding } from '../checks/finding';
-import type { Chip, Clock, Driver, Rail, Regulator, Supply } from '../model/board';
+import type { BenchPoint, Chip, Clock, Driver, Rail, Regulator, Supply } from '../model/board';
 import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 import type { ClockSource } from './clock-source';
@@ -316,6 +316,66 @@ export interface SupplyResult {
   readonly use: number | null;
 }
 
+/** A measured quantity beside its prediction at the same load. Voltages carry the rail's sign. */
+export interface BenchComparison {
+  /** What was read, no finer than instruments read. */
+  readonly measured: Band;
+  /** Typical values, and the lowest and highest corner. */
+  readonly predicted: Band;
+  /** Measured minus predicted, V. */
+  readonly deviation: number;
+  /** V beyond the nearer end of the predicted band, with the deviation's sign; 0 inside it. */
+  readonly outside: number;
+}
+
+/** One quantity away from its typical value, so that the prediction meets what was measured. */
+export interface BenchMove {
+  /** In the user's words, as in `CornerSetting`. */
+  readonly label: string;
+  readonly path: string;
+  readonly unit: Unit;
+  readonly value: number;
+  readonly typical: number;
+  /** The end of its band on that side. */
+  readonly end: number;
+  /** Part of the way from typical to that end; more than 1 has left the band. */
+  readonly share: number;
+  /** What it was moved for, and whether the other measured figure comes in with it. */
+  readonly explains: 'voltage' | 'ripple';
+  readonly both: boolean;
+}
+
+export interface BenchExplanation {
+  /** Within tolerance: alternatives, most plausible first; with `together` all of them at once. */
+  readonly moves: readonly BenchMove[];
+  readonly together: boolean;
+  /** When no two quantities do: the part of the way to the corner that all have to go at once. */
+  readonly all: number | null;
+  /** For what lies outside the band: single quantities that would have to leave theirs, the least far first. */
+  readonly beyond: readonly BenchMove[];
+}
+
+/** An entry of `bench` against the prediction at its own load. */
+export interface BenchResult {
+  readonly point: BenchPoint;
+  /** Absent when the board has no such rail. */
+  readonly rail?: Rail;
+  /** The mode in which the rest of the board counts; absent for a board without modes. */
+  readonly mode?: string;
+  readonly predicted: { readonly voltage: Band; readonly ripple: Band | null } | null;
+  /** Null when not measured or not predicted. */
+  readonly voltage: BenchComparison | null;
+  readonly ripple: BenchComparison | null;
+  /** Null when nothing could be compared. */
+  readonly inside: boolean | null;
+  /** Computed at the first call. */
+  readonly explanation?: () => BenchExplanation;
+  /** Clauses: what usually makes such a difference on a bench; empty for what lies inside the band. */
+  readonly causes?: (of: 'voltage' | 'ripple') => readonly string[];
+  /** One clause when nothing is predicted. */
+  readonly because?: string;
+}
+
 export interface BoardAnalysis {
   readonly text: string;
   readonly file: string;
@@ -329,6 +389,8 @@ export interface BoardAnalysis {
   /** By the rail that they make. */
   readonly regulators: ReadonlyMap<string, RegulatorResult>;
   readonly supplies: ReadonlyMap<string, SupplyResult>;
+  /** In the order of the file, computed at the first call. */
+  readonly bench: () => readonly BenchResult[];
   /** Worst of all pumps. */
   readonly balance: number | null;
   /** What the computation itself has to say: missing data, no convergence, figures assumed. */

@@ -2,6 +2,7 @@
  * All rules in one list, sorted by code: adding a rule is one file and one line. No rule depends on the order.
  */
 import type { BoardAnalysis } from '../analysis/types';
+import { benchDisagrees } from './bench-disagrees';
 import { capacitorDerated } from './capacitor-derated';
 import { capacitorRating } from './capacitor-rating';
 import { capacitorRippleCurrent } from './capacitor-ripple-current';
@@ -35,6 +36,7 @@ import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
+  benchDisagrees,
   capacitorDerated,
   capacitorRating,
   capacitorRippleCurrent,

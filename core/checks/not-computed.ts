@@ -3,7 +3,9 @@
  * absence for a zero. Keys of the file without effect are reported where they are read.
  */
 import type { BoardAnalysis } from '../analysis/types';
+import type { Span } from '../text/span';
 import type { Check } from './check';
+import type { Finding } from './finding';
 
 /** Fields of the report, with the words for them. */
 const emptyFields: readonly string[] = [
@@ -18,8 +20,10 @@ export const notComputed: Check = {
   why: 'An empty figure must not be mistaken for a harmless one.',
   run: (analysis) => {
     const place = firstPump(analysis);
-    if (place === undefined) return [];
+    const bench = uncomparedBench(analysis);
+    if (place === undefined) return bench;
     return [
+      ...bench,
       {
         code: 'not-computed',
         severity: 'information',
@@ -30,6 +34,27 @@ export const notComputed: Check = {
     ];
   },
 };
+
+/** Bench entries that are whole, but of a rail without a figure to set against them. */
+function uncomparedBench(analysis: BoardAnalysis): readonly Finding[] {
+  return analysis.bench().flatMap(({ point, rail, predicted, because }): readonly Finding[] => {
+    if (!rail || !point.load) return [];
+    const finding = (key: string, span: Span, message: string): Finding => ({
+      code: 'not-computed',
+      severity: 'information',
+      at: `${point.path}${key}`,
+      span,
+      message,
+    });
+    if (!predicted) {
+      const why = `This measurement of ${rail.name} is not compared: ${because ?? 'no voltage is predicted'}.`;
+      return [finding('', point.rail?.span ?? point.span, why)];
+    }
+    if (!point.ripple || predicted.ripple) return [];
+    const why = `This ripple is not compared: no pump makes ${rail.name}, and bench entries are set against the ripple of pumps only.`;
+    return [finding('.ripple', point.ripple.span ?? point.span, why)];
+  });
+}
 
 function firstPump(analysis: BoardAnalysis) {
   for (const { rail } of analysis.rails.values())

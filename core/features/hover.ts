@@ -5,6 +5,7 @@ import type { BoardAnalysis } from '../analysis/types';
 import type { PartEntry } from '../catalog/part';
 import type { ReadReference } from '../model/context';
 import { type Span, touches } from '../text/span';
+import { benchAt, benchCard } from './bench-card';
 import type { Card } from './card';
 import { chipCard } from './chip-card';
 import { clockCard } from './clock-card';
@@ -24,6 +25,8 @@ export function hoverCard(analysis: BoardAnalysis, offset: number): Card | undef
   if (referred) return referred;
   const named = nameCard(analysis, offset);
   if (named) return named;
+  const measured = benchEntryCard(analysis, offset);
+  if (measured) return measured;
   const quantity = reading.quantityAt(offset);
   if (quantity) return quantityCard(analysis, quantity);
   return keyCard(reading.nodeAt(offset));
@@ -37,6 +40,13 @@ function clockPinCard(analysis: BoardAnalysis, offset: number): Card | undefined
     if (result) return pinCard(result, pin.span);
   }
   return undefined;
+}
+
+/** Anywhere in a bench entry but on its keys, which explain themselves. */
+function benchEntryCard(analysis: BoardAnalysis, offset: number): Card | undefined {
+  if (analysis.reading.nodeAt(offset).on === 'key') return undefined;
+  const result = benchAt(analysis, offset);
+  return result && benchCard(result);
 }
 
 function referenceCard(analysis: BoardAnalysis, { to, name, span, path }: ReadReference): Card | undefined {

@@ -1,6 +1,7 @@
 /**
  * The card of a rail: does it meet its need and by how much, its figures with their spread, and where they come from.
  */
+import { benchWords } from '../analysis/bench-words';
 import { pumpLosses } from '../analysis/losses';
 import { isNegative } from '../analysis/sign';
 import type { BoardAnalysis, RailResult } from '../analysis/types';
@@ -22,7 +23,7 @@ export function railCard(analysis: BoardAnalysis, result: RailResult, span: Span
     ...verdict(result),
     head: ['', 'lowest', 'typical', 'highest', 'needs'],
     rows: rowsOf(result),
-    origins: [...details(result), ...railOrigins(analysis, result)],
+    origins: [...details(result), ...benchLines(analysis, result), ...railOrigins(analysis, result)],
   };
   if (pump === undefined) return card;
   return { ...card, picture: (theme) => voltsPicture(result, pump, theme), sizable: result.rail.name };
@@ -141,6 +142,14 @@ function details(result: RailResult): readonly string[] {
     ...(byMode.length > 1 ? [`By mode: ${byMode.join(', ')}.`] : []),
     ...switching(result),
   ];
+}
+
+function benchLines(analysis: BoardAnalysis, { rail }: RailResult): readonly string[] {
+  return analysis
+    .bench()
+    .filter((measured) => measured.rail?.name === rail.name)
+    .map(benchWords)
+    .flatMap((words) => (words === '' ? [] : [`Bench: ${words}.`]));
 }
 
 /** Coming up and running down, from empty capacitors and with everything off. */

@@ -49,7 +49,7 @@ export const boardShape = shape('a board file', 'The rails of one board.', {
   modes: section(modeShape, '{ active: { share: 2 % } }'),
   parts: row(map(partsShape), partsShape.doc, '{ diodes: { my-diode: { saturation: 2.5 nA } } }'),
   bench: row(
-    list(row(map(benchShape), benchShape.doc, '{ rail: v6, load: 2 mA, voltage: 5.62 V }', later)),
+    list(row(map(benchShape), benchShape.doc, '{ rail: v6, load: 2 mA, voltage: 5.62 V }')),
     'Measured points.',
     '[{ rail: v6, load: 2 mA, voltage: 5.62 V }]',
   ),

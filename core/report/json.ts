@@ -14,8 +14,9 @@ import type {
   SupplyResult,
 } from '../analysis/types';
 import type { Finding } from '../checks/finding';
-import type { Band } from '../quantity/figure';
 import { type LineIndex, lineIndex } from '../text/lines';
+import { benchReport } from './json-bench';
+import { band, finite } from './plain';
 import type {
   ChipReport,
   ClockReport,
@@ -46,6 +47,7 @@ export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], 
     drivers: mapped(analysis.drivers, driverReport),
     supplies: mapped(analysis.supplies, supplyReport),
     parts: partReports(analysis),
+    bench: analysis.bench().map(benchReport),
     balance: finite(analysis.balance),
     findings: findings.map((finding) => findingReport(finding, lines)),
   };
@@ -173,14 +175,4 @@ function findingReport(finding: Finding, lines: LineIndex): FindingReport {
 /** `fromEntries` keeps even a name such as `__proto__` as an own property. */
 function mapped<T, R>(entries: ReadonlyMap<string, T>, convert: (value: T) => R): Record<string, R> {
   return Object.fromEntries([...entries].map(([name, value]) => [name, convert(value)]));
-}
-
-/** Only the three numbers, whatever else the figure carries; a number that JSON cannot hold is not computed. */
-function band(value: Band | null): Band | null {
-  if (value === null || ![value.min, value.typical, value.max].every(Number.isFinite)) return null;
-  return { min: value.min, typical: value.typical, max: value.max };
-}
-
-function finite(value: number | null | undefined): number | null {
-  return value !== null && value !== undefined && Number.isFinite(value) ? value : null;
 }

@@ -5,6 +5,7 @@
 import type { BoardAnalysis } from '../analysis/types';
 import type { Finding, Severity } from '../checks/finding';
 import { lineIndex } from '../text/lines';
+import { benchSection } from './ledger-bench';
 import { pinSection } from './ledger-pins';
 import { railSection } from './ledger-rails';
 import { supplySection } from './ledger-supplies';
@@ -28,6 +29,7 @@ export function ledgerText(
     railSection(analysis, palette, width),
     pinSection(analysis, palette, width),
     supplySection(analysis, palette, width),
+    benchSection(analysis, palette, width),
     findingLines(analysis, findings, palette),
     [summary(findings, palette)],
   ];

@@ -90,6 +90,35 @@ export type PartReport =
     }
   | { readonly reverse: number | null; readonly average: number | null; readonly peak: number | null };
 
+/** One quantity that, moved within its tolerance, would explain a measurement. */
+export interface BenchMoveReport {
+  readonly by: string;
+  /** Path of the place in the file that it belongs to. */
+  readonly at: string;
+  readonly value: number;
+  readonly unit: string;
+  readonly typical: number;
+  /** Which of the two measured figures it brings to the prediction. */
+  readonly explains: 'voltage' | 'ripple' | 'both';
+}
+
+/** A measured point against the prediction at the same load. */
+export interface BenchReport {
+  readonly rail: string | null;
+  readonly load: number | null;
+  readonly unit: 'A' | 'ohm' | null;
+  readonly measured: { readonly voltage: number | null; readonly ripple: number | null };
+  readonly predicted: { readonly voltage: Band | null; readonly ripple: Band | null };
+  /** Measured minus predicted, typical values. */
+  readonly deviation: { readonly voltage: number | null; readonly ripple: number | null };
+  /** True when all that was measured lies between the corners. */
+  readonly inside: boolean | null;
+  /** Alternatives, most plausible first; with `together` all of them at once. */
+  readonly explained: readonly BenchMoveReport[];
+  readonly together: boolean;
+  readonly note: string | null;
+}
+
 export interface Position {
   /** 1-based. */
   readonly line: number;
@@ -126,6 +155,8 @@ export interface Report {
   readonly drivers: Readonly<Record<string, DriverReport>>;
   readonly supplies: Readonly<Record<string, SupplyReport>>;
   readonly parts: Readonly<Record<string, PartReport>>;
+  /** In the order of the file. */
+  readonly bench: readonly BenchReport[];
   /** |power in - power out - losses| / power in, the worst of all pumps. */
   readonly balance: number | null;
   readonly findings: readonly FindingReport[];

@@ -20,6 +20,22 @@ describe('not-computed', () => {
     );
   });
 
+  it('says which bench entries have nothing to be compared with', () => {
+    checkRule(
+      'not-computed',
+      `supplies: { lab: { voltage: 5 V }, dead: { current: 1 A } }
+rails:
+  v5: { supply: lab, loads: { x: 1 mA } }
+  v0: { supply: dead, loads: { x: 1 mA } }
+bench:
+  - { rail: v5, load: 1 mA, voltage: 5 V, ripple: 1 mV }
+#                                                 ^^^^ information not-computed: no pump makes v5
+  - { rail: v0, load: 1 mA, voltage: 5 V }
+#           ^^ information not-computed: v0 is not compared: the voltage of dead is not known
+`,
+    );
+  });
+
   it('is silent on a board without', () => {
     checkSilent(
       'not-computed',

@@ -149,7 +149,6 @@ rails:
       c: { amplifier: { quiescent: 1 mA } }
       #    ^^^^^^^^^ not-computed
 bench: [{ rail: v5, load: 1 mA, voltage: 5 V }]
-#       ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ not-computed: This entry
 waivers: [{ finding: rail-low, at: rails.vm, because: fine }]
 #         ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ not-computed
 include: [a.yaml, b.yaml]

@@ -47,6 +47,7 @@ describe('report', () => {
       'drivers',
       'supplies',
       'parts',
+      'bench',
       'balance',
       'findings',
     ]);
