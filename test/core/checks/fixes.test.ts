@@ -46,12 +46,12 @@ describe('fixes', () => {
     const small = { flying: '{ value: 47 nF, kind: film, esr: 10 mohm }' };
     cured(
       'pin-peak',
-      `${bench}  up:\n    ${pump(small)}\n    loads: { x: 12 mA }\n`,
+      `${bench}  up:\n    ${pump(small)}\n    loads: { x: 5 mA }\n`,
       /diode: schottky-signal, series: \d+ ohm, flying/,
     );
     cured(
       'pin-peak',
-      `${bench}  up:\n    ${pump({ ...small, rest: ', series: 1 ohm' })}\n    loads: { x: 12 mA }\n`,
+      `${bench}  up:\n    ${pump({ ...small, rest: ', series: 1 ohm' })}\n    loads: { x: 5 mA }\n`,
       /series: \d\d ohm \}/,
     );
   });
