@@ -37,11 +37,22 @@ export function solvedPoints(pump: PumpResult): readonly PumpPoint[] {
   ];
 }
 
-/** Empty for rails that no pump makes. A part that serves several stages comes once for each of them. */
-export function stressedParts({ rail, pump }: RailResult): {
+export interface StressedParts {
   readonly capacitors: readonly StressedCapacitor[];
   readonly diodes: readonly StressedDiode[];
-} {
+}
+
+/** Several rules ask for the same rail. */
+const known = new WeakMap<RailResult, StressedParts>();
+
+/** Empty for rails that no pump makes. A part that serves several stages comes once for each of them. */
+export function stressedParts(result: RailResult): StressedParts {
+  const found = known.get(result) ?? stressOf(result);
+  known.set(result, found);
+  return found;
+}
+
+function stressOf({ rail, pump }: RailResult): StressedParts {
   const origin = rail.origin?.kind === 'pump' ? rail.origin.pump : undefined;
   if (!origin || !pump) return { capacitors: [], diodes: [] };
   const points = solvedPoints(pump);

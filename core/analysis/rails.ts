@@ -10,6 +10,7 @@ import { pumpLoadLine, pumpWaveform } from './curves';
 import { filterFarads, filterOhms, filterRipple } from './filters';
 import { isGap } from './gap';
 import { once } from './once';
+import type { PumpModel } from './pump-model';
 import type { ModeModel } from './pump-result';
 import type { RailVoltages } from './rail-voltages';
 import { regulatorInput } from './regulators';
@@ -115,6 +116,8 @@ function railResult(
   };
 }
 
+const switched = new WeakMap<PumpModel, NonNullable<RailResult['transients']>>();
+
 /** What costs more than the steady state, in the heaviest mode, computed at the first call. */
 function onDemand(
   pump: PumpResult,
@@ -122,8 +125,11 @@ function onDemand(
 ): Pick<RailResult, 'transients' | 'waveform' | 'loadLine'> {
   const model = models.find(({ mode }) => mode === pump.heaviest.mode);
   if (!model) return {};
+  // A memory hands the same model on from one analysis to the next.
+  const transients = switched.get(model.model) ?? once(() => pumpTransients(model));
+  switched.set(model.model, transients);
   return {
-    transients: once(() => pumpTransients(model)),
+    transients,
     waveform: once(() => pumpWaveform(model)),
     loadLine: (most = 2 * pump.heaviest.askedCurrent || 1e-3, points = 17) =>
       pumpLoadLine(model, most, points),

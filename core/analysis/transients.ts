@@ -1,9 +1,9 @@
 /**
  * Switch-on from empty capacitors and switch-off, computed when somebody asks: they cost more than the steady state.
  */
-import { runDown, solve, startUp } from '../engine';
-import { pumpNetwork } from '../pump/network';
-import { typicalPoint } from './pump-model';
+import { type RunDown, runDown, type StartUp, solve, startUp } from '../engine';
+import { type PumpNetwork, pumpNetwork } from '../pump/network';
+import { type PumpModel, typicalPoint } from './pump-model';
 import type { ModeModel } from './pump-result';
 import type { Transients } from './types';
 
@@ -26,7 +26,8 @@ export function pumpTransients({ mode, model }: ModeModel): Transients | undefin
   const start = startUp(network, { output, final, states: solved.start, reach: arrived, trace });
   const level = Math.abs(final) > touchable ? touchable : quiet;
   const low = placed.phases.indexOf('low');
-  const time = runDown(network, { output, states: solved.start, level, segment: low });
+  const off = runDown(network, { output, states: solved.start, level, segment: low });
+  const time = off?.time;
   return {
     ...(mode === undefined ? {} : { mode }),
     startTime: start?.time ?? null,
@@ -64,7 +65,27 @@ export function pumpTransients({ mode, model }: ModeModel): Transients | undefin
     railEnergy: new Map(
       start ? values.rails.map((rail, k) => [rail.name, start.energy[placed.rails[k]!.known]!]) : [],
     ),
+    capacitors: start && off ? switching(model, placed, start, off) : null,
     dischargeTime: time !== undefined && Number.isFinite(time) ? time : null,
     dischargeLevel: level,
   };
+}
+
+/** What each capacitor bears on the way up and down, in the order of the steady figures. */
+function switching(
+  { keys }: PumpModel,
+  placed: PumpNetwork,
+  start: StartUp,
+  off: RunDown,
+): NonNullable<Transients['capacitors']> {
+  const of = (key: string, k: number) => ({
+    key,
+    lowest: Math.min(start.capacitorLows[k]!, off.capacitorLows[k]!),
+    highest: Math.max(start.capacitorHighs[k]!, off.capacitorHighs[k]!),
+  });
+  return [
+    ...placed.flying.map((k, n) => of(keys.flying[n]!, k)),
+    ...placed.smoothing.map((k, n) => of(keys.smoothing[n]!, k)),
+    ...(placed.reservoir === undefined ? [] : [of(keys.reservoir, placed.reservoir)]),
+  ];
 }

@@ -177,6 +177,10 @@ export interface Transients {
   /** Taken from each rail until `startTime`, C and J. */
   readonly railCharge: ReadonlyMap<string, number>;
   readonly railEnergy: ReadonlyMap<string, number>;
+  /** Lowest and highest voltage of each capacitor while switching on and off, signed as in the steady figures, V. */
+  readonly capacitors:
+    | readonly { readonly key: string; readonly lowest: number; readonly highest: number }[]
+    | null;
   /** Time to fall below `dischargeLevel` volt with everything off, s; null when nothing discharges it in 115 days. */
   readonly dischargeTime: number | null;
   readonly dischargeLevel: number;

@@ -4,6 +4,7 @@
 import type { BoardAnalysis } from '../analysis/types';
 import { benchDisagrees } from './bench-disagrees';
 import { capacitorDerated } from './capacitor-derated';
+import { capacitorPolarity } from './capacitor-polarity';
 import { capacitorRating } from './capacitor-rating';
 import { capacitorRippleCurrent } from './capacitor-ripple-current';
 import type { Check } from './check';
@@ -18,6 +19,8 @@ import { driverShootThrough } from './driver-shoot-through';
 import { driverStarved } from './driver-starved';
 import type { Finding } from './finding';
 import { groupOverLimit } from './group-over-limit';
+import { inrushPin } from './inrush-pin';
+import { inrushSupply } from './inrush-supply';
 import { loadVoltage } from './load-voltage';
 import { notComputed } from './not-computed';
 import { over60Volts } from './over-60-volts';
@@ -32,12 +35,14 @@ import { regulatorHot } from './regulator-hot';
 import { regulatorOverLimit } from './regulator-over-limit';
 import { rippleHigh } from './ripple-high';
 import { startSlow } from './start-slow';
+import { storedCharge } from './stored-charge';
 import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
   benchDisagrees,
   capacitorDerated,
+  capacitorPolarity,
   capacitorRating,
   capacitorRippleCurrent,
   chipOverLimit,
@@ -50,6 +55,8 @@ export const checks: readonly Check[] = [
   driverShootThrough,
   driverStarved,
   groupOverLimit,
+  inrushPin,
+  inrushSupply,
   loadVoltage,
   notComputed,
   over60Volts,
@@ -64,6 +71,7 @@ export const checks: readonly Check[] = [
   regulatorOverLimit,
   rippleHigh,
   startSlow,
+  storedCharge,
   supplyOverLimit,
   unused,
 ];

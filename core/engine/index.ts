@@ -19,7 +19,7 @@ export {
 } from './network';
 export type { Parameter } from './parameter';
 export type { Port, PortDerivatives } from './port-derivatives';
-export { type RunDownOptions, runDown } from './run-down';
+export { type RunDown, type RunDownOptions, runDown } from './run-down';
 export {
   type Counts,
   defaultOptions,

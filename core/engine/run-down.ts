@@ -5,6 +5,7 @@ import { prepare } from './circuit';
 import { isOnCurve } from './measure';
 import { coarseMesh, fineMesh } from './mesh';
 import type { Network, Terminal } from './network';
+import type { Trajectory } from './trajectory';
 
 export interface RunDownOptions {
   readonly output: Terminal;
@@ -19,17 +20,26 @@ export interface RunDownOptions {
 /** Longest time that is looked at, s: beyond it a rail counts as never discharged. */
 const longest = 1e7;
 
-/** Time until the output's magnitude is below the level for good, s; Infinity beyond 115 days; undefined when it fails. */
-export function runDown(network: Network, options: RunDownOptions): number | undefined {
+export interface RunDown {
+  /** Until the output's magnitude is below the level for good, s; Infinity beyond 115 days. */
+  readonly time: number;
+  /** Lowest and highest voltage of each capacitor on the way, V. */
+  readonly capacitorLows: readonly number[];
+  readonly capacitorHighs: readonly number[];
+}
+
+/** Undefined when the way down could not be followed. */
+export function runDown(network: Network, options: RunDownOptions): RunDown | undefined {
+  let last: RunDown | undefined;
   for (let horizon = 1e-3; horizon <= longest; horizon *= 100) {
-    const time = within(network, options, horizon);
-    if (time === undefined || time < horizon) return time;
+    last = within(network, options, horizon);
+    if (last === undefined || last.time < horizon) return last;
   }
-  return Number.POSITIVE_INFINITY;
+  return last && { ...last, time: Number.POSITIVE_INFINITY };
 }
 
 /** As `runDown`, looking no further than `horizon`, which is also the answer when the output is still up then. */
-function within(network: Network, options: RunDownOptions, horizon: number): number | undefined {
+function within(network: Network, options: RunDownOptions, horizon: number): RunDown | undefined {
   const off: Network = {
     ...network,
     segments: [{ duration: horizon }],
@@ -52,12 +62,27 @@ function within(network: Network, options: RunDownOptions, horizon: number): num
   if (!path) return undefined;
   const index = options.output >= 0 ? circuit.place[options.output]! : circuit.nodes + ~options.output;
   const volts = (s: number) => Math.abs(path.volts[s * (circuit.nodes + circuit.knowns) + index]!);
-  if (volts(path.count - 1) > options.level) return horizon;
+  const way = extremes(path, circuit.capacitors.count, options.states);
+  if (volts(path.count - 1) > options.level) return { time: horizon, ...way };
   const points = Array.from({ length: path.count }, (_, k) => k).filter((k) => isOnCurve(path, k));
   const last = points.findLastIndex((k) => volts(k) > options.level);
-  if (last < 0) return 0;
+  if (last < 0) return { time: 0, ...way };
   const [from, to] = [points[last]!, points[last + 1]!];
   // A run-down is close to exponential between two points.
   const share = Math.log(volts(from) / options.level) / Math.log(volts(from) / Math.max(volts(to), 1e-12));
-  return path.time[from]! + Math.min(share, 1) * (path.time[to]! - path.time[from]!);
+  return { time: path.time[from]! + Math.min(share, 1) * (path.time[to]! - path.time[from]!), ...way };
+}
+
+function extremes(path: Trajectory, count: number, states: Float64Array) {
+  const capacitorLows = [...states];
+  const capacitorHighs = [...states];
+  for (let s = 0; s < path.count; s++) {
+    if (!isOnCurve(path, s)) continue;
+    for (let k = 0; k < count; k++) {
+      const volts = path.state[s * count + k]!;
+      capacitorLows[k] = Math.min(capacitorLows[k]!, volts);
+      capacitorHighs[k] = Math.max(capacitorHighs[k]!, volts);
+    }
+  }
+  return { capacitorLows, capacitorHighs };
 }

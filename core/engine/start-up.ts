@@ -20,6 +20,9 @@ export interface StartUp {
   /** Largest magnitude of the current in each resistor and diode until then, A. */
   readonly resistorPeaks: readonly number[];
   readonly diodePeaks: readonly number[];
+  /** Lowest and highest voltage of each capacitor from switch-on until then, V: both include the 0 of the start. */
+  readonly capacitorLows: readonly number[];
+  readonly capacitorHighs: readonly number[];
   /** The output on its way: end of each integrated period, s, and its average over that period, V. */
   readonly course: readonly { readonly time: number; readonly volts: number }[];
   readonly trace: Trace;
@@ -94,6 +97,8 @@ interface Tally {
   readonly charge: Float64Array;
   readonly resistors: Float64Array;
   readonly diodes: Float64Array;
+  readonly lows: Float64Array;
+  readonly highs: Float64Array;
   readonly course: { time: number; volts: number }[];
   readonly trace: { time: number[]; output: number[]; currents: number[][] };
 }
@@ -105,6 +110,8 @@ function newTally(circuit: Circuit, traced: readonly number[]): Tally {
     charge: new Float64Array(circuit.knowns),
     resistors: new Float64Array(circuit.resistors.count),
     diodes: new Float64Array(circuit.diodes.count),
+    lows: new Float64Array(circuit.capacitors.count),
+    highs: new Float64Array(circuit.capacitors.count),
     course: [],
     trace: { time: [], output: [], currents: traced.map(() => []) },
   };
@@ -116,6 +123,11 @@ function record(circuit: Circuit, path: Trajectory, tally: Tally): Float64Array 
   const flow = new Float64Array(knowns);
   for (let s = 0; s < path.count; s++) {
     const extreme = isOnCurve(path, s);
+    for (let k = 0; extreme && k < tally.lows.length; k++) {
+      const volts = path.state[s * tally.lows.length + k]!;
+      tally.lows[k] = Math.min(tally.lows[k]!, volts);
+      tally.highs[k] = Math.max(tally.highs[k]!, volts);
+    }
     const book = (index: number, current: number) => {
       if (index >= nodes) flow[index - nodes] = flow[index - nodes]! + path.weight[s]! * current;
     };
@@ -233,6 +245,8 @@ function finish(
     charge: [...tally.charge],
     resistorPeaks: [...tally.resistors],
     diodePeaks: [...tally.diodes],
+    capacitorLows: [...tally.lows],
+    capacitorHighs: [...tally.highs],
     course: tally.course,
     trace: tally.trace,
     integrated,

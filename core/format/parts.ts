@@ -137,7 +137,6 @@ export const capacitorPartShape = shape('the data of a kind of capacitor', 'Data
     ),
     'Whether it has a positive terminal.',
     'yes',
-    later,
   ),
 });
 

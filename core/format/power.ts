@@ -37,7 +37,7 @@ export const supplyShape = shape(
     current: row(quantity('A', positive), 'The most that may be drawn.', '500 mA'),
     resistance: row(quantity('ohm', notNegative), 'Internal resistance.', '120 mohm'),
     capacity: row(quantity('C', positive), 'Charge of the battery.', '1200 mAh', later),
-    bulk: row(quantity('F', notNegative), 'Capacitance that the supply lets you connect.', '10 uF', later),
+    bulk: row(quantity('F', notNegative), 'Capacitance that the supply lets you connect.', '10 uF'),
   },
   ['standard', 'battery', 'voltage'],
 );

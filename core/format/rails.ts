@@ -37,7 +37,11 @@ export const capacitorShape = shape('a capacitor', 'A capacitor.', {
   esr: row(quantity('ohm', notNegative), 'Equivalent series resistance.', '50 mohm'),
   ripple: row(quantity('A', positive), 'Rated ripple current, rms.', '120 mA'),
   size: row(text, 'Case size of a ceramic: small cases lose more under direct voltage.', '0805'),
-  'negative-to': row(name('rails', 'ground'), 'Where the negative terminal goes.', 'ground', later),
+  'negative-to': row(
+    name(['rails', 'clocks', 'drivers'], 'ground'),
+    'Where the negative terminal of a polarised capacitor goes: `ground`, a clock or a driver is its end away from the diodes, a rail its end at them.',
+    'ground',
+  ),
 });
 
 const capacitor = [quantity('F', positive), map(capacitorShape)] as const;
@@ -133,9 +137,8 @@ export const needsShape = shape('the needs of a rail', 'What the rail must keep.
   ),
   discharge: row(
     quantity('s', positive),
-    'Time in which it must have gone down after switching off.',
+    'Time in which it must have gone down after switching off: to 1 V, or to 60 V from above.',
     '1 s',
-    later,
   ),
 });
 

@@ -2,6 +2,8 @@
  * The analysed board as the report that outside readers rely on: plain numbers in SI units, `null` where
  * something is not computed.
  */
+
+import { inrushPeak } from '../analysis/inrush-peak';
 import type {
   BoardAnalysis,
   ChipResult,
@@ -102,18 +104,6 @@ function pinReport(pin: PinResult, analysis: BoardAnalysis): PinReport {
     limit: finite(pin.limit?.typical),
     use: finite(pin.use),
   };
-}
-
-/** Pumps on one pin may start together, so their first pulses add; undefined for a pin that drives none. */
-function inrushPeak({ pumps }: PinResult, { rails }: BoardAnalysis): number | undefined {
-  if (pumps.length === 0) return undefined;
-  let sum = 0;
-  for (const { railName, index, share } of pumps) {
-    const inrush = rails.get(railName)?.transients?.()?.inrush;
-    if (!inrush) return undefined;
-    sum += share * inrush[index]!;
-  }
-  return sum;
 }
 
 function groupReport({ source, sink, use }: GroupResult): GroupReport {

@@ -88,17 +88,26 @@ describe('switch-off', () => {
     [10e3, 100e-6, 12, 1, 2.485],
     [39.15e3, 100e-6, 100, 60, 2.0],
   ])('of %d ohm and %d F from %d V to %d V takes %d s', (ohms, farads, from, level, seconds) => {
-    const time = runDown(bare(ohms, farads), {
+    const down = runDown(bare(ohms, farads), {
       output: 0,
       states: Float64Array.of(from),
       level,
       segment: 0,
-    });
-    expect(Math.abs(time! - seconds)).toBeLessThan(2e-3 * seconds);
+    })!;
+    expect(Math.abs(down.time - seconds)).toBeLessThan(2e-3 * seconds);
+    // It only falls: never above where it began, never below zero.
+    expect(down.capacitorHighs[0]).toBe(from);
+    expect(down.capacitorLows[0]).toBeLessThan(level);
+    expect(down.capacitorLows[0]).toBeGreaterThanOrEqual(-1e-9);
   });
 
   it('is never over without a load', () => {
-    const time = runDown(bare(1e15, 1e-3), { output: 0, states: Float64Array.of(12), level: 1, segment: 0 });
+    const time = runDown(bare(1e15, 1e-3), {
+      output: 0,
+      states: Float64Array.of(12),
+      level: 1,
+      segment: 0,
+    })?.time;
     expect(time).toBe(Number.POSITIVE_INFINITY);
   });
 });

@@ -107,7 +107,6 @@ test('effects that are not computed: one finding for each use, one for a whole e
 supplies:
   p: { voltage: 5 V, resistance: 1 ohm, capacity: 1 Ah, bulk: 10 uF, current: 1 A }
   #                                     ^^^^^^^^ not-computed
-  #                                                     ^^^^ not-computed
 chips: { mcu: { part: mcu-a, rail: v5 } }
 clocks:
   a: { pin: mcu.GP14, timer: { input: 1 MHz, top: 99 }, rise: 1 ns, fall: 1 ns }
@@ -135,13 +134,11 @@ rails:
       diode: silicon-a
       series: 1 ohm
       flying: { value: 1 uF, kind: x7r, rated: 10 V, size: 0805, negative-to: ground }
-      #                                                          ^^^^^^^^^^^ not-computed
       reservoir: { value: 1 uF, kind: x7r }
       smoothing: { value: 1 uF, kind: x7r }
     needs: { voltage: 5..9 V, ripple: 1 V, start: 1 s, swing: 1 V, headroom: 1 V, discharge: 1 s }
     #                                                  ^^^^^ not-computed
     #                                                              ^^^^^^^^ not-computed
-    #                                                                             ^^^^^^^^^ not-computed
     bleeder: 1 Mohm
     loads:
       a: 10 mW

@@ -30,7 +30,7 @@ describe('ledger', () => {
     expect(lines.find((line) => line.includes('✓  fine'))).toMatch(/-4\.\d\d/);
     expect(lines.find((line) => /^ {2}mcu\.P1/.test(line))).toMatch(/3 mA +3 mA .*up, fine$/);
     expect(lines.find((line) => /^ {2}lab/.test(line))).toContain('5 V');
-    expect(lines.at(-2)).toMatch(/^1 error, 2 notes\.$/);
+    expect(lines.at(-2)).toMatch(/^1 error, 3 notes\.$/);
   });
 
   it('writes a finding as file:line:column severity code message, on one line', () => {
