@@ -9,11 +9,13 @@ import type { BoardAnalysis } from './analysis/types';
 import type { YieldOptions, YieldProgress, YieldResult } from './analysis/yield-result';
 import { catalogue } from './catalog';
 import { runChecks, sortFindings } from './checks';
-import type { Finding } from './checks/finding';
+import type { Finding, Waived } from './checks/finding';
+import { applyWaivers } from './checks/waiver-stale';
 import type { Card } from './features/card';
 import { hoverCard as cardAt } from './features/hover';
 import { railAt as findRail, pumpRails as listPumpRails, type PumpRail } from './features/rails';
 import { type Sizing, sizeRail as size } from './features/size-rail';
+import { type IncludeProblem, type IncludeSource, includePaths } from './model/include';
 import { toReport } from './report/json';
 import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
@@ -21,13 +23,15 @@ import type { Report } from './report/report';
 import { yieldMarkdown as writeYieldMarkdown } from './report/yield-markdown';
 import { yieldText as writeYieldText } from './report/yield-text';
 import { stripBom } from './text/bom';
+import { joined } from './text/relative-path';
 
 export { mostSamples, usualSamples } from './analysis/monte-carlo';
 export type { YieldOptions, YieldProgress, YieldResult } from './analysis/yield-result';
-export type { Finding, FindingCode, Fix, Related, Severity } from './checks/finding';
+export type { Finding, FindingCode, Fix, Related, Severity, Waived } from './checks/finding';
 export type { Card, Picture, Theme } from './features/card';
 export type { PumpRail } from './features/rails';
 export type { Sizing } from './features/size-rail';
+export type { IncludeProblem, IncludeSource } from './model/include';
 export type { Report } from './report/report';
 export { stripBom } from './text/bom';
 export { applyEdits, type TextEdit } from './text/edit';
@@ -41,6 +45,8 @@ export interface Analysis {
   readonly text: string;
   /** In the order of the text. */
   readonly findings: readonly Finding[];
+  /** Findings that the file accepts, with its reasons; none of them stands in `findings`. */
+  readonly waived: readonly Waived[];
   /** Made at the first reading. */
   readonly report: Report;
   /** What the feature functions read; its shape may change between versions. */
@@ -52,6 +58,13 @@ export interface AnalyseOptions {
   readonly file: string;
   /** Solved pumps of earlier analyses: with it an edit costs no more than the pumps that it reaches. */
   readonly memory?: PumpMemory;
+  /**
+   * Text of an included file by its path relative to this one, or why there is none; `readIncludes` makes one.
+   * Without it nothing is included.
+   */
+  readonly include?: IncludeSource;
+  /** ISO date of today, `2027-03-31`: without it no waiver runs out. */
+  readonly today?: string;
 }
 
 /** What a caller keeps from one analysis of a text to the next. Its inside is nobody's business. */
@@ -67,19 +80,42 @@ export function newMemory(): PumpMemory {
  */
 export function analyse(text: string, options: AnalyseOptions): Analysis {
   const plain = stripBom(text);
-  const board = analyseBoard(plain, options.file, catalogue, options.memory);
-  const findings = sortFindings([...board.reading.findings, ...board.problems, ...runChecks(board)]);
+  const board = analyseBoard(plain, options.file, catalogue, options.memory, options.include);
+  const all = [...board.reading.findings, ...board.problems, ...runChecks(board)];
+  const judged = applyWaivers(board.reading.board, all, options.today);
+  const findings = sortFindings(judged.findings);
   let report: Report | undefined;
   return {
     text: plain,
     findings,
+    waived: judged.waived,
     // Switch-on and switch-off cost more than the rest, and an editor does not ask for the report at each keystroke.
     get report() {
-      report ??= toReport(board, findings, `${toolName} ${toolVersion}`);
+      report ??= toReport(board, findings, judged.waived, `${toolName} ${toolVersion}`);
       return report;
     },
     board,
   };
+}
+
+/**
+ * Asks `read` for every file that the text includes, and for those that they include, each once; paths are relative to
+ * the text's own file. What comes back is the `include` of `analyse`. Never throws as long as `read` does not.
+ */
+export async function readIncludes(
+  text: string,
+  read: (path: string) => Promise<string | IncludeProblem>,
+): Promise<IncludeSource> {
+  const known = new Map<string, string | IncludeProblem>();
+  const open = includePaths(text).map((path) => joined('', path));
+  // More files than anybody shares parts in: a list that grows without end is not followed.
+  for (let path = open.shift(); path !== undefined && known.size < 100; path = open.shift()) {
+    if (known.has(path)) continue;
+    const found = await read(path);
+    known.set(path, found);
+    if (typeof found === 'string') open.push(...includePaths(found).map((inner) => joined(path!, inner)));
+  }
+  return (path) => known.get(path);
 }
 
 /**
@@ -90,7 +126,7 @@ export function ledgerText(
   analysis: Analysis,
   { colour, width }: { readonly colour: boolean; readonly width: number },
 ): string {
-  return writeLedger(analysis.board, analysis.findings, {
+  return writeLedger(analysis.board, analysis.findings, analysis.waived, {
     palette: colour ? colourPalette : plainPalette,
     width,
   });
@@ -113,7 +149,7 @@ export function railAt(analysis: Analysis, offset: number): string | undefined {
 
 /** Smallest preferred capacitors with which a pump rail meets its needs. */
 export function sizeRail(analysis: Analysis, rail: string): Sizing {
-  return size(analysis.board, rail, catalogue);
+  return size(analysis.board, rail);
 }
 
 /**

@@ -4,12 +4,14 @@
  */
 import type * as vscode from 'vscode';
 import type { Analysis, PumpMemory } from '../core/index';
+import { readIncluded } from './included';
 import { describe, type Log } from './log';
 
 export type Core = typeof import('../core/index');
 
 interface Kept {
   readonly version: number;
+  readonly round: number;
   readonly analysis: Analysis;
 }
 
@@ -18,7 +20,15 @@ export class Analyses {
   private readonly kept = new WeakMap<vscode.TextDocument, Kept>();
   private readonly memories = new WeakMap<vscode.TextDocument, PumpMemory>();
 
+  /** Counts changes of files that boards may include. */
+  private round = 0;
+
   constructor(private readonly log: Log) {}
+
+  /** A file beside a board has changed: what was computed may rest on its old text. */
+  forgetIncluded(): void {
+    this.round++;
+  }
 
   get coreLoaded(): boolean {
     return this.core !== undefined;
@@ -41,14 +51,19 @@ export class Analyses {
     try {
       const core = await this.loadCore();
       const kept = this.kept.get(document);
-      if (kept?.version === document.version) return kept.analysis;
+      if (kept?.version === document.version && kept.round === this.round) return kept.analysis;
       const start = performance.now();
       const { version } = document;
-      const analysis = core.analyse(document.getText(), {
+      const { round } = this;
+      const text = document.getText();
+      const include = await core.readIncludes(text, (path) => readIncluded(document, path));
+      const analysis = core.analyse(text, {
         file: fileName(document.uri),
         memory: this.memoryOf(document, core),
+        include,
+        today: new Date().toISOString().slice(0, 10),
       });
-      this.kept.set(document, { version, analysis });
+      this.kept.set(document, { version, round, analysis });
       this.log.debug(`${fileName(document.uri)}, version ${version}, computed in ${elapsed(start)}.`);
       return analysis;
     } catch (error) {

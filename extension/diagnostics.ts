@@ -5,7 +5,7 @@
 import * as vscode from 'vscode';
 import type { Analyses } from './analyses';
 import { toDiagnostic } from './convert';
-import { isJudged } from './files';
+import { isJudged, isPart } from './files';
 import { concernsUs, settingsFor } from './settings';
 
 export function registerDiagnostics(analyses: Analyses): vscode.Disposable {
@@ -50,13 +50,27 @@ export function registerDiagnostics(analyses: Analyses): vscode.Disposable {
     for (const document of vscode.workspace.textDocuments) void judge(document);
   }
 
+  /** Other YAML files may be parts that boards include. */
+  function judgeIncluders(): void {
+    if (!analyses.coreLoaded) return;
+    analyses.forgetIncluded();
+    for (const document of vscode.workspace.textDocuments) judgeLater(document);
+  }
+
+  const watcher = vscode.workspace.createFileSystemWatcher('**/*.{yaml,yml}');
   const subscriptions = [
     collection,
+    watcher,
+    watcher.onDidChange(judgeIncluders),
+    watcher.onDidCreate(judgeIncluders),
+    watcher.onDidDelete(judgeIncluders),
     vscode.workspace.onDidOpenTextDocument(judge),
     vscode.workspace.onDidSaveTextDocument(judge),
     vscode.workspace.onDidChangeTextDocument((event) => {
       // A change of the dirty flag alone arrives here too, with nothing changed.
-      if (event.contentChanges.length > 0) judgeLater(event.document);
+      if (event.contentChanges.length === 0) return;
+      if (isPart(event.document)) judgeIncluders();
+      else judgeLater(event.document);
     }),
     vscode.workspace.onDidCloseTextDocument((document) => forget(document.uri)),
     vscode.workspace.onDidDeleteFiles(({ files }) => {

@@ -11,6 +11,11 @@ export function isOurs(document: vscode.TextDocument): boolean {
   return vscode.languages.match(selector, document) > 0;
 }
 
+/** Any other YAML file: one that boards may include. */
+export function isPart(document: vscode.TextDocument): boolean {
+  return document.languageId === 'yaml' && !isOurs(document);
+}
+
 /** Only where one can write: the old side of a comparison must not double every problem. */
 export function isJudged(document: vscode.TextDocument): boolean {
   const { scheme } = document.uri;

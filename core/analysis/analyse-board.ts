@@ -5,6 +5,7 @@ import type { Catalogue } from '../catalog/part';
 import type { Finding } from '../checks/finding';
 import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
+import type { IncludeSource } from '../model/include';
 import { formatQuantity } from '../quantity/write';
 import { benchResults } from './bench';
 import { weightedModes } from './board-modes';
@@ -28,8 +29,9 @@ export function analyseBoard(
   file: string,
   catalogue: Catalogue,
   memory?: Memory,
+  include?: IncludeSource,
 ): BoardAnalysis {
-  const reading = readBoard(text, catalogue);
+  const reading = readBoard(text, catalogue, include);
   return computeBoard(text, file, reading, memory);
 }
 

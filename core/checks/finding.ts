@@ -85,3 +85,11 @@ export interface Finding {
   readonly related?: readonly Related[];
   readonly fixes?: readonly Fix[];
 }
+
+/** A finding that the file accepts on purpose. */
+export interface Waived {
+  readonly finding: Finding;
+  readonly because: string;
+  /** A date, or a remark such as `rev D`. */
+  readonly until?: string;
+}

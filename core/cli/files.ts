@@ -31,7 +31,7 @@ export async function readSource(file: string, stdinName: string, io: Io): Promi
   }
 }
 
-function reason(error: unknown): string {
+export function reason(error: unknown): string {
   const code = typeof error === 'object' && error !== null && 'code' in error ? error.code : undefined;
   switch (code) {
     case 'ENOENT':

@@ -15,5 +15,7 @@ export interface Io {
   /** Bytes of a file; rejects as Node's file system does. */
   readFile(path: string): Promise<Uint8Array>;
   isFile(path: string): Promise<boolean>;
+  /** ISO date of today: waivers run out. */
+  today(): string;
   readInput(): Promise<Uint8Array>;
 }

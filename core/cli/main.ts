@@ -21,6 +21,7 @@ const io: Io = {
       return false;
     }
   },
+  today: () => new Date().toISOString().slice(0, 10),
   readInput: async () => {
     const chunks: Buffer[] = [];
     for await (const chunk of process.stdin) chunks.push(Buffer.from(chunk));

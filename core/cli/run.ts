@@ -2,7 +2,8 @@
  * The command line as a function from arguments to an exit code: 0 clean, 1 findings of severity error or a need that
  * a sample missed, 2 wrong use or a file that cannot be read. Reports go to standard output, everything else to standard error.
  */
-import { type Analysis, analyse, ledgerText, toolName, toolVersion } from '../index';
+import { type Analysis, ledgerText, toolName, toolVersion } from '../index';
+import { analyseSource } from './analyse-source';
 import { type CheckRequest, readArguments } from './arguments';
 import { useColour } from './colour';
 import { boardFileName, findBoard, readSource } from './files';
@@ -40,7 +41,7 @@ async function check(request: CheckRequest, io: Io): Promise<ExitCode> {
     if ('problem' in source) {
       unreadable = true;
       complain(io, `${source.name} cannot be read: ${source.problem}.`);
-    } else analyses.push(analyse(source.text, { file: source.name }));
+    } else analyses.push(await analyseSource(source, io));
   }
   print(analyses, files.length, request, io);
   if (unreadable) return 2;

@@ -1,7 +1,8 @@
 /**
  * `rail-ledger yield`: a Monte Carlo run of one board. Progress goes to standard error, and only to a terminal.
  */
-import { analyse, toolName, toolVersion, type YieldResult, yieldRun, yieldText } from '../index';
+import { toolName, toolVersion, type YieldResult, yieldRun, yieldText } from '../index';
+import { analyseSource } from './analyse-source';
 import type { YieldRequest } from './arguments';
 import { useColour } from './colour';
 import { boardFileName, findBoard, readSource } from './files';
@@ -15,7 +16,7 @@ export async function runYield(request: YieldRequest, io: Io): Promise<ExitCode>
     return complain(io, `There is no ${boardFileName} in this folder or above it. Name a file to draw.`);
   const source = await readSource(file, request.stdinName, io);
   if ('problem' in source) return complain(io, `${source.name} cannot be read: ${source.problem}.`);
-  const analysis = analyse(source.text, { file: source.name });
+  const analysis = await analyseSource(source, io);
   const misread = analysis.board.reading.findings.filter(({ severity }) => severity === 'error').length;
   if (misread > 0)
     complain(

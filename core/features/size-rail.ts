@@ -8,7 +8,6 @@ import { isMet, type Shortfall, shortfall } from '../analysis/needs';
 import { railSolver } from '../analysis/rail-voltages';
 import type { BoardAnalysis, PumpResult } from '../analysis/types';
 import { volts } from '../analysis/words';
-import type { Catalogue } from '../catalog/part';
 import type { Capacitor, Pump, Rail } from '../model/board';
 import { readBoard } from '../model/build';
 import { preferredValues } from '../quantity/preferred';
@@ -39,7 +38,7 @@ const candidates: readonly number[] = Array.from({ length: 6 }, (_, decade) =>
   .concat(1e-3)
   .map((value) => Number(value.toPrecision(3)));
 
-export function sizeRail(analysis: BoardAnalysis, name: string, catalogue: Catalogue): Sizing {
+export function sizeRail(analysis: BoardAnalysis, name: string): Sizing {
   const result = analysis.rails.get(name);
   const refuse = (reason: string, details: readonly string[] = []): Sizing => ({
     ok: false,
@@ -61,7 +60,7 @@ export function sizeRail(analysis: BoardAnalysis, name: string, catalogue: Catal
     return refuse(`${name} needs one flying and one reservoir value written in this file.`);
   if (isMet(shortfall(rail.needs, result.pump)))
     return refuse(`${name} meets its needs at every corner as it is.`, [describe(result.pump)]);
-  return new Search(analysis, catalogue, rail, pump, flying, reservoir).run();
+  return new Search(analysis, rail, pump, flying, reservoir).run();
 }
 
 interface Candidate {
@@ -75,7 +74,6 @@ class Search {
 
   constructor(
     private readonly analysis: BoardAnalysis,
-    private readonly catalogue: Catalogue,
     private readonly rail: Rail,
     private readonly pump: Pump,
     private readonly flying: Capacitor,
@@ -121,7 +119,8 @@ class Search {
       replaceValue(this.analysis.text, this.flying, candidates[f]!),
       replaceValue(this.analysis.text, this.reservoir, candidates[r]!),
     ];
-    const { board } = readBoard(applyEdits(this.analysis.text, edits), this.catalogue);
+    // The catalogue of the reading holds included parts too.
+    const { board } = readBoard(applyEdits(this.analysis.text, edits), this.analysis.reading.catalogue);
     const solver = railSolver(board);
     solver.voltage(this.rail.name);
     const pump = solver.pumps.get(this.rail.name);

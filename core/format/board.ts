@@ -7,7 +7,6 @@ import { chipShape, clockShape, conditionsShape, includeRow, modeShape, supplySh
 import { railShape } from './rails';
 import { list, map, name, notNegative, quantity, row, type Shape, shape, table, text } from './shape';
 
-const later = { computed: false } as const;
 const needed = { required: true } as const;
 
 export const benchShape = shape(
@@ -29,9 +28,14 @@ export const benchShape = shape(
 
 export const waiverShape = shape('a waiver', 'A finding that is accepted on purpose.', {
   finding: row({ kind: 'finding' }, 'Code of the finding.', 'rail-low', needed),
-  at: row(text, 'Path of the finding.', 'rails.v6', needed),
+  at: row(
+    text,
+    'Path of the finding, or of what it belongs to where only one such finding stands there.',
+    'rails.v6',
+    needed,
+  ),
   because: row(text, 'Why it is accepted.', 'the reference works down to 4.5 V', needed),
-  until: row(text, 'When to look at it again.', 'rev D'),
+  until: row(text, 'When to look at it again: a date such as 2027-03-31, or a remark.', 'rev D'),
 });
 
 function section(entry: Shape, example: string) {
@@ -54,9 +58,7 @@ export const boardShape = shape('a board file', 'The rails of one board.', {
     '[{ rail: v6, load: 2 mA, voltage: 5.62 V }]',
   ),
   waivers: row(
-    list(
-      row(map(waiverShape), waiverShape.doc, '{ finding: rail-low, at: rails.v6, because: checked }', later),
-    ),
+    list(row(map(waiverShape), waiverShape.doc, '{ finding: rail-low, at: rails.v6, because: checked }')),
     'Findings accepted on purpose.',
     '[{ finding: rail-low, at: rails.v6, because: checked }]',
   ),

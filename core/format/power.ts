@@ -161,7 +161,7 @@ export const conditionsShape = shape('the conditions', 'What the board must stan
 });
 
 export const includeRow = row(
-  list(row(text, 'A file, relative to this one.', 'parts.yaml', later)),
+  list(row(text, 'A file, relative to this one.', 'parts.yaml')),
   'Other files with parts shared between boards.',
   '[parts.yaml]',
 );

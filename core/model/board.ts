@@ -285,6 +285,11 @@ export interface Waiver {
   readonly until?: string;
 }
 
+/** A file with shared parts, as written. */
+export interface Include extends Ref {
+  readonly path: string;
+}
+
 export interface Board {
   readonly title?: string;
   readonly titleSpan?: Span;
@@ -298,5 +303,5 @@ export interface Board {
   readonly modes: ReadonlyMap<string, Mode>;
   readonly bench: readonly BenchPoint[];
   readonly waivers: readonly Waiver[];
-  readonly includes: readonly Ref[];
+  readonly includes: readonly Include[];
 }

@@ -16,6 +16,7 @@ import type { Context, ReadQuantity, ReadReference } from './context';
 import { report } from './context';
 import { railCycles } from './cycles';
 import { figureOf } from './figures';
+import { type IncludeSource, withIncludes } from './include';
 import { namesOf } from './names';
 import { readParts } from './parts';
 import { present } from './present';
@@ -49,7 +50,7 @@ export interface BoardReading {
   referenceAt(offset: number): ReadReference | undefined;
 }
 
-export function readBoard(source: string, catalogue: Catalogue): BoardReading {
+export function readBoard(source: string, catalogue: Catalogue, includes?: IncludeSource): BoardReading {
   const text = stripBom(source);
   const { root, issues } = parseText(text);
   const context: Context = {
@@ -64,7 +65,7 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
     said: new Set(),
     comparisons: { left: 100_000 },
   };
-  const board = boardOf(context, root);
+  const board = boardOf(context, root, includes);
   const quantities = byPlace(context.quantities);
   const references = byPlace(context.references);
   return {
@@ -84,6 +85,7 @@ export function readBoard(source: string, catalogue: Catalogue): BoardReading {
 function boardOf(
   context: Context,
   root: Node | undefined,
+  source: IncludeSource | undefined,
 ): { board: Board; catalogue: Catalogue; ownParts: ReadonlyMap<unknown, Span> } {
   const slot: Slot | undefined = root && {
     context,
@@ -105,7 +107,10 @@ function boardOf(
       'warning',
     );
   }
-  const own = readParts(context, fields?.at('parts'));
+  const includes = includesOf(fields?.at('include'));
+  const shared = { ...context, catalogue: withIncludes(context, includes, source) };
+  const partsSlot = fields?.at('parts');
+  const own = readParts(shared, partsSlot && { ...partsSlot, context: shared });
   // Everything below looks parts up in the catalogue with the file's own entries.
   const parts = { catalogue: own.catalogue, partPlaces: own.places };
   const at = (key: keyof typeof boardShape.keys): Slot | undefined => {
@@ -132,7 +137,7 @@ function boardOf(
       modes: modesOf(at('modes')),
       bench: benchOf(at('bench')),
       waivers: waiversOf(at('waivers')),
-      includes: includesOf(at('include')),
+      includes,
     },
   };
 }

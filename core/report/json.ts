@@ -15,7 +15,7 @@ import type {
   RailResult,
   SupplyResult,
 } from '../analysis/types';
-import type { Finding } from '../checks/finding';
+import type { Finding, Waived } from '../checks/finding';
 import { type LineIndex, lineIndex } from '../text/lines';
 import { benchReport } from './json-bench';
 import { band, finite } from './plain';
@@ -34,7 +34,12 @@ import type {
 } from './report';
 
 /** `tool` names program and version; `findings` are all of the board, in the order to report them. */
-export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], tool: string): Report {
+export function toReport(
+  analysis: BoardAnalysis,
+  findings: readonly Finding[],
+  waived: readonly Waived[],
+  tool: string,
+): Report {
   const lines = lineIndex(analysis.text);
   return {
     format: 1,
@@ -52,6 +57,11 @@ export function toReport(analysis: BoardAnalysis, findings: readonly Finding[], 
     bench: analysis.bench().map(benchReport),
     balance: finite(analysis.balance),
     findings: findings.map((finding) => findingReport(finding, lines)),
+    waived: waived.map(({ finding, because, until }) => ({
+      ...findingReport(finding, lines),
+      because,
+      until: until ?? null,
+    })),
   };
 }
 

@@ -3,7 +3,7 @@
  * each, then a sum. Made for 100 columns, readable from 80; a finding is one long line, as tools that read it expect.
  */
 import type { BoardAnalysis } from '../analysis/types';
-import type { Finding, Severity } from '../checks/finding';
+import type { Finding, Severity, Waived } from '../checks/finding';
 import { lineIndex } from '../text/lines';
 import { benchSection } from './ledger-bench';
 import { pinSection } from './ledger-pins';
@@ -21,6 +21,7 @@ export interface LedgerOptions {
 export function ledgerText(
   analysis: BoardAnalysis,
   findings: readonly Finding[],
+  waived: readonly Waived[],
   { palette, width }: LedgerOptions,
 ): string {
   const title = analysis.reading.board.title ?? 'Board without a title';
@@ -31,6 +32,7 @@ export function ledgerText(
     supplySection(analysis, palette, width),
     benchSection(analysis, palette, width),
     findingLines(analysis, findings, palette),
+    waivedLines(analysis, waived, palette),
     [summary(findings, palette)],
   ];
   return `${sections
@@ -52,6 +54,23 @@ function findingLines(
       const { line, column } = lines.position(span.start);
       const paint = paintOf(severity, palette);
       return `${file}:${line}:${column} ${paint(severity)} ${palette.strong(code)} ${oneLine(message)}`;
+    }),
+  ];
+}
+
+function waivedLines(
+  { text, file }: BoardAnalysis,
+  waived: readonly Waived[],
+  palette: Palette,
+): readonly string[] {
+  if (waived.length === 0) return [];
+  const lines = lineIndex(text);
+  return [
+    palette.heading('Waived'),
+    ...waived.map(({ finding: { span, code, at }, because, until }) => {
+      const { line, column } = lines.position(span.start);
+      const end = until === undefined ? '' : palette.faint(` (until ${oneLine(until)})`);
+      return `${file}:${line}:${column} ${palette.strong(code)} ${at}: ${oneLine(because)}${end}`;
     }),
   ];
 }

@@ -160,4 +160,6 @@ export interface Report {
   /** |power in - power out - losses| / power in, the worst of all pumps. */
   readonly balance: number | null;
   readonly findings: readonly FindingReport[];
+  /** Findings that the file accepts on purpose; they do not stand in `findings`. */
+  readonly waived: readonly (FindingReport & { readonly because: string; readonly until: string | null })[];
 }

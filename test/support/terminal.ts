@@ -11,6 +11,7 @@ export interface Machine {
   readonly env?: Record<string, string>;
   readonly isTerminal?: boolean;
   readonly errorIsTerminal?: boolean;
+  readonly today?: string;
 }
 
 /** Runs against files in memory. */
@@ -22,6 +23,7 @@ export async function rail(args: string, machine: Machine = {}) {
     env = {},
     isTerminal = false,
     errorIsTerminal,
+    today = '2026-01-15',
   } = machine;
   const bytes = (content: string | Uint8Array) =>
     typeof content === 'string' ? new TextEncoder().encode(content) : content;
@@ -45,6 +47,7 @@ export async function rail(args: string, machine: Machine = {}) {
       return bytes(content);
     },
     isFile: async (path) => Object.hasOwn(files, path),
+    today: () => today,
     readInput: async () => bytes(input),
   };
   const code = await run(

@@ -3,7 +3,7 @@
  */
 import { findingCodes } from '../../checks/finding';
 import { benchShape, waiverShape } from '../../format';
-import type { BenchPoint, Ref, Waiver } from '../board';
+import type { BenchPoint, Include, Waiver } from '../board';
 import { listOf } from '../entries';
 import { figureOf } from '../figures';
 import { present } from '../present';
@@ -53,6 +53,9 @@ export function waiversOf(slot: Slot | undefined): Waiver[] {
   });
 }
 
-export function includesOf(slot: Slot | undefined): Ref[] {
-  return listOf(slot).flatMap((item) => refOf(item) ?? []);
+export function includesOf(slot: Slot | undefined): Include[] {
+  return listOf(slot).flatMap((item) => {
+    const ref = refOf(item);
+    return ref ? [{ ...ref, path: item.path }] : [];
+  });
 }

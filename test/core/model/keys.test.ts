@@ -147,10 +147,9 @@ rails:
       #    ^^^^^^^^^ not-computed
 bench: [{ rail: v5, load: 1 mA, voltage: 5 V }]
 waivers: [{ finding: rail-low, at: rails.vm, because: fine }]
-#         ^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^^ not-computed
 include: [a.yaml, b.yaml]
-#         ^^^^^^ not-computed
-#                 ^^^^^^ not-computed
+#         ^^^^^^ include-failed
+#                 ^^^^^^ include-failed
 `);
 });
 

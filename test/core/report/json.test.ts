@@ -50,6 +50,7 @@ describe('report', () => {
       'bench',
       'balance',
       'findings',
+      'waived',
     ]);
     expect(report).toMatchObject({ format: 1, file: 'lamp.rails.yaml', board: 'Bench lamp' });
     expect(Object.keys(report.rails)).toEqual(['v5', 'up']);
