@@ -20,7 +20,7 @@ export const notComputed: Check = {
   why: 'An empty figure must not be mistaken for a harmless one.',
   run: (analysis) => {
     const place = firstPump(analysis);
-    const bench = uncomparedBench(analysis);
+    const bench = [...uncomparedBench(analysis), ...unjudged(analysis)];
     if (place === undefined) return bench;
     return [
       ...bench,
@@ -34,6 +34,25 @@ export const notComputed: Check = {
     ];
   },
 };
+
+/** Needs of rails whose ripple or way up and down the file says nothing about. */
+function unjudged(analysis: BoardAnalysis): readonly Finding[] {
+  return [...analysis.rails.values()].flatMap(({ rail, ripple }) =>
+    (['ripple', 'start', 'discharge'] as const).flatMap((key): Finding[] => {
+      const need = rail.needs?.[key];
+      if (!need || rail.origin?.kind === 'pump' || (key === 'ripple' && ripple)) return [];
+      return [
+        {
+          code: 'not-computed',
+          severity: 'information',
+          at: `${rail.path}.needs.${key}`,
+          span: need.span ?? rail.nameSpan,
+          message: `${rail.name}: this need is not judged, since nothing in the file tells the ${key === 'ripple' ? 'ripple' : 'switching'} of a rail that no pump makes.`,
+        },
+      ];
+    }),
+  );
+}
 
 /** Bench entries that are whole, but of a rail without a figure to set against them. */
 function uncomparedBench(analysis: BoardAnalysis): readonly Finding[] {

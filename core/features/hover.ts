@@ -6,6 +6,7 @@ import type { PartEntry } from '../catalog/part';
 import type { ReadReference } from '../model/context';
 import { type Span, touches } from '../text/span';
 import { benchAt, benchCard } from './bench-card';
+import { capacitorCardAt } from './capacitor-card';
 import type { Card } from './card';
 import { chipCard } from './chip-card';
 import { clockCard } from './clock-card';
@@ -28,8 +29,11 @@ export function hoverCard(analysis: BoardAnalysis, offset: number): Card | undef
   const measured = benchEntryCard(analysis, offset);
   if (measured) return measured;
   const quantity = reading.quantityAt(offset);
+  const place = reading.nodeAt(offset);
+  const capacitor = capacitorCardAt(analysis, place, quantity, offset);
+  if (capacitor) return capacitor;
   if (quantity) return quantityCard(analysis, quantity);
-  return keyCard(reading.nodeAt(offset));
+  return keyCard(place);
 }
 
 /** `mcu.GP15` in a clock means the pin as a whole, also with the pointer on the chip's name. */
