@@ -10,6 +10,7 @@ import type { YieldOptions, YieldProgress, YieldResult } from './analysis/yield-
 import { catalogue } from './catalog';
 import { runChecks, sortFindings } from './checks';
 import type { Finding, Waived } from './checks/finding';
+import { findingTitles as titles } from './checks/titles';
 import { applyWaivers } from './checks/waiver-stale';
 import type { Card } from './features/card';
 import { hoverCard as cardAt } from './features/hover';
@@ -39,6 +40,9 @@ export type { Span } from './text/span';
 
 export const toolName = 'Rail Ledger';
 export const toolVersion = '0.1.0';
+
+/** Every code with a few words, in the order of the language. */
+export const findingTitles = titles;
 
 /** Everything known about one text, immutable. Spans are UTF-16 offsets into `text`. */
 export interface Analysis {

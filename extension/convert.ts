@@ -16,13 +16,18 @@ export function toRange(document: vscode.TextDocument, span: Span): vscode.Range
   return new vscode.Range(document.positionAt(span.start), document.positionAt(span.end));
 }
 
-export function toDiagnostic(document: vscode.TextDocument, finding: Finding): vscode.Diagnostic {
+/** `pages`: the folder with a page for each code, which a click on the code opens. */
+export function toDiagnostic(
+  document: vscode.TextDocument,
+  finding: Finding,
+  pages: vscode.Uri,
+): vscode.Diagnostic {
   const diagnostic = new vscode.Diagnostic(
     toRange(document, finding.span),
     finding.message,
     severities[finding.severity],
   );
-  diagnostic.code = finding.code;
+  diagnostic.code = { value: finding.code, target: vscode.Uri.joinPath(pages, `${finding.code}.md`) };
   diagnostic.source = diagnosticSource;
   diagnostic.relatedInformation = finding.related?.map(
     ({ span, message }) =>

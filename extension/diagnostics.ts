@@ -8,7 +8,7 @@ import { toDiagnostic } from './convert';
 import { isJudged, isPart } from './files';
 import { concernsUs, settingsFor } from './settings';
 
-export function registerDiagnostics(analyses: Analyses): vscode.Disposable {
+export function registerDiagnostics(analyses: Analyses, pages: vscode.Uri): vscode.Disposable {
   const collection = vscode.languages.createDiagnosticCollection('rail-ledger');
   const pending = new Map<string, ReturnType<typeof setTimeout>>();
 
@@ -26,7 +26,7 @@ export function registerDiagnostics(analyses: Analyses): vscode.Disposable {
     const findings = analysis?.findings ?? [];
     collection.set(
       document.uri,
-      findings.map((finding) => toDiagnostic(document, finding)),
+      findings.map((finding) => toDiagnostic(document, finding, pages)),
     );
   }
 

@@ -25,7 +25,7 @@ export function activate(context: vscode.ExtensionContext): Api {
   const showLog = () => log.show();
   context.subscriptions.push(
     log,
-    registerDiagnostics(analyses),
+    registerDiagnostics(analyses, vscode.Uri.joinPath(context.extensionUri, 'media', 'findings')),
     vscode.languages.registerHoverProvider(selector, hoverProvider(analyses)),
     vscode.languages.registerCodeActionsProvider(selector, quickFixProvider(analyses), {
       providedCodeActionKinds: quickFixKinds,

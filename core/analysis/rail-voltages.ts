@@ -144,7 +144,9 @@ export function railSolver(
       }
     }
   };
-  const at = (name: string, mode: string | undefined): number | undefined => {
+  /** `left`: rails may stand on each other in a circle, which has no answer. */
+  const within = (name: string, mode: string | undefined, left: number): number | undefined => {
+    if (left === 0) return undefined;
     const band = voltages.get(name);
     const origin = board.rails.get(name)?.origin;
     if (!band || isGap(band) || !origin) return undefined;
@@ -155,13 +157,14 @@ export function railSolver(
       return supply ? supply.band.typical - (supply.ohms?.typical ?? 0) * amps : undefined;
     }
     if (origin.kind === 'filter') {
-      const input = origin.filter.from && at(origin.filter.from.name, mode);
+      const input = origin.filter.from && within(origin.filter.from.name, mode, left - 1);
       return input === undefined ? undefined : sag(input, filterOhms(origin.filter).typical * amps);
     }
-    const input = origin.regulator.from && at(origin.regulator.from.name, mode);
+    const input = origin.regulator.from && within(origin.regulator.from.name, mode, left - 1);
     if (input === undefined) return band.typical;
     return regulatedVoltage(origin.regulator, exactly(input))?.typical;
   };
+  const at = (name: string, mode: string | undefined) => within(name, mode, board.rails.size);
   return { voltages, at, pumps, chains, models, parts, around, drawn, voltage };
 }
 

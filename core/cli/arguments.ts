@@ -25,8 +25,15 @@ export interface YieldRequest {
   readonly distribution: Distribution;
 }
 
+export interface ExplainRequest {
+  readonly command: 'explain';
+  /** Absent: list all. */
+  readonly code: string | undefined;
+}
+
 export type Request =
   | CheckRequest
+  | ExplainRequest
   | YieldRequest
   | { readonly command: 'help' }
   | { readonly command: 'version' }
@@ -36,7 +43,8 @@ export type Format = 'text' | 'json';
 export type ColorChoice = 'auto' | 'always' | 'never';
 export type Distribution = 'uniform' | 'triangular';
 
-const commands = ['check', 'yield'] as const;
+const commands = ['check', 'yield', 'explain'] as const;
+const onBoards: readonly Command[] = ['check', 'yield'];
 type Command = (typeof commands)[number];
 
 interface Option {
@@ -46,9 +54,9 @@ interface Option {
 }
 
 const options: Readonly<Record<string, Option>> = {
-  '--format': { of: commands, fault: oneOf('text', 'json') },
-  '--color': { of: commands, fault: oneOf('auto', 'always', 'never') },
-  '--stdin-filename': { of: commands },
+  '--format': { of: onBoards, fault: oneOf('text', 'json') },
+  '--color': { of: onBoards, fault: oneOf('auto', 'always', 'never') },
+  '--stdin-filename': { of: onBoards },
   '--samples': { of: ['yield'], fault: wholeNumber(1, mostSamples) },
   '--seed': { of: ['yield'], fault: wholeNumber(0, Number.MAX_SAFE_INTEGER) },
   '--distribution': { of: ['yield'], fault: oneOf('uniform', 'triangular') },
@@ -89,10 +97,13 @@ export function readArguments(args: readonly string[]): Request {
 
   if (command === undefined) return wrong('There is nothing to do: say rail-ledger check, or --help.');
   if (!isCommand(command))
-    return wrong(`There is no command ${command}; the commands are ${commands.join(' and ')}.`);
+    return wrong(
+      `There is no command ${command}; the commands are ${commands.slice(0, -1).join(', ')} and ${commands.at(-1)}.`,
+    );
   for (const name of given.keys())
     if (!options[name]?.of.includes(command)) return wrong(`${command} has no option ${name}.`);
-  return command === 'check' ? { command, files, ...common(given) } : yieldRequest(files, given);
+  if (command === 'check') return { command, files, ...common(given) };
+  return command === 'yield' ? yieldRequest(files, given) : explainRequest(files);
 }
 
 type Given = ReadonlyMap<string, string>;
@@ -116,6 +127,11 @@ function yieldRequest(files: readonly string[], given: Given): Request {
     seed: Number(given.get('--seed') ?? 1),
     distribution: (given.get('--distribution') ?? 'uniform') as Distribution,
   };
+}
+
+function explainRequest(codes: readonly string[]): Request {
+  if (codes.length > 1) return wrong(`explain takes one code, not ${codes.length}.`);
+  return { command: 'explain', code: codes[0] };
 }
 
 function wrong(because: string): Request {

@@ -3,7 +3,8 @@ export const helpText = `Rail Ledger: voltage, ripple and pin budget of a board'
 
 Usage
   rail-ledger check [FILE...]
-  rail-ledger yield [FILE] [--samples N] [--seed S]
+  rail-ledger yield [FILE]
+  rail-ledger explain [CODE] [--samples N] [--seed S]
 
 check: checks board files and prints a ledger for each: rails, pins, supplies and
 findings, one finding on a line as
@@ -16,6 +17,9 @@ folder above it. The file - is standard input.
 yield: draws boards by lot within the tolerances of their parts, solves each in
 every mode and counts how many meet their needs. The same seed draws the same
 boards.
+
+explain: prints the page of a finding: cause, figures, cure and an example; without
+CODE a list of all findings.
 
 Options
   --format text|json       json prints the report with plain SI numbers: one

@@ -15,6 +15,8 @@ export interface Io {
   /** Bytes of a file; rejects as Node's file system does. */
   readFile(path: string): Promise<Uint8Array>;
   isFile(path: string): Promise<boolean>;
+  /** Where the program's package lies, with its pages. */
+  readonly packageFolder: string;
   /** ISO date of today: waivers run out. */
   today(): string;
   readInput(): Promise<Uint8Array>;

@@ -2,6 +2,7 @@
  * Where the command line meets the process; the only file of the core that does.
  */
 import { readFile, stat } from 'node:fs/promises';
+import { join } from 'node:path';
 import type { Io } from './io';
 import { run } from './run';
 
@@ -21,6 +22,7 @@ const io: Io = {
       return false;
     }
   },
+  packageFolder: join(__dirname, '..'),
   today: () => new Date().toISOString().slice(0, 10),
   readInput: async () => {
     const chunks: Buffer[] = [];

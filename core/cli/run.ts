@@ -6,6 +6,7 @@ import { type Analysis, ledgerText, toolName, toolVersion } from '../index';
 import { analyseSource } from './analyse-source';
 import { type CheckRequest, readArguments } from './arguments';
 import { useColour } from './colour';
+import { explain } from './explain';
 import { boardFileName, findBoard, readSource } from './files';
 import { helpText } from './help';
 import type { Io } from './io';
@@ -27,6 +28,8 @@ export async function run(args: readonly string[], io: Io): Promise<ExitCode> {
       return check(request, io);
     case 'yield':
       return runYield(request, io);
+    case 'explain':
+      return explain(request, io);
   }
 }
 

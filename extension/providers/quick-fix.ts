@@ -17,7 +17,7 @@ export function quickFixProvider(analyses: Analyses): vscode.CodeActionProvider 
         const place = toRange(document, finding.span);
         if (finding.fixes === undefined || place.intersection(range) === undefined) return [];
         const diagnostics = context.diagnostics.filter(
-          (shown) => shown.code === finding.code && shown.range.isEqual(place),
+          (shown) => codeOf(shown) === finding.code && shown.range.isEqual(place),
         );
         return finding.fixes.map((fix) => {
           const action = new vscode.CodeAction(fix.title, vscode.CodeActionKind.QuickFix);
@@ -29,4 +29,9 @@ export function quickFixProvider(analyses: Analyses): vscode.CodeActionProvider 
       });
     },
   };
+}
+
+/** The code of one of our diagnostics, whose page stands beside it. */
+function codeOf({ code }: vscode.Diagnostic): string | number | undefined {
+  return typeof code === 'object' ? code.value : code;
 }

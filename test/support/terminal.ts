@@ -47,6 +47,7 @@ export async function rail(args: string, machine: Machine = {}) {
       return bytes(content);
     },
     isFile: async (path) => Object.hasOwn(files, path),
+    packageFolder: '/package',
     today: () => today,
     readInput: async () => bytes(input),
   };
