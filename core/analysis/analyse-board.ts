@@ -21,6 +21,7 @@ import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
 import { regulatorResults } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
+import { assumedHeadrooms } from './swing-need';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
 
 /** `file` is only a name for reports; `text` has no byte-order mark. */
@@ -47,12 +48,13 @@ export function computeBoard(
   const solved = railVoltages(board, memory);
   const currents = boardCurrents(board, solved);
   const pins = pinResults(board, solved);
+  const rails = railResults(board, solved, currents, modes);
   const balances = [...solved.pumps.values()].flatMap((pump) => pump.points.map((point) => point.balance));
   return {
     text,
     file,
     reading,
-    rails: railResults(board, solved, currents, modes),
+    rails,
     pins,
     groups: groupResults(board, pins),
     chips: chipResults(board, solved, pins, currents, modes),
@@ -67,6 +69,7 @@ export function computeBoard(
       ...assumedDraws(board),
       ...assumedResistances(board),
       ...averagedPowers(board, solved),
+      ...assumedHeadrooms(rails),
     ],
   };
 }
