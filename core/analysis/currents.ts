@@ -84,7 +84,7 @@ function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, wh
     const byPins = (consumers.pinsOf.get(item.name) ?? [])
       .filter(past)
       .reduce((sum, pin) => sum + pin.share * (at.drives[pin.index]?.sourceAverage ?? 0), 0);
-    return (at.railCurrents.get(name) ?? 0) - byPins;
+    return (at.railCurrents.get(name) ?? 0) + (at.besideCurrents.get(name) ?? 0) - byPins;
   };
 
   const chip = (item: Chip, mode: string | undefined): number | null => {

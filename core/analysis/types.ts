@@ -63,6 +63,14 @@ export interface DriverFigures {
   /** Average that flows through both transistors at once, A, and the same as charge per edge, C. */
   readonly crossCurrent: number;
   readonly crossCharge: number;
+  /**
+   * The part of it that flows after each edge until the charge of saturation is gone, A, and the longer of the times
+   * that this takes, s. It is no part of the solved network: heat, charge and currents here hold it, drops do not.
+   */
+  readonly overlapCurrent: number;
+  readonly overlapTime: number;
+  /** Largest collector currents in the solved period, without the overlap, A. */
+  readonly collectorPeaks: { readonly npn: number; readonly pnp: number };
   /** Volts by which the output still misses its rail or ground at the end of a phase; the larger of the two. */
   readonly shortOf: number;
 }
@@ -123,6 +131,10 @@ export interface PumpPoint {
   readonly drivers: readonly (DriverFigures | null)[];
   /** Average out of every rail that the pump stands on or is driven from, by name, A. */
   readonly railCurrents: ReadonlyMap<string, number>;
+  /** Beside it, out of the rails of its stages of transistors: what their switching takes, A. */
+  readonly besideCurrents: ReadonlyMap<string, number>;
+  /** Heat in the two switches of each drive's clock output, or of its gates or MOSFETs, W. */
+  readonly driveHeat: readonly number[];
   readonly capacitors: readonly CapacitorFigures[];
   readonly diodes: readonly DiodeFigures[];
   /** Solver effort: iterations and steps. */

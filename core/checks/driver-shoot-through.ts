@@ -33,15 +33,36 @@ export const driverShootThrough: Check = {
           message: `${driver.name}: ${formatQuantity(crossCurrent, 'A')} on average flow through both transistors, ${formatQuantity(stage.crossCharge, 'C')} for each edge, and heat them with ${formatQuantity(stage.dissipation, 'W')}. ${cause(analysis, found)}`,
           expected: `less than ${formatQuantity(leastCurrent, 'A')} and ${100 * leastShare} % of its supply current`,
           actual: formatQuantity(crossCurrent, 'A'),
-          source: 'solution of the circuit at typical values',
+          source:
+            stage.overlapCurrent > 0
+              ? 'solution of the circuit at typical values, and charge control for what saturation stores'
+              : 'solution of the circuit at typical values',
           related: [{ span: found.use.clock.clock.nameSpan, message: 'the clock that drives it' }],
         },
       ];
     }),
 };
 
+/** A stage is saturated at this ratio of collector to base current, with a margin (common practice, no source). */
+const designGain = 10;
+
+/** Charge that saturation stores: less base current stores less, as far as it still saturates. */
+function storageCause({ driver, stage }: StageInUse): string {
+  const base = driver.stage?.kind === 'push-pull' ? driver.stage.base : undefined;
+  const peak = Math.max(stage.collectorPeaks.npn, stage.collectorPeaks.pnp);
+  const factor = (designGain * stage.baseCurrent) / peak;
+  const present = Math.min(base?.npn?.typical ?? 0, base?.pnp?.typical ?? 0);
+  const resistors =
+    present > 0 && factor > 1.5
+      ? `Base resistors of about ${formatQuantity(present * factor, 'ohm', 2)} instead of ${formatQuantity(present, 'ohm', 2)} still saturate it and store less;`
+      : 'Transistors of shorter storage time cure it;';
+  return `Nearly all of it flows for up to ${formatQuantity(stage.overlapTime, 's', 2)} after each edge, until the charge of saturation is gone. ${resistors} a resistor from base to emitter, a small capacitor across each base resistor or a lower frequency helps too.`;
+}
+
 /** What keeps the upper transistor on while it should be off, and the resistor that would turn it off. */
-function cause(analysis: BoardAnalysis, { driver, use }: StageInUse): string {
+function cause(analysis: BoardAnalysis, found: StageInUse): string {
+  const { driver, use, stage } = found;
+  if (stage.overlapCurrent > 0.9 * stage.crossCurrent) return storageCause(found);
   const high = analysis.clocks.get(use.clock.clock.name)?.high;
   const railName = driver.rail?.name ?? use.clock.output.railName;
   const rail = railName === undefined ? undefined : analysis.rails.get(railName)?.voltage?.typical;

@@ -6,7 +6,7 @@ import {
   saturatingOnResistance,
 } from '../../../core/compute/saturating-output';
 import { thermalVoltage } from '../../../core/compute/thermal-voltage';
-import { saturationVoltage, storageTime } from '../../../core/compute/transistor-saturation';
+import { saturationVoltage } from '../../../core/compute/transistor-saturation';
 import { expectNear } from '../../support/near';
 
 describe('saturating CMOS output', () => {
@@ -46,11 +46,6 @@ describe('saturated transistor', () => {
   });
   it('has no answer when it does not saturate', () => {
     expect(saturationVoltage(transistor, 0.25, 1e-3)).toBeUndefined();
-  });
-  // Charge control model worked by hand: 200 ns ln(2/1.05).
-  it('stays on for 128.9 ns', () => {
-    expectNear(storageTime(200e-9, 1e-3, -1e-3, 10e-3, 200), 128.9e-9, 5e-4);
-    expect(storageTime(200e-9, 1e-3, 0, 10e-3, 200)).toBeUndefined();
   });
 });
 

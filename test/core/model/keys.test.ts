@@ -117,7 +117,6 @@ clocks:
 drivers:
   stage: { input: a, rail: v5, push-pull: { npn: npn-a, pnp: pnp-a, base: { npn: 1 kohm, pnp: 1 kohm } } }
   pair: { input: a, rail: v5, mosfet-pair: { nmos: nmos-a, pmos: pmos-a, gate: 10 ohm } }
-  #                                                                      ^^^^ not-computed
   hcs: { input: a, rail: v5, gates: { part: gate-a, parallel: 2 } }
   pins: { input: a, pins: [mcu.GP14, mcu.GP15] }
 rails:
