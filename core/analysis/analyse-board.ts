@@ -12,7 +12,7 @@ import { weightedModes } from './board-modes';
 import { chipResults, currentBand, groupResults } from './chips';
 import { clockSource } from './clock-source';
 import { boardCurrents, type CurrentCases } from './currents';
-import { driverResults } from './drivers';
+import { driverResults, unknownGates } from './drivers';
 import { isGap } from './gap';
 import { Memory } from './memory';
 import { once } from './once';
@@ -49,6 +49,7 @@ export function computeBoard(
   const currents = boardCurrents(board, solved);
   const pins = pinResults(board, solved);
   const rails = railResults(board, solved, currents, modes);
+  const drivers = driverResults(board, solved);
   const balances = [...solved.pumps.values()].flatMap((pump) => pump.points.map((point) => point.balance));
   return {
     text,
@@ -59,7 +60,7 @@ export function computeBoard(
     groups: groupResults(board, pins),
     chips: chipResults(board, solved, pins, currents, modes),
     clocks: clockResults(board, solved),
-    drivers: driverResults(board, solved),
+    drivers,
     regulators: regulatorResults(board, solved, currents),
     supplies: supplyResults(board, currents),
     bench: once(() => benchResults({ board, solved, memory })),
@@ -70,6 +71,7 @@ export function computeBoard(
       ...assumedResistances(board),
       ...averagedPowers(board, solved),
       ...assumedHeadrooms(rails),
+      ...unknownGates(drivers),
     ],
   };
 }

@@ -95,7 +95,8 @@ function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, wh
       .filter((draw) => activeIn(mode, draw.mode && [draw.mode]))
       .reduce((sum, draw) => sum + draw.current[end], fallback);
     const pins = [...item.pins.values()].reduce((sum, pin) => sum + (pin.sources?.[end] ?? 0), 0);
-    return own + pins + driven;
+    const gates = (consumers.gatesOf.get(item.name) ?? []).reduce((sum, amps) => sum + amps[end], 0);
+    return own + pins + driven + gates;
   };
 
   const regulated = (made: Rail, name: string, mode: string | undefined): number | null => {

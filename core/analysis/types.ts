@@ -9,6 +9,7 @@ import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 import type { ClockSource } from './clock-source';
 import type { LoadPoint, Waveform } from './curves';
+import type { GateDrive } from './mosfet-stage';
 
 /** One quantity of a corner and the end of its band at which it was taken. */
 export interface CornerSetting {
@@ -247,6 +248,8 @@ export interface PinResult {
   readonly limit: Figure | null;
   readonly limitKind: 'recommended' | 'absolute' | null;
   readonly use: number | null;
+  /** Drivers of MOSFETs whose gates this pin charges. */
+  readonly charges: readonly string[];
   /** Rails whose pump this pin drives. */
   readonly drives: readonly string[];
   /** The same, with the place among the pump's drives and the pin's share of its current. */
@@ -293,14 +296,37 @@ export interface ClockResult {
 /** One pump behind a driver, in that pump's heaviest mode. */
 export interface DriverUse {
   readonly railName: string;
+  /** Place among the pump's drives. */
+  readonly index: number;
   readonly mode?: string;
   readonly clock: ClockSource;
+  /** Rail that supplies the driver. */
+  readonly driverRail: string;
+  /** Current of the driver's output into the pump; of a stage of transistors that of the clock into the stage. */
+  readonly drive: DriveFigures;
   /** Null for gates, MOSFETs and pins, which have no bases. */
   readonly stage: DriverFigures | null;
+  /** Null for all but MOSFETs. */
+  readonly gates: GateDrive | null;
+  /** Null for all but MOSFETs, and where a gate charge is not known. */
+  readonly pair: PairFigures | null;
   /** Average that charging gates takes from the clock, A. */
-  readonly gateCurrent: number;
+  readonly gateCurrent: number | null;
   /** Average that the stage takes from its clock, A. */
-  readonly clockCurrent: number;
+  readonly clockCurrent: number | null;
+}
+
+/** A pair of MOSFETs between the clock and one pump. */
+export interface PairFigures {
+  /** Heat in both, W. */
+  readonly dissipation: number;
+  /** Average out of the driver's rail, A. */
+  readonly railCurrent: number;
+  /** Average that flows through both at once, A, and the same as charge per edge, C: without a load, which makes it less. */
+  readonly crossCurrent: number;
+  readonly crossCharge: number;
+  /** The longer edge of the gates, s. */
+  readonly edgeTime: number;
 }
 
 export interface DriverResult {
