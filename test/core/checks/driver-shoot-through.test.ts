@@ -1,5 +1,6 @@
 import { describe, it } from 'vitest';
 import { checkRule, checkSilent } from '../../support/check-rule';
+import { mosfetBoard } from '../../support/mosfet-board';
 import { pushPullBoard } from '../../support/push-pull-board';
 
 describe('driver-shoot-through', () => {
@@ -43,6 +44,28 @@ describe('driver-shoot-through', () => {
       pushPullBoard('base: { npn: 1 kohm, pnp: 1 kohm }', 'a')
         .replace('npn-small-signal', own('npn'))
         .replace('pnp-small-signal', own('pnp')),
+    );
+  });
+
+  it('counts what flows while the gates of MOSFETs are between both thresholds', () => {
+    // Veendrick, 1984 (from memory: confirm), with 9 and 3.3 A/V^2, 3.5 V beyond both thresholds and some 160 ns: a good
+    // part of a microcoulomb for each edge.
+    checkRule(
+      'driver-shoot-through',
+      mosfetBoard('nmos: nmos-logic-level, pmos: pmos-logic-level, gate: 22 ohm')
+        .replace('  # name\n', '')
+        .replace(
+          '  amp:\n',
+          '  amp:\n# ^^^ warning driver-shoot-through: a gate resistor below its 22 ohm or a lower frequency\n',
+        ),
+    );
+  });
+
+  it('is silent for MOSFETs whose thresholds leave no room at that supply', () => {
+    // 1.7 V and 1.5 V are together above 3 V.
+    checkSilent(
+      'driver-shoot-through',
+      mosfetBoard('nmos: nmos-small-signal, pmos: pmos-small-signal', { supply: '3 V' }),
     );
   });
 });
