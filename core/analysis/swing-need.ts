@@ -114,21 +114,31 @@ export function spareAt({ limit }: SwingNeed, voltage: number): number {
   return limit < 0 ? limit - voltage : voltage - limit;
 }
 
+/** True when a moment holds less than the signal needs, rounding errors apart. */
+export function isClipped(need: SwingNeed, voltage: number): boolean {
+  return spareAt(need, voltage) < -1e-9 * Math.max(1, Math.abs(need.limit));
+}
+
 /** The rail's miss of what its signal needs, if it has one: typical first, else at the corner. */
 export function swingMissOf(result: RailResult): SwingMiss | undefined {
   const need = swingNeedOf(result);
   const moments = need && weakestMoments(result);
   if (!need || !moments) return undefined;
-  const slack = 1e-9 * Math.max(1, Math.abs(need.limit));
   const worst = moments.typical.reduce((a, b) =>
     spareAt(need, b.voltage) < spareAt(need, a.voltage) ? b : a,
   );
-  const by = -spareAt(need, worst.voltage);
-  if (by > slack) return { result, need, by, ...worst };
+  const by = (voltage: number) => -spareAt(need, voltage);
+  if (isClipped(need, worst.voltage)) return { result, need, by: by(worst.voltage), ...worst };
   const { corner } = moments;
-  const atCorner = -spareAt(need, corner.voltage);
-  if (!(atCorner > slack)) return undefined;
-  return { result, need, by: atCorner, voltage: corner.voltage, dip: corner.dip, corner: corner.end };
+  if (!isClipped(need, corner.voltage)) return undefined;
+  return {
+    result,
+    need,
+    by: by(corner.voltage),
+    voltage: corner.voltage,
+    dip: corner.dip,
+    corner: corner.end,
+  };
 }
 
 function isBelowGround({ voltage, pump }: Pick<RailResult, 'voltage' | 'pump'>): boolean {

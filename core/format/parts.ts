@@ -26,8 +26,6 @@ import {
   table,
 } from './shape';
 
-const later = { computed: false } as const;
-
 export const diodePartShape = shape('the data of a diode', 'Data of a diode.', {
   source: sourceRow,
   kind: row(
