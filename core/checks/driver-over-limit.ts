@@ -8,7 +8,8 @@ import { originWords } from '../analysis/words';
 import { nextPreferredUp } from '../quantity/preferred';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { Check } from './check';
-import type { Finding } from './finding';
+import type { Finding, Fix } from './finding';
+import { seriesOf } from './fixes';
 
 export const driverOverLimit: Check = {
   code: 'driver-over-limit',
@@ -43,6 +44,7 @@ function toFinding(
   const flows = formatQuantity(amps, 'A');
   const ratio = amps / rating.min;
   const over = ratio < 2 ? `${formatPercent(ratio - 1, 2)} above` : `${Number(ratio.toPrecision(2))} times`;
+  const ohms = missingOhms(amps, rating.min, railVolts);
   const when = starting
     ? `while the pump of ${rails.join(' and ')} comes up from empty capacitors`
     : `at the peaks of every period (pump of ${rails.join(' and ')})`;
@@ -51,10 +53,12 @@ function toFinding(
     severity: starting ? 'warning' : 'error',
     at: path,
     span,
-    message: `${what[0]!.toUpperCase()}${what.slice(1)} carries up to ${flows} ${when}, ${over} the ${most} it is rated for. ${cure(amps, rating.min, railVolts)}`,
+    message: `${what[0]!.toUpperCase()}${what.slice(1)} carries up to ${flows} ${when}, ${over} the ${most} it is rated for. ${cure(ohms)}`,
     expected: `at most ${most}`,
     actual: flows,
     source: originWords(rating.origin),
+    // In steady state more resistance costs the rail its voltage: there the part is the thing to change.
+    fixes: starting ? fixesFor(analysis, rails, ohms) : [],
     related: rails.flatMap((name) => {
       const rail = analysis.rails.get(name)?.rail;
       return rail ? [{ span: rail.nameSpan, message: `${name} is pumped through it` }] : [];
@@ -63,9 +67,23 @@ function toFinding(
 }
 
 /** The current is a voltage over the resistance in its way: what is missing follows from the ratio. */
-function cure(amps: number, limit: number, railVolts: number | undefined): string {
+function missingOhms(amps: number, limit: number, railVolts: number | undefined): number | undefined {
   const missing = railVolts === undefined ? 0 : Math.abs(railVolts) * (1 / limit - 1 / amps);
-  if (!(missing > 0)) return 'A larger class of part, or a resistor in series with the drive, cures it.';
-  const proposed = formatQuantity(nextPreferredUp(missing, 'E12'), 'ohm');
-  return `A larger class of part, or about ${proposed} in series with the drive (\`series\`), cures it.`;
+  return missing > 0 ? nextPreferredUp(missing, 'E12') : undefined;
+}
+
+function cure(ohms: number | undefined): string {
+  if (ohms === undefined) return 'A larger class of part, or a resistor in series with the drive, cures it.';
+  return `A larger class of part, or about ${formatQuantity(ohms, 'ohm')} in series with the drive (\`series\`), cures it.`;
+}
+
+/** Only where one pump stands behind the driver is its series resistor the whole answer. */
+function fixesFor(
+  analysis: BoardAnalysis,
+  rails: readonly string[],
+  ohms: number | undefined,
+): readonly Fix[] {
+  const rail = rails.length === 1 ? analysis.rails.get(rails[0]!)?.rail : undefined;
+  const present = rail?.origin?.kind === 'pump' ? (rail.origin.pump.series?.typical ?? 0) : 0;
+  return rail && ohms !== undefined ? seriesOf(analysis, rail, nextPreferredUp(present + ohms, 'E12')) : [];
 }

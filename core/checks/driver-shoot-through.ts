@@ -84,13 +84,13 @@ function storageCause({ driver, stage }: StageInUse): string {
     present > 0 && factor > 1.5
       ? `Base resistors of about ${formatQuantity(present * factor, 'ohm', 2)} instead of ${formatQuantity(present, 'ohm', 2)} still saturate it and store less;`
       : 'Transistors of shorter storage time cure it;';
-  return `Nearly all of it flows for up to ${formatQuantity(stage.overlapTime, 's', 2)} after each edge, until the charge of saturation is gone. ${resistors} a resistor from base to emitter, a small capacitor across each base resistor or a lower frequency helps too.`;
+  return `Most of it flows for up to ${formatQuantity(stage.overlapTime, 's', 2)} after each edge, until the charge of saturation is gone. ${resistors} a resistor from base to emitter, a small capacitor across each base resistor or a lower frequency helps too.`;
 }
 
 /** What keeps the upper transistor on while it should be off, and the resistor that would turn it off. */
 function cause(analysis: BoardAnalysis, found: StageInUse): string {
   const { driver, use, stage } = found;
-  if (stage.overlapCurrent > 0.9 * stage.crossCurrent) return storageCause(found);
+  if (stage.overlapCurrent > 0.5 * stage.crossCurrent) return storageCause(found);
   const high = analysis.clocks.get(use.clock.clock.name)?.high;
   const railName = driver.rail?.name ?? use.clock.output.railName;
   const rail = railName === undefined ? undefined : analysis.rails.get(railName)?.voltage?.typical;

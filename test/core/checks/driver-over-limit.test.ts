@@ -1,4 +1,5 @@
 import { describe, it } from 'vitest';
+import { analyse, applyEdits } from '../../../core/index';
 import { checkRule, checkSilent } from '../../support/check-rule';
 import { markUnder } from '../../support/mark-under';
 import { mosfetBoard, ownPair } from '../../support/mosfet-board';
@@ -62,6 +63,10 @@ describe('driver-over-limit', () => {
       ),
     );
     checkSilent('driver-over-limit', pair('1.5 A', 'series: 6.8 ohm,'));
+    const [found] = analyse(pair('1.5 A', ''), { file: 'rails.yaml' }).findings.filter(
+      ({ code }) => code === 'driver-over-limit',
+    );
+    checkSilent('driver-over-limit', applyEdits(pair('1.5 A', ''), found!.fixes![0]!.edits));
     checkSilent('driver-over-limit', mosfetBoard(ownPair('1 V', '1 ohm', '1 nC')));
   });
 
