@@ -12,7 +12,7 @@ import { weightedModes } from './board-modes';
 import { chipResults, currentBand, groupResults } from './chips';
 import { clockSource } from './clock-source';
 import { boardCurrents, type CurrentCases } from './currents';
-import { driverResults } from './drivers';
+import { driverResults, unknownGates } from './drivers';
 import { isGap } from './gap';
 import { Memory } from './memory';
 import { once } from './once';
@@ -21,6 +21,7 @@ import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
 import { regulatorResults } from './regulators';
 import { supplyResistance, supplyVoltage } from './supply-voltage';
+import { assumedHeadrooms } from './swing-need';
 import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
 
 /** `file` is only a name for reports; `text` has no byte-order mark. */
@@ -47,17 +48,19 @@ export function computeBoard(
   const solved = railVoltages(board, memory);
   const currents = boardCurrents(board, solved);
   const pins = pinResults(board, solved);
+  const rails = railResults(board, solved, currents, modes);
+  const drivers = driverResults(board, solved);
   const balances = [...solved.pumps.values()].flatMap((pump) => pump.points.map((point) => point.balance));
   return {
     text,
     file,
     reading,
-    rails: railResults(board, solved, currents, modes),
+    rails,
     pins,
     groups: groupResults(board, pins),
     chips: chipResults(board, solved, pins, currents, modes),
     clocks: clockResults(board, solved),
-    drivers: driverResults(board, solved),
+    drivers,
     regulators: regulatorResults(board, solved, currents),
     supplies: supplyResults(board, currents),
     bench: once(() => benchResults({ board, solved, memory })),
@@ -67,6 +70,8 @@ export function computeBoard(
       ...assumedDraws(board),
       ...assumedResistances(board),
       ...averagedPowers(board, solved),
+      ...assumedHeadrooms(rails),
+      ...unknownGates(drivers),
     ],
   };
 }

@@ -5,6 +5,8 @@ import type { Board, Chip, Rail } from '../model/board';
 import type { Band } from '../quantity/figure';
 import { clockSource } from './clock-source';
 import { isGap } from './gap';
+import { gateUses } from './gate-uses';
+import type { GateLoad } from './mosfet-stage';
 import type { RailVoltages } from './rail-voltages';
 
 export interface OnRail {
@@ -12,7 +14,7 @@ export interface OnRail {
   readonly regulated: Rail[];
   readonly filtered: Rail[];
   readonly pumped: Rail[];
-  /** Own currents of timers and gates that make a clock, A. */
+  /** Own currents of timers and gates that make a clock or drive a pump, and what MOSFETs take at their edges, A. */
   readonly oscillators: Band[];
 }
 
@@ -30,6 +32,8 @@ export interface Consumers {
   readonly on: ReadonlyMap<string, OnRail>;
   readonly drivenBy: ReadonlyMap<string, readonly Driven[]>;
   readonly pinsOf: ReadonlyMap<string, readonly Driven[]>;
+  /** Average that charging gates takes from a chip's pins, by chip, A. */
+  readonly gatesOf: ReadonlyMap<string, readonly Band[]>;
 }
 
 export function consumersOf(board: Board, solved: RailVoltages): Consumers {
@@ -54,7 +58,15 @@ export function consumersOf(board: Board, solved: RailVoltages): Consumers {
     for (const name of names) if (name !== undefined) at(name).pumped.push(rail);
   }
   for (const { railName, amps } of oscillatorCurrents(board, solved)) at(railName).oscillators.push(amps);
-  return { on, ...pins(board, solved) };
+  for (const [name, amps] of gateDraws(board, solved)) at(name).oscillators.push(amps);
+  const gatesOf = new Map<string, Band[]>();
+  for (const { pin, railName, clockRail, load } of gateUses(solved.chains.values())) {
+    at(railName).oscillators.push(load.cross);
+    const amps = chargeOf(load);
+    if (pin) gatesOf.set(pin.chip, [...(gatesOf.get(pin.chip) ?? []), amps]);
+    else if (clockRail !== undefined) at(clockRail).oscillators.push(amps);
+  }
+  return { on, ...pins(board, solved), gatesOf };
 }
 
 function pins(board: Board, solved: RailVoltages): Pick<Consumers, 'drivenBy' | 'pinsOf'> {
@@ -77,6 +89,22 @@ function grouped(list: readonly Driven[], by: 'chip' | 'railName'): Map<string, 
     else groups.set(item[by], [item]);
   }
   return groups;
+}
+
+function chargeOf({ least, typical, most }: GateLoad): Band {
+  return { min: least.sourceAverage, typical: typical.sourceAverage, max: most.sourceAverage };
+}
+
+/** What the gates of drivers take for themselves, by rail: gates in parallel stand in one package. */
+function gateDraws(board: Board, { chains }: RailVoltages): [string, Band][] {
+  const rails = new Map<string, string>();
+  for (const { driver, source } of [...chains.values()].flat())
+    if (driver) rails.set(driver.name, source.railName);
+  return [...board.drivers.values()].flatMap(({ name, stage }): [string, Band][] => {
+    const draws = stage?.kind === 'gates' ? stage.part?.data?.draws : undefined;
+    const rail = rails.get(name);
+    return draws && rail !== undefined ? [[rail, draws]] : [];
+  });
 }
 
 /** What timers and gates that make a clock take for themselves, by rail. */

@@ -2,11 +2,12 @@
  * Average currents up the tree of rails, mode by mode: what loads, chips, regulators and pumps take from each rail.
  * Once with everything typical, once with everything that takes most, once with what takes least.
  */
-import type { Board, Chip, Load, Rail } from '../model/board';
+import type { Board, Chip, Rail } from '../model/board';
 import type { Band } from '../quantity/figure';
 import { activeIn } from './board-modes';
 import { type Consumers, consumersOf, type Driven } from './consumers';
 import { isGap } from './gap';
+import { loadAmps } from './load-current';
 import type { RailVoltages } from './rail-voltages';
 import { regulatorInput } from './regulators';
 import type { PumpPoint } from './types';
@@ -61,7 +62,7 @@ function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, wh
     let sum = rail.bleeder ? share(volts(rail.name, mode, end), rail.bleeder[other]) : 0;
     for (const load of rail.loads.values()) {
       if (!activeIn(mode, load.modes)) continue;
-      sum += plainLoad(load, end, other, (at) => volts(rail.name, mode, at));
+      sum += loadAmps(load, end, (at) => volts(rail.name, mode, at));
     }
     return Number.isNaN(sum) ? null : sum;
   };
@@ -83,7 +84,7 @@ function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, wh
     const byPins = (consumers.pinsOf.get(item.name) ?? [])
       .filter(past)
       .reduce((sum, pin) => sum + pin.share * (at.drives[pin.index]?.sourceAverage ?? 0), 0);
-    return (at.railCurrents.get(name) ?? 0) - byPins;
+    return (at.railCurrents.get(name) ?? 0) + (at.besideCurrents.get(name) ?? 0) - byPins;
   };
 
   const chip = (item: Chip, mode: string | undefined): number | null => {
@@ -94,7 +95,8 @@ function currentsOf(board: Board, solved: RailVoltages, consumers: Consumers, wh
       .filter((draw) => activeIn(mode, draw.mode && [draw.mode]))
       .reduce((sum, draw) => sum + draw.current[end], fallback);
     const pins = [...item.pins.values()].reduce((sum, pin) => sum + (pin.sources?.[end] ?? 0), 0);
-    return own + pins + driven;
+    const gates = (consumers.gatesOf.get(item.name) ?? []).reduce((sum, amps) => sum + amps[end], 0);
+    return own + pins + driven + gates;
   };
 
   const regulated = (made: Rail, name: string, mode: string | undefined): number | null => {
@@ -142,27 +144,6 @@ function pumpPoint(
   const index = pump?.points.findIndex((each) => each.mode === mode) ?? -1;
   if (!pump || index < 0) return undefined;
   return which === 'typical' ? pump.points[index] : pump.draws[index]?.[which]?.point;
-}
-
-/** Current of a load on a rail that no pump makes, A; NaN when it needs a voltage that is not known. */
-function plainLoad(
-  load: Load,
-  end: keyof Band,
-  other: keyof Band,
-  volts: (at: keyof Band) => number | undefined,
-): number {
-  const { current, resistance, power } = load;
-  let sum = 0;
-  if (current) sum += size(current, end);
-  if (resistance) sum += share(volts(end), resistance[other]);
-  if (power && power.max > 0) sum += share(power[end], volts(other));
-  return sum;
-}
-
-/** A current counts by its size: on a negative rail it may be written with either sign. */
-function size({ min, typical, max }: Band, end: keyof Band): number {
-  if (typical >= 0) return { min: Math.max(min, 0), typical, max }[end];
-  return { min: Math.max(-max, 0), typical: -typical, max: -min }[end];
 }
 
 function share(above: number | undefined, below: number | undefined): number {

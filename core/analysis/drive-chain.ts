@@ -7,6 +7,7 @@ import { type ClockSource, clockSource } from './clock-source';
 import type { DriveSource } from './drive-source';
 import { driverStage, type PinShare } from './driver-stage';
 import { type Gap, isGap } from './gap';
+import type { GateDrive } from './mosfet-stage';
 import type { RailVoltage } from './pump-solution';
 
 export interface DriveChain {
@@ -16,8 +17,8 @@ export interface DriveChain {
   readonly driver?: Driver;
   readonly source: DriveSource;
   readonly pins: readonly PinShare[];
-  /** Charge that a cycle takes from the clock into gates, C. */
-  readonly gateCharge: number;
+  /** Of a driver of MOSFETs: what its gates ask of the clock. */
+  readonly gates?: GateDrive;
   /** True when the pump's terminal is high while the clock that sets the timing is high. */
   readonly inPhase: boolean;
 }
@@ -59,8 +60,8 @@ function driveChain(board: Board, name: string, voltage: RailVoltage): DriveChai
     lowOhms: output.lowOhms,
   };
   const clockPins = clock.pin ? [{ chip: clock.pin.chip.name, pin: clock.pin.pin, share: 1 }] : [];
-  if (!driver) return { name, clock, source: own, pins: clockPins, gateCharge: 0, inPhase: !clock.opposite };
-  const stage = driverStage(board, driver, railName, voltage);
+  if (!driver) return { name, clock, source: own, pins: clockPins, inPhase: !clock.opposite };
+  const stage = driverStage(board, driver, clock, railName, voltage);
   if (isGap(stage)) return stage;
   return {
     name,
@@ -70,9 +71,21 @@ function driveChain(board: Board, name: string, voltage: RailVoltage): DriveChai
       ? { ...own, driver: stage.stage }
       : { ...stage.output!, opposite: clock.opposite !== stage.inverts },
     pins: stage.pins ?? (stage.stage ? clockPins : []),
-    gateCharge: stage.gateCharge,
+    ...(stage.gates ? { gates: stage.gates } : {}),
     inPhase: clock.opposite === stage.inverts,
   };
+}
+
+/** Edges of the timing that all chains share, s: a driver whose gates charge slowly lengthens them. */
+export function chainEdges(chains: readonly DriveChain[]): { readonly rise: number; readonly fall: number } {
+  let { rise, fall } = chains[0]!.clock;
+  for (const { gates, clock } of chains) {
+    if (!gates) continue;
+    // An inverse clock falls while the one that sets the timing rises.
+    rise = Math.max(rise, clock.opposite ? gates.fall : gates.rise);
+    fall = Math.max(fall, clock.opposite ? gates.rise : gates.fall);
+  }
+  return { rise, fall };
 }
 
 /** Name of the potential behind an external generator, which is no rail of the board. */

@@ -5,6 +5,7 @@ import { resistorCurrent, type Solved } from '../engine';
 import type { DrivePlace } from '../pump/drive';
 import type { PumpNetwork } from '../pump/network';
 import { inPhase, type PumpValues } from '../pump/values';
+import { overlapOf } from './driver-overlap';
 import type { DriverFigures } from './types';
 
 /** Null for a drive without such a stage. */
@@ -22,22 +23,26 @@ export function driverFigures(
   const current = (resistor: number, s: number) => resistorCurrent(circuit, path, resistor, s);
   let cross = 0;
   for (let s = 0; s < path.count; s++) cross += path.weight[s]! * crossAt(driver, stage.kind, current, s);
-  const average = cross / circuit.period;
+  const overlap = overlapOf(values, solved, driver, k);
+  const average = cross / circuit.period + overlap.current;
   const rail = values.rails[stage.rail]!;
   return {
-    baseCurrent: Math.max(
-      ...[driver.npn.base, driver.pnp.base].map((r) => {
-        const { max, min } = solved.resistors[r]!;
-        return Math.max(max, -min);
-      }),
-    ),
+    baseCurrent: Math.max(peak(solved, driver.npn.base), peak(solved, driver.pnp.base)),
     forcedGain: Math.max(...[driver.npn, driver.pnp].map((t) => gain(solved, t))),
-    dissipation: driverLoss(solved, driver),
-    railCurrent: driverRailCurrent(solved, driver, stage.kind),
+    dissipation: driverLoss(solved, driver) + overlap.current * rail.volts,
+    railCurrent: driverRailCurrent(solved, driver, stage.kind) + overlap.current,
     crossCurrent: average,
     crossCharge: (average * circuit.period) / 2,
+    overlapCurrent: overlap.current,
+    overlapTime: overlap.time,
+    collectorPeaks: { npn: peak(solved, driver.npn.collector), pnp: peak(solved, driver.pnp.collector) },
     shortOf: shortOf(solved, network, driver, rail.volts, inPhase(values.drives[k]!)),
   };
+}
+
+function peak(solved: Solved, resistor: number): number {
+  const { max, min } = solved.resistors[resistor]!;
+  return Math.max(max, -min);
 }
 
 /** Heat in both transistors with their own resistances, W; the resistors of the bases are not in it. */

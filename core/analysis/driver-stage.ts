@@ -5,8 +5,10 @@
 import type { TransistorData } from '../catalog/part';
 import type { Board, Driver, PinRef, Use } from '../model/board';
 import { type Band, exactly } from '../quantity/figure';
+import type { ClockSource } from './clock-source';
 import type { DriverSource, DriveSource, TransistorSource } from './drive-source';
 import { type Gap, isGap } from './gap';
+import { type ClockLevels, type GateDrive, gateDrive, mosfetOhms } from './mosfet-stage';
 import { pinData, pinResistance } from './pin-resistance';
 import type { RailVoltage } from './pump-solution';
 
@@ -28,14 +30,15 @@ export interface DriverStageResult {
   readonly inverts: boolean;
   /** Pins that are the driver; absent: the clock's own pin drives it. */
   readonly pins?: readonly PinShare[];
-  /** Charge that a cycle takes from the clock into gates, C. */
-  readonly gateCharge: number;
+  /** Of a pair of MOSFETs: what its gates ask of the clock. */
+  readonly gates?: GateDrive;
 }
 
-/** `clockRail` supplies a driver that names no rail of its own. */
+/** `clockRail` supplies a driver that names no rail of its own, and the high level of the clock. */
 export function driverStage(
   board: Board,
   driver: Driver,
+  clock: ClockSource,
   clockRail: string,
   voltage: RailVoltage,
 ): DriverStageResult | Gap {
@@ -63,18 +66,17 @@ export function driverStage(
       if (stage.kind === 'push-pull' && !base) return { because: `a base resistor of ${name} is missing` };
       return {
         inverts: stage.kind === 'push-pull',
-        gateCharge: 0,
         stage: { kind: stage.kind, name, path: driver.path, railName, npn, pnp, base },
       };
     }
     case 'mosfet-pair': {
       const [n, p] = [stage.nmos?.data, stage.pmos?.data];
       if (!n || !p) return { because: `a MOSFET of ${name} is not known` };
-      return {
-        inverts: true,
-        gateCharge: (n.gateCharge?.typical ?? 0) + (p.gateCharge?.typical ?? 0),
-        output: output(p.onResistance, n.onResistance),
-      };
+      const levels = clockLevels(clock, clockRail, voltage);
+      if (isGap(levels)) return levels;
+      const gates = gateDrive(stage, n, p, band, levels, clock);
+      const { high, low } = mosfetOhms(n, p, gates);
+      return { inverts: true, gates, output: output(high, low) };
     }
     case 'gates': {
       const data = stage.part?.data;
@@ -83,11 +85,25 @@ export function driverStage(
       if (!high || !low) return { because: `the output resistance of the gates of ${name} is not known` };
       const count = Math.max(1, Math.round(stage.parallel?.typical ?? 1));
       // Inverters are the usual gates for this work (common practice, no source).
-      return { inverts: true, gateCharge: 0, output: output(divided(high, count), divided(low, count)) };
+      return { inverts: true, output: output(divided(high, count), divided(low, count)) };
     }
     case 'pins':
       return parallelPins(board, name, stage.pins, voltage, output);
   }
+}
+
+function clockLevels({ output }: ClockSource, rail: string, voltage: RailVoltage): ClockLevels | Gap {
+  const top = output.highVolts ?? voltage(rail);
+  if (isGap(top)) return top;
+  const { highDrop, lowVolts } = output;
+  return {
+    high: {
+      min: top.min - highDrop.max,
+      typical: top.typical - highDrop.typical,
+      max: top.max - highDrop.min,
+    },
+    low: lowVolts,
+  };
 }
 
 function transistor(
@@ -141,7 +157,6 @@ function parallelPins(
   const total = parallel(high).typical;
   return {
     inverts: false,
-    gateCharge: 0,
     output: { ...output(parallel(high), parallel(low)), railName },
     pins: refs.map((ref, k) => ({ chip: ref.chip, pin: ref.pin, share: total / high[k]!.typical })),
   };

@@ -77,12 +77,13 @@ const isPumped = ({ origin }: Rail): boolean => origin?.kind === 'pump';
 
 /** Rules judge ripple of pumps only: what a supply has of it stands nowhere in the file. */
 function isJudged(rail: Rail): boolean {
-  return rail.needs?.voltage !== undefined || (rail.needs?.ripple !== undefined && isPumped(rail));
+  const { voltage, swing, ripple } = rail.needs ?? {};
+  return voltage !== undefined || swing !== undefined || (ripple !== undefined && isPumped(rail));
 }
 
 function unjudgedNeeds(rail: Rail): { rail: string; need: string }[] {
   const { needs, name } = rail;
-  const others = (['start', 'swing', 'headroom', 'discharge'] as const).filter((need) => needs?.[need]);
+  const others = (['start', 'discharge'] as const).filter((need) => needs?.[need]);
   const ripple = needs?.ripple && !isPumped(rail) ? ['ripple'] : [];
   return [...ripple, ...others].map((need) => ({ rail: name, need }));
 }

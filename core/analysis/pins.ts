@@ -3,10 +3,10 @@
  */
 
 import type { PinData } from '../catalog/part';
-import type { Board, Chip } from '../model/board';
-import type { Figure } from '../quantity/figure';
+import type { Board, Chip, ChipPin } from '../model/board';
 import { weightedModes } from './board-modes';
 import { isGap } from './gap';
+import { type GateUse, gateUses } from './gate-uses';
 import { pinData, pinResistance } from './pin-resistance';
 import type { RailVoltages } from './rail-voltages';
 import type { CornerSetting, DriveFigures, PinResult } from './types';
@@ -22,14 +22,20 @@ interface Use {
   readonly share: number;
 }
 
-/** Pins that drive a pump or that the file lists, by `chip.pin`. */
+/** Pins that drive a pump, charge the gates of a driver or stand in the file, by `chip.pin`. */
 export function pinResults(board: Board, solved: RailVoltages): Map<string, PinResult> {
   const uses = pumpUses(solved);
+  const gates = gateUses(solved.chains.values());
   const results = new Map<string, PinResult>();
   for (const chip of board.chips.values()) {
     const driving = uses.get(chip.name);
-    for (const name of new Set([...chip.pins.keys(), ...(driving?.keys() ?? [])]))
-      results.set(`${chip.name}.${name}`, pinResult(board, solved, chip, name, driving?.get(name) ?? []));
+    const charging = gates.filter(({ pin }) => pin?.chip === chip.name);
+    const names = [...(driving?.keys() ?? []), ...charging.map(({ pin }) => pin!.pin)];
+    for (const name of new Set([...chip.pins.keys(), ...names])) {
+      const own = charging.filter(({ pin }) => pin?.pin === name);
+      const result = pinResult(board, solved, chip, name, driving?.get(name) ?? [], own);
+      results.set(`${chip.name}.${name}`, result);
+    }
   }
   return results;
 }
@@ -40,13 +46,14 @@ function pinResult(
   chip: Chip,
   name: string,
   uses: readonly Use[],
+  gates: readonly GateUse[],
 ): PinResult {
   const listed = chip.pins.get(name);
   const data: PinData = chip.part?.data ? pinData(chip.part.data, name, listed) : {};
   const rail = chip.rail && solved.voltages.get(chip.rail.name);
   const supply = rail && !isGap(rail) ? rail.typical : undefined;
-  const figures = worstMode(board, solved, uses, listed?.sources, listed?.sinks, 'typical')?.figures;
-  const most = worstMode(board, solved, uses, listed?.sources, listed?.sinks, 'most');
+  const figures = worstMode(board, solved, uses, gates, listed, 'typical')?.figures;
+  const most = worstMode(board, solved, uses, gates, listed, 'most');
   const limit = data.recommended ?? data.absolute ?? null;
   return {
     key: `${chip.name}.${name}`,
@@ -64,6 +71,7 @@ function pinResult(
     limit,
     limitKind: limit === null ? null : data.recommended ? 'recommended' : 'absolute',
     use: figures && limit ? figures.rms / limit.typical : null,
+    charges: gates.map(({ driver }) => driver),
     drives: uses.map((use) => use.railName),
     pumps: uses.map(({ railName, index, share }) => ({ railName, index, share })),
   };
@@ -95,14 +103,14 @@ function worstMode(
   board: Board,
   solved: RailVoltages,
   uses: readonly Use[],
-  sources: Figure | undefined,
-  sinks: Figure | undefined,
+  gates: readonly GateUse[],
+  own: ChipPin | undefined,
   which: 'typical' | 'most',
 ): PinPoint | undefined {
   const end = which === 'most' ? 'max' : 'typical';
   let worst: PinPoint | undefined;
   for (const { name: mode } of weightedModes(board)) {
-    const parts: DriveFigures[] = [];
+    const parts = gates.map(({ load }): DriveFigures => load[which]);
     let largest = 0;
     let settings: readonly CornerSetting[] = [];
     for (const use of uses) {
@@ -116,7 +124,7 @@ function worstMode(
       if (figures.rms > largest) settings = corner?.settings ?? [];
       largest = Math.max(largest, figures.rms);
     }
-    const figures = addUp(parts, sources?.[end] ?? 0, sinks?.[end] ?? 0);
+    const figures = addUp(parts, own?.sources?.[end] ?? 0, own?.sinks?.[end] ?? 0);
     if (!worst || figures.rms > worst.figures.rms) worst = { figures, settings };
   }
   return worst;
@@ -133,7 +141,7 @@ function scaled(figures: DriveFigures, share: number): DriveFigures {
 }
 
 /**
- * Pumps on one pin charge at the same moments, so their currents add, rms and peaks too. A steady current of the pin
+ * Pumps and gates on one pin charge at the same moments, so their currents add, rms and peaks too. A steady current of the pin
  * adds to the rms as if it flowed all the time: the cautious reading.
  */
 function addUp(parts: readonly DriveFigures[], source: number, sink: number): DriveFigures {

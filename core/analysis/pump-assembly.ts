@@ -10,6 +10,7 @@ import { idealVoltage, type LoadValues, type PumpValues } from '../pump/values';
 import type { Band } from '../quantity/figure';
 import { activeIn } from './board-modes';
 import type { DriveSource } from './drive-source';
+import { steadyLoad } from './load-current';
 import { Book, type Point, sourceLabel } from './pump-book';
 import { type CapacitorPart, capacitorPart, type PlacedCapacitor } from './pump-capacitors';
 import { addDriveVariables } from './pump-drives';
@@ -233,8 +234,9 @@ function addLoads(book: Book, { rail, mode, below }: PumpParts): ((p: Point) => 
       const variable = add(label, path, 'ohm', load.resistance);
       loads.push((p) => ({ name, kind: 'resistance', ohms: p[variable]! }));
     }
-    if (load.current && load.current.typical !== 0) {
-      const variable = add(label, path, 'A', magnitude(load.current));
+    const steady = steadyLoad(load);
+    if (steady && steady.typical > 0) {
+      const variable = add(label, path, 'A', steady);
       loads.push((p) => ({ name, kind: 'current', amps: p[variable]! }));
     }
     if (load.power && load.power.typical > 0) {
@@ -252,10 +254,4 @@ function addLoads(book: Book, { rail, mode, below }: PumpParts): ((p: Point) => 
     loads.push((p) => ({ name: 'bleeder', kind: 'resistance', ohms: p[variable]! }));
   }
   return loads;
-}
-
-/** A load's current counts by its size: on a negative rail it may be written with either sign. */
-function magnitude(band: Band): Band {
-  if (band.typical >= 0) return band;
-  return { min: -band.max, typical: -band.typical, max: -band.min };
 }

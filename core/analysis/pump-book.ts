@@ -33,6 +33,12 @@ export class Book {
     return this.variables.push({ label, path, unit, band: { min, typical, max }, ...traits }) - 1;
   }
 
+  /** A quantity that costs current but moves neither the voltage nor the ripple; a larger one costs more. */
+  still(label: string, path: string, unit: Unit, { min, typical, max }: Band): number {
+    const band = { min, typical, max };
+    return this.variables.push({ label, path, unit, band, draws: 1, still: true }) - 1;
+  }
+
   /** A rail that serves twice is one variable, since it cannot sit at both ends of its band. */
   rail(name: string, band: Band): number {
     const known = this.#rails.get(name);

@@ -35,8 +35,7 @@ export function pumpDrops(
   const cross =
     sum(
       values.drives.map(
-        (drive, k) =>
-          (drivers[k]?.crossCurrent ?? 0) * (drive.driver ? values.rails[drive.driver.rail]!.volts : 0),
+        (drive, k) => solvedCross(drivers[k]) * (drive.driver ? values.rails[drive.driver.rail]!.volts : 0),
       ),
     ) / loadCurrent;
   const stages =
@@ -72,6 +71,11 @@ export function pumpDrops(
     { in: 'ripple', volts: powerOut / loadCurrent - actual },
   ];
   return list.filter((drop) => Math.abs(drop.volts) > 1e-5 * ideal);
+}
+
+/** Without the overlap after an edge, which is not in the network. */
+function solvedCross(driver: DriverFigures | null | undefined): number {
+  return driver ? driver.crossCurrent - driver.overlapCurrent : 0;
 }
 
 function allLeaks({ leaks }: PumpNetwork): readonly (number | undefined)[] {

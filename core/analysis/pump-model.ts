@@ -16,6 +16,8 @@ export interface Variable {
   readonly draws?: 1 | -1;
   /** -1 when a smaller value makes the same charge flow in shorter and higher pulses. */
   readonly sharpens?: -1;
+  /** True when it moves neither the voltage nor the ripple, only what the pump takes from its sources. */
+  readonly still?: true;
 }
 
 /** How an engine parameter moves with a variable: `d parameter / d variable` at the given point. */

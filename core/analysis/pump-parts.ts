@@ -78,6 +78,7 @@ export function transistorPart(
 ): TransistorPart {
   const saturation = book.add(`${label} saturation current`, path, 'A', data.saturation);
   const gain = book.add(`${label} gain`, path, '1', data.gain);
+  const storage = data.storage && book.still(`${label} storage time`, path, 's', data.storage);
   const values = (p: Point): TransistorValues => ({
     ...junctionAt(p[saturation]!, 1, p[ambient]!, 'silicon'),
     gain: p[gain]!,
@@ -85,6 +86,7 @@ export function transistorPart(
     baseOhms: data.baseResistance?.typical ?? 10,
     collectorOhms: data.collectorResistance?.typical ?? 1,
     emitterOhms: data.emitterResistance?.typical ?? 0.1,
+    ...(storage === undefined ? {} : { storageSeconds: p[storage]! }),
   });
   return {
     values,

@@ -6,6 +6,7 @@ import type { DrivePlace } from '../pump/drive';
 import { type PumpNetwork, pumpNetwork } from '../pump/network';
 import { type CapacitorValues, idealVoltage, type PumpValues } from '../pump/values';
 import { driverFigures } from './driver-figures';
+import { besideCurrents } from './driver-overlap';
 import { belowLoad } from './pump-assembly';
 import { pumpDrops } from './pump-drops';
 import { hasBand, type PumpModel } from './pump-model';
@@ -55,7 +56,7 @@ export function solvePoint(
   }
   const tied = new Set(contributions.map((c) => c.variable));
   model.variables.forEach((variable, k) => {
-    if (tied.has(k) || !hasBand(variable)) return;
+    if (tied.has(k) || !hasBand(variable) || variable.still) return;
     slopes.voltage[k] = Number.NaN;
     slopes.ripple[k] = Number.NaN;
   });
@@ -109,6 +110,10 @@ function describe(
     drivers,
     railCurrents: new Map(
       values.rails.map((rail, k) => [rail.name, solved.knowns[network.rails[k]!.known]!.average]),
+    ),
+    besideCurrents: besideCurrents(values, drivers),
+    driveHeat: network.drives.map(
+      ({ high, low }) => solved.resistors[high]!.loss + solved.resistors[low]!.loss,
     ),
     capacitors: capacitorFigures(model, values, network, solved),
     diodes: network.diodes.map((index, k): DiodeFigures => {

@@ -9,6 +9,8 @@ import type { PumpModel } from './pump-model';
 export interface Reached {
   readonly volts: number;
   readonly ripple: number | null;
+  /** Lowest and highest moment; absent where they are those of `volts`. */
+  readonly moments?: { readonly low: number; readonly high: number };
 }
 
 /** Undefined when no steady state was found. */
@@ -18,5 +20,6 @@ export function samplePump(model: PumpModel, at: readonly number[]): Reached | u
   const solved = solve(network.network);
   if (!solved.converged) return undefined;
   const { average, min, max } = solved.nodes[network.output]!;
-  return Number.isFinite(average) ? { volts: average, ripple: max - min } : undefined;
+  if (!Number.isFinite(average)) return undefined;
+  return { volts: average, ripple: max - min, moments: { low: min, high: max } };
 }

@@ -4,7 +4,7 @@
 import type { Board, Pump, Rail } from '../model/board';
 import type { Band } from '../quantity/figure';
 import { weightedModes } from './board-modes';
-import { type DriveChain, driveChains } from './drive-chain';
+import { chainEdges, type DriveChain, driveChains } from './drive-chain';
 import { type Gap, isGap } from './gap';
 import type { SolvedPump } from './memory';
 import { assemblePump, type PumpParts, type RailSource } from './pump-assembly';
@@ -41,7 +41,7 @@ export function setUpPump(board: Board, rail: Rail, pump: Pump, around: Surround
   for (const { name: mode } of weightedModes(board)) {
     const rails = railSources(chains, input, mode, around);
     if (isGap(rails)) return rails;
-    const { root, frequency, duty, rise, fall } = chains[0]!.clock;
+    const { root, frequency, duty } = chains[0]!.clock;
     parts.push({
       rail,
       pump,
@@ -51,7 +51,7 @@ export function setUpPump(board: Board, rail: Rail, pump: Pump, around: Surround
       rails,
       input,
       drives: chains.map((chain) => chain.source),
-      clock: { label: root.name, path: root.path, frequency, duty, rise, fall },
+      clock: { label: root.name, path: root.path, frequency, duty, ...chainEdges(chains) },
       below: around.below(mode),
     });
   }

@@ -9,6 +9,7 @@ import type { CurrentCases, Currents } from './currents';
 import { pumpLoadLine, pumpWaveform } from './curves';
 import { filterFarads, filterOhms, filterRipple } from './filters';
 import { isGap } from './gap';
+import { headroomOf } from './headroom';
 import { once } from './once';
 import type { PumpModel } from './pump-model';
 import type { ModeModel } from './pump-result';
@@ -45,9 +46,11 @@ function filteredRail(
   const wave = front?.waveform?.();
   const fall = filter.resistor ? filter.resistor.typical * current : undefined;
   const { typical } = filterOhms(filter);
+  const ripple = wave ? filterRipple(filter, wave, voltage.typical, current) : null;
   return {
     ...result,
-    ripple: wave ? filterRipple(filter, wave, voltage.typical, current) : null,
+    ripple,
+    headroom: headroomOf({ ...result, ripple }),
     inputCurrent: current,
     efficiency: front?.voltage?.typical ? voltage.typical / front.voltage.typical : null,
     storedEnergy: farads === undefined ? null : (farads * voltage.typical ** 2) / 2,
@@ -88,10 +91,11 @@ function railResult(
       : null;
   const regulatorIn = regulatorCurrent(rail, solved, currents, modes);
   const stated = modes.filter((mode) => mode.name !== undefined);
+  const ripple = pump ? rippleBand(pump) : null;
   return {
     rail,
     voltage,
-    ripple: pump ? rippleBand(pump) : null,
+    ripple,
     current: current?.typical ?? null,
     inputCurrent: pump ? average((mode) => at(mode)?.inputCurrent) : regulatorIn,
     power: powerOut,
@@ -100,7 +104,7 @@ function railResult(
         ? powerOut / powerIn
         : null
       : regulatorEfficiency(rail, solved, regulatorIn, powerOut),
-    headroom: voltage ? headroom(rail, voltage) : null,
+    headroom: headroomOf({ rail, voltage, ripple, ...(pump ? { pump } : {}) }),
     storedEnergy: pump ? storedEnergy(pump) : null,
     modes: new Map(
       stated.map((mode) => [
@@ -174,16 +178,6 @@ function rippleBand(pump: PumpResult): Band {
     typical: pump.heaviest.ripple,
     max: pump.ripple.highest.value,
   };
-}
-
-/**
- * Volts between the weakest corner and the edge of the window it must not fall below, in magnitude: for a negative
- * rail the edge nearer to zero.
- */
-function headroom(rail: Rail, voltage: Band): number | null {
-  const window = rail.needs?.voltage;
-  if (!window) return null;
-  return window.max <= 0 ? window.max - voltage.max : voltage.min - window.min;
 }
 
 /** J, all capacitors of the pump at their largest voltage. */

@@ -9,6 +9,7 @@ import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
 import type { ClockSource } from './clock-source';
 import type { LoadPoint, Waveform } from './curves';
+import type { GateDrive } from './mosfet-stage';
 
 /** One quantity of a corner and the end of its band at which it was taken. */
 export interface CornerSetting {
@@ -63,6 +64,14 @@ export interface DriverFigures {
   /** Average that flows through both transistors at once, A, and the same as charge per edge, C. */
   readonly crossCurrent: number;
   readonly crossCharge: number;
+  /**
+   * The part of it that flows after each edge until the charge of saturation is gone, A, and the longer of the times
+   * that this takes, s. It is no part of the solved network: heat, charge and currents here hold it, drops do not.
+   */
+  readonly overlapCurrent: number;
+  readonly overlapTime: number;
+  /** Largest collector currents in the solved period, without the overlap, A. */
+  readonly collectorPeaks: { readonly npn: number; readonly pnp: number };
   /** Volts by which the output still misses its rail or ground at the end of a phase; the larger of the two. */
   readonly shortOf: number;
 }
@@ -123,6 +132,10 @@ export interface PumpPoint {
   readonly drivers: readonly (DriverFigures | null)[];
   /** Average out of every rail that the pump stands on or is driven from, by name, A. */
   readonly railCurrents: ReadonlyMap<string, number>;
+  /** Beside it, out of the rails of its stages of transistors: what their switching takes, A. */
+  readonly besideCurrents: ReadonlyMap<string, number>;
+  /** Heat in the two switches of each drive's clock output, or of its gates or MOSFETs, W. */
+  readonly driveHeat: readonly number[];
   readonly capacitors: readonly CapacitorFigures[];
   readonly diodes: readonly DiodeFigures[];
   /** Solver effort: iterations and steps. */
@@ -235,6 +248,8 @@ export interface PinResult {
   readonly limit: Figure | null;
   readonly limitKind: 'recommended' | 'absolute' | null;
   readonly use: number | null;
+  /** Drivers of MOSFETs whose gates this pin charges. */
+  readonly charges: readonly string[];
   /** Rails whose pump this pin drives. */
   readonly drives: readonly string[];
   /** The same, with the place among the pump's drives and the pin's share of its current. */
@@ -281,14 +296,37 @@ export interface ClockResult {
 /** One pump behind a driver, in that pump's heaviest mode. */
 export interface DriverUse {
   readonly railName: string;
+  /** Place among the pump's drives. */
+  readonly index: number;
   readonly mode?: string;
   readonly clock: ClockSource;
+  /** Rail that supplies the driver. */
+  readonly driverRail: string;
+  /** Current of the driver's output into the pump; of a stage of transistors that of the clock into the stage. */
+  readonly drive: DriveFigures;
   /** Null for gates, MOSFETs and pins, which have no bases. */
   readonly stage: DriverFigures | null;
+  /** Null for all but MOSFETs. */
+  readonly gates: GateDrive | null;
+  /** Null for all but MOSFETs, and where a gate charge is not known. */
+  readonly pair: PairFigures | null;
   /** Average that charging gates takes from the clock, A. */
-  readonly gateCurrent: number;
+  readonly gateCurrent: number | null;
   /** Average that the stage takes from its clock, A. */
-  readonly clockCurrent: number;
+  readonly clockCurrent: number | null;
+}
+
+/** A pair of MOSFETs between the clock and one pump. */
+export interface PairFigures {
+  /** Heat in both, W. */
+  readonly dissipation: number;
+  /** Average out of the driver's rail, A. */
+  readonly railCurrent: number;
+  /** Average that flows through both at once, A, and the same as charge per edge, C: without a load, which makes it less. */
+  readonly crossCurrent: number;
+  readonly crossCharge: number;
+  /** The longer edge of the gates, s. */
+  readonly edgeTime: number;
 }
 
 export interface DriverResult {

@@ -43,7 +43,10 @@ export interface RailYield {
   /** Null when the rail is not computed; `because` says why. */
   readonly outcome: Outcome | null;
   readonly because?: string;
-  /** Samples that miss the weak end of the window, its strong end, the ripple; null where that is no need. */
+  /**
+   * Samples that miss the weak end of the window or what a signal needs, its strong end, the ripple; null where that
+   * is no need.
+   */
   readonly misses: {
     readonly low: number | null;
     readonly high: number | null;

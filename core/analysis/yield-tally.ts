@@ -8,6 +8,7 @@ import type { Band } from '../quantity/figure';
 import type { Lots } from './lots';
 import type { SampledRail } from './sampled-rails';
 import { isNegative } from './sign';
+import { isClipped, type SwingNeed, swingNeed } from './swing-need';
 import { type Edge, edgeOf, isBeyond, isTooMuchRipple } from './window';
 import type { Outcome, RailYield, Seen } from './yield-result';
 
@@ -36,6 +37,7 @@ export class RailTally {
   readonly #tally = new Tally();
   readonly #weak: Edge | undefined;
   readonly #strong: Edge | undefined;
+  readonly #signal: SwingNeed | undefined;
   readonly #ripple: Band | undefined;
   readonly #sign: 1 | -1;
   readonly #misses = { low: 0, high: 0, ripple: 0 };
@@ -58,6 +60,7 @@ export class RailTally {
     this.#strong = voltage && edgeOf(voltage, 'strong');
     this.#ripple = judgesRipple ? ripple : undefined;
     this.#sign = (voltage ? isNegative(voltage) : typical < 0) ? -1 : 1;
+    this.#signal = swingNeed(sampled.rail.needs, this.#sign < 0);
     this.#spreads = modes.map(() => ({ volts: [], ripple: [] }));
     this.#correlations = new Map([...sampled.used].map((lot) => [lot, new Correlation()]));
   }
@@ -73,8 +76,10 @@ export class RailTally {
         unsolved = true;
         return;
       }
-      const { volts, ripple } = reached;
+      const { volts, ripple, moments } = reached;
       missed.low ||= this.#weak !== undefined && isBeyond(this.#weak, volts);
+      const weakest = (this.#sign < 0 ? moments?.high : moments?.low) ?? volts;
+      missed.low ||= this.#signal !== undefined && isClipped(this.#signal, weakest);
       missed.high ||= this.#strong !== undefined && isBeyond(this.#strong, volts);
       this.#spreads[k]!.volts.push(volts);
       const seen = (value: number): Seen => ({
@@ -106,7 +111,7 @@ export class RailTally {
       rail: this.sampled.rail.name,
       outcome: this.#tally.outcome,
       misses: {
-        low: this.#weak ? low : null,
+        low: this.#weak || this.#signal ? low : null,
         high: this.#strong ? high : null,
         ripple: this.#ripple ? ripple : null,
       },

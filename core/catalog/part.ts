@@ -103,6 +103,8 @@ export interface MosfetData extends PartEntry {
   readonly threshold: Figure;
   readonly onResistance: Figure;
   readonly gateCharge?: Figure;
+  /** Gate voltage at which resistance and charge hold, magnitude. */
+  readonly gateVoltage?: Figure;
   readonly current?: Figure;
 }
 

@@ -33,6 +33,7 @@ export const findingCodes = [
   'driver-starved',
   'driver-shared-base',
   'driver-shoot-through',
+  'driver-over-limit',
   'clock-level',
   'clock-frequency',
   'clock-unreachable',

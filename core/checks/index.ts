@@ -14,6 +14,7 @@ import { clockFrequency } from './clock-frequency';
 import { clockLevel } from './clock-level';
 import { diodeCurrent } from './diode-current';
 import { diodeReverse } from './diode-reverse';
+import { driverOverLimit } from './driver-over-limit';
 import { driverSharedBase } from './driver-shared-base';
 import { driverShootThrough } from './driver-shoot-through';
 import { driverStarved } from './driver-starved';
@@ -51,6 +52,7 @@ export const checks: readonly Check[] = [
   clockLevel,
   diodeCurrent,
   diodeReverse,
+  driverOverLimit,
   driverSharedBase,
   driverShootThrough,
   driverStarved,

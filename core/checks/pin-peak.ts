@@ -33,7 +33,7 @@ function judge(analysis: BoardAnalysis, pin: PinResult): readonly Finding[] {
       code: 'pin-peak',
       severity: 'warning',
       ...pinPlace(analysis, pin),
-      message: `Peaks of ${formatQuantity(peak, 'A')} flow ${way} ${pin.key} at each edge, ${Number((peak / limit.min).toPrecision(2))} times its absolute maximum of ${most}${beside}. ${cure(pin, peak / limit.min)}`,
+      message: `Peaks of ${formatQuantity(peak, 'A')} flow ${way} ${pin.key} at each edge, ${Number((peak / limit.min).toPrecision(2))} times its absolute maximum of ${most}${beside}. ${cure(analysis, pin, peak, limit.min)}`,
       expected: `peaks up to ${most}`,
       actual: formatQuantity(peak, 'A'),
       source: originWords(limit.origin),
@@ -60,8 +60,19 @@ function fixesFor(analysis: BoardAnalysis, pin: PinResult, ratio: number): reado
   return rail && ohms ? seriesOf(analysis, rail, nextPreferredUp(present + ohms, 'E12')) : [];
 }
 
-function cure(pin: PinResult, ratio: number): string {
+function cure(analysis: BoardAnalysis, pin: PinResult, peak: number, limit: number): string {
+  const ratio = peak / limit;
+  if (pin.pumps.length === 0 && pin.charges.length > 0) return gateCure(analysis, pin, peak, limit);
   const proposed = missingOhms(pin, ratio);
   if (proposed === undefined) return 'A resistor in series with the drive bounds them.';
   return `A resistor of about ${formatQuantity(proposed, 'ohm')} in series with the drive (\`series\`) bounds them; the rail pays for it.`;
+}
+
+/** A gate resistor may be there already, so what is missing follows from the whole swing. */
+function gateCure(analysis: BoardAnalysis, pin: PinResult, peak: number, limit: number): string {
+  const swing = analysis.rails.get(pin.chip.rail?.name ?? '')?.voltage?.typical;
+  const missing = swing === undefined ? 0 : swing / limit - swing / peak;
+  const more =
+    missing > 0 ? `about ${formatQuantity(nextPreferredUp(missing, 'E12'), 'ohm')} more` : 'more resistance';
+  return `They charge the gates of ${pin.charges.join(' and ')}: ${more} in front of them (\`gate\`) bounds them and slows the edges.`;
 }

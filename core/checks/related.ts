@@ -1,6 +1,7 @@
 /** Second places that findings about rails point to. */
+import { loadAmps } from '../analysis/load-current';
 import type { RailResult } from '../analysis/types';
-import type { Load, Rail } from '../model/board';
+import type { Rail } from '../model/board';
 import { formatQuantity } from '../quantity/write';
 import type { Related } from './finding';
 
@@ -8,8 +9,8 @@ import type { Related } from './finding';
 export function largestLoad(result: RailResult): readonly Related[] {
   const volts = Math.abs(result.voltage?.typical ?? Number.NaN);
   const loads = [...result.rail.loads.values()]
-    .map((load) => ({ load, current: currentOf(load, volts) }))
-    .filter((entry): entry is { load: Load; current: number } => entry.current > 0)
+    .map((load) => ({ load, current: loadAmps(load, 'max', () => volts) }))
+    .filter(({ current }) => current > 0)
     .sort((a, b) => b.current - a.current);
   const first = loads[0];
   if (first === undefined) return [];
@@ -25,12 +26,4 @@ export function largestLoad(result: RailResult): readonly Related[] {
 /** Where the rail itself is described, for a finding whose own place is elsewhere. */
 export function railHere(rail: Rail, message: string): Related {
   return { span: rail.nameSpan, message };
-}
-
-/** Largest current of a load at `volts`, A; NaN when the file did not say. */
-function currentOf(load: Load, volts: number): number {
-  if (load.current) return Math.abs(load.current.max);
-  if (load.resistance) return volts / load.resistance.min;
-  if (load.power) return load.power.max / volts;
-  return Number.NaN;
 }

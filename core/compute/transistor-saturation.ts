@@ -1,4 +1,4 @@
-/** A bipolar transistor as a switch: voltage it keeps when saturated, and the time it stays on after its base is reversed. */
+/** A bipolar transistor as a switch: voltage it keeps when saturated. */
 
 export interface SaturatedTransistor {
   /** Current gain, forward and reverse, above 0. */
@@ -29,23 +29,4 @@ export function saturationVoltage(
   return (
     thermalV * Math.log((1 + (forced + 1) / reverseGain) / (1 - forced / gain)) + collectorA * collectorOhm
   );
-}
-
-/**
- * Storage time by charge control: `t = tau ln( (IB1 - IB2) / (Ic/bF - IB2) )`, IB1 the base current while on, IB2 (below 0) the
- * one that turns it off.
- *
- * Second and ampere; 0 when it was not saturated; undefined unless `tau`, `onA`, `gain` > 0 and `offA` < 0.
- * Source: charge control model, P. R. Gray, R. G. Meyer (from memory: confirm).
- * Worked: 200 ns, 1 mA, -1 mA, 10 mA, gain 200: 128.9 ns.
- */
-export function storageTime(
-  tauS: number,
-  onA: number,
-  offA: number,
-  collectorA: number,
-  gain: number,
-): number | undefined {
-  if (!(tauS > 0 && onA > 0 && offA < 0 && collectorA >= 0 && gain > 0)) return undefined;
-  return Math.max(0, tauS * Math.log((onA - offA) / (collectorA / gain - offA)));
 }

@@ -11,7 +11,8 @@ import type { Card } from './card';
 export function pinCard(pin: PinResult, span: Span): Card {
   const part = pin.chip.part?.data;
   const setting = pin.chip.pins.get(pin.name)?.strength?.name;
-  const drives = pin.drives.length > 0 ? `, drives ${pin.drives.join(' and ')}` : '';
+  const charges = pin.charges.length > 0 ? `, charges the gates of ${pin.charges.join(' and ')}` : '';
+  const drives = `${pin.drives.length > 0 ? `, drives ${pin.drives.join(' and ')}` : ''}${charges}`;
   return {
     span,
     title: `${pin.key} · ${part?.title ?? 'pin'}${setting ? `, ${setting} setting` : ''}${drives}`,

@@ -4,6 +4,7 @@
 import { benchWords } from '../analysis/bench-words';
 import { pumpLosses } from '../analysis/losses';
 import { isNegative } from '../analysis/sign';
+import { spareAt, swingMissOf, swingNeedOf, weakestMoments } from '../analysis/swing-need';
 import type { BoardAnalysis, RailResult } from '../analysis/types';
 import { missOf } from '../analysis/window';
 import { inMode, volts } from '../analysis/words';
@@ -74,12 +75,26 @@ function verdict(result: RailResult): Pick<Card, 'answer' | 'state'> {
         }
       : { answer: `${formatQuantity(miss.voltage, 'V')}${inMode(miss.mode)}, ${edge}.`, state: 'bad' };
   }
+  const clipped = swingMissOf(result);
+  if (clipped) {
+    const edge = `${volts(clipped.by)} short of the ${formatQuantity(clipped.need.limit, 'V')} that its signal needs`;
+    return clipped.corner
+      ? {
+          answer: `${reached}, but ${formatQuantity(clipped.voltage, 'V')} at the weakest moment of its worst corner, ${edge}.`,
+          state: 'close',
+        }
+      : {
+          answer: `${formatQuantity(clipped.voltage, 'V')} at its weakest moment${inMode(clipped.mode)}, ${edge}.`,
+          state: 'bad',
+        };
+  }
   const needed = rail.needs?.voltage;
   const rippleState = ripple(result);
   if (rippleState !== undefined && rippleState.state !== 'good')
     return { answer: `${reached}, ${rippleState.words}.`, state: rippleState.state };
-  if (!needed || result.headroom === null) return { answer: `${reached}.`, state: 'neutral' };
-  const edge = isNegative(needed) ? needed.max : needed.min;
+  const signal = swingNeedOf(result)?.limit;
+  const edge = needed ? (isNegative(needed) ? needed.max : needed.min) : signal;
+  if (edge === undefined || result.headroom === null) return { answer: `${reached}.`, state: 'neutral' };
   const state = result.headroom < closeShare * Math.abs(edge) ? 'close' : 'good';
   return { answer: `${reached}, ${volts(result.headroom)} to spare at its worst corner.`, state };
 }
@@ -112,6 +127,8 @@ function rowsOf(result: RailResult): readonly (readonly string[])[] {
   const rows: (readonly string[])[] = [];
   const needed = rail.needs?.voltage;
   if (voltage) rows.push(['voltage', ...three(voltage), needed ? formatBand(needed, 'V') : '']);
+  const signal = swingRow(result);
+  if (signal) rows.push(signal);
   if (pump && result.ripple) {
     const allowed = rail.needs?.ripple;
     rows.push(['ripple', ...three(result.ripple), allowed ? formatQuantity(allowed.max, 'V') : '']);
@@ -121,6 +138,20 @@ function rowsOf(result: RailResult): readonly (readonly string[])[] {
     if (efficiency !== null) rows.push(['efficiency', '', formatPercent(efficiency, 2), '', '']);
   }
   return rows;
+}
+
+/** The weakest moment against what a signal needs. */
+function swingRow(result: RailResult): readonly string[] | undefined {
+  const need = swingNeedOf(result);
+  const moments = need && weakestMoments(result);
+  if (!need || !moments) return undefined;
+  const worst = moments.typical.reduce((a, b) =>
+    spareAt(need, b.voltage) < spareAt(need, a.voltage) ? b : a,
+  );
+  const ends = [voltsOrLess(moments.corner.voltage), voltsOrLess(worst.voltage), ''];
+  const sum = `${formatQuantity(need.swing.max, 'V')} + ${formatQuantity(need.headroom.max, 'V')}`;
+  const from = `${formatQuantity(need.limit, 'V')} (${sum}${need.headroomGiven ? '' : ' assumed'})`;
+  return ['weakest moment', ...(need.limit < 0 ? [...ends].reverse() : ends), from];
 }
 
 /** One line each under the picture, so that the answer, the table and the picture fit without scrolling. */

@@ -51,8 +51,8 @@ export function sizeRail(analysis: BoardAnalysis, name: string): Sizing {
   if (rail.origin?.kind !== 'pump')
     return refuse(`${name} is not made by a pump, so there are no capacitors to size.`);
   const { pump } = rail.origin;
-  if (!rail.needs?.voltage && !rail.needs?.ripple)
-    return refuse(`${name} has no needs to size for: write needs with a voltage or a ripple.`);
+  if (!rail.needs?.voltage && !rail.needs?.ripple && !rail.needs?.swing)
+    return refuse(`${name} has no needs to size for: write needs with a voltage, a ripple or a swing.`);
   if (!result.pump) return refuse(`${name} cannot be sized: ${result.because ?? 'it has no solution'}.`);
   const flying = pump.flying[0];
   const { reservoir } = pump;

@@ -3,7 +3,6 @@
  */
 import { list, map, notNegative, positive, quantity, row, shape, table, text } from './shape';
 
-const later = { computed: false } as const;
 export const sourceRow = row(text, 'Where the figures of this entry come from.', 'data sheet revision 4');
 
 export const testPointShape = shape('a test point', "One line of a data sheet's output table.", {
@@ -43,7 +42,7 @@ export const absolute = row(
   'Absolute maximum rating of the current of one pin.',
   '40 mA',
 );
-export const supplyRange = row(quantity('V', positive), 'Supply voltage it works in.', '1.8..5.5 V', later);
+export const supplyRange = row(quantity('V', positive), 'Supply voltage it works in.', '1.8..5.5 V');
 
 const pinKeys = {
   'high-resistance': highResistance,
@@ -84,7 +83,7 @@ export const totalShape = shape('the total of a chip', 'Limits of the sums over 
 
 export const chipPartShape = shape('the data of a chip', 'Data of a chip with pins.', {
   source: sourceRow,
-  supply: { ...supplyRange, computed: true },
+  supply: supplyRange,
   pins: row(
     map(pinDataShape),
     'Output data of every pin without an entry of its own.',

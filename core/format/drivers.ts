@@ -36,7 +36,11 @@ export const followerShape = shape('a follower stage', 'A complementary pair of 
 export const mosfetPairShape = shape('a MOS stage', 'A complementary pair of MOS transistors; it inverts.', {
   nmos: row(mosfet, 'The transistor to ground.', 'nmos-logic-level', needed),
   pmos: row(mosfet, 'The transistor to the supply.', 'pmos-logic-level', needed),
-  gate: row(quantity('ohm', notNegative), 'Resistor at the gates.', '22 ohm', { computed: false }),
+  gate: row(
+    quantity('ohm', notNegative),
+    'Resistor between the clock and both gates: it bounds the peaks and slows the edges.',
+    '22 ohm',
+  ),
 });
 
 export const gatesShape = shape('a gate stage', 'Logic gates in parallel; they are taken as inverters.', {

@@ -19,7 +19,6 @@ import {
   text,
 } from './shape';
 
-const later = { computed: false } as const;
 const needed = { required: true } as const;
 
 export const capacitorShape = shape('a capacitor', 'A capacitor.', {
@@ -125,15 +124,13 @@ export const needsShape = shape('the needs of a rail', 'What the rail must keep.
   start: row(quantity('s', positive), 'Time in which it must have come up.', '20 ms'),
   swing: row(
     quantity('V', positive),
-    'Signal swing that an amplifier on this rail must reach.',
+    'Peak that the signal of an amplifier on this rail must reach, as a magnitude: at every moment the rail holds at least that and `headroom`.',
     '4 V',
-    later,
   ),
   headroom: row(
     quantity('V', notNegative),
-    'What an amplifier needs between signal and rail.',
+    'What an amplifier needs between signal and rail; if left out, that of the usual bipolar single-supply one.',
     '1.2 V',
-    later,
   ),
   discharge: row(
     quantity('s', positive),
@@ -144,7 +141,11 @@ export const needsShape = shape('the needs of a rail', 'What the rail must keep.
 
 export const amplifierShape = shape('an amplifier', 'Operational amplifiers as a load.', {
   quiescent: row(quantity('A', notNegative), 'Current without signal, each.', '1.2 mA', needed),
-  output: row(quantity('A', notNegative), 'Output current, each.', '0.5 mA'),
+  output: row(
+    quantity('A', notNegative),
+    'Output current, each; it counts as flowing all the time, the cautious reading.',
+    '0.5 mA',
+  ),
   count: row(quantity('1', { above: 0, whole: true }), 'How many of them; one if left out.', '2'),
 });
 
@@ -155,7 +156,7 @@ export const loadShape = shape(
     current: row(quantity('A', notNegative), 'A steady current, as a magnitude.', '1.2 mA'),
     resistance: row(quantity('ohm', positive), 'A resistance to ground.', '47 kohm'),
     power: row(quantity('W', notNegative), 'A steady power.', '10 mW'),
-    amplifier: row(map(amplifierShape), amplifierShape.doc, '{ quiescent: 1.2 mA, count: 2 }', later),
+    amplifier: row(map(amplifierShape), amplifierShape.doc, '{ quiescent: 1.2 mA, count: 2 }'),
     in: row(
       [name('modes'), list(row(name('modes'), 'A mode in which it draws.', 'active'))],
       'Modes in which it draws; all if left out.',

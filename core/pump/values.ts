@@ -50,6 +50,8 @@ export interface TransistorValues {
   readonly baseOhms: number;
   readonly collectorOhms: number;
   readonly emitterOhms: number;
+  /** Storage time of its data sheet, s: no part of the network; absent where it is not known. */
+  readonly storageSeconds?: number;
 }
 
 /** A stage of two transistors between a clock and the pump. */

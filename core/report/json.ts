@@ -67,14 +67,14 @@ export function toReport(
 
 /** The worst of the pumps behind the driver, figure by figure. */
 function driverReport({ uses }: DriverResult): DriverReport {
-  const worst = (figure: (use: DriverUse) => number | undefined) => {
-    const values = uses.map(figure).filter((value) => value !== undefined);
+  const worst = (figure: (use: DriverUse) => number | null | undefined) => {
+    const values = uses.map(figure).filter((value) => value !== undefined && value !== null);
     return values.length > 0 ? finite(Math.max(...values)) : null;
   };
   return {
     baseCurrent: worst(({ stage }) => stage?.baseCurrent),
     forcedGain: worst(({ stage }) => stage?.forcedGain),
-    dissipation: worst(({ stage }) => stage?.dissipation),
+    dissipation: worst(({ stage, pair }) => (stage ?? pair)?.dissipation),
     inputCurrent: worst(({ clockCurrent }) => clockCurrent),
   };
 }

@@ -2,6 +2,7 @@
  * The ledger's table of rails: what each reaches over tolerance and temperature, against what it needs.
  */
 
+import { swingMissOf, swingNeedOf } from '../analysis/swing-need';
 import type { BoardAnalysis, RailResult } from '../analysis/types';
 import { missOf } from '../analysis/window';
 import { formatPercent, formatQuantity } from '../quantity/write';
@@ -49,7 +50,7 @@ function rowOf(result: RailResult, palette: Palette): readonly Cell[] {
     { text: mark, paint },
     { text: rail.name, paint: palette.strong },
     ...(voltage === null ? [empty, { text: '?', paint: palette.faint }, empty] : three(voltage)),
-    { text: needed ? windowWords(needed) : '' },
+    { text: needed ? windowWords(needed) : signalWords(result) },
     needed && voltage && needed.min < needed.max ? { text: windowStrip(needed, voltage), paint } : empty,
     headroom === null ? empty : { text: formatQuantity(headroom, 'V', 2), paint },
     ripple === null || pump === undefined
@@ -89,17 +90,25 @@ function windowWords({ min, max }: { min: number; max: number }): string {
   return `${short(min)}..${short(max)}`;
 }
 
+/** A rail without a window but with a signal must hold that much at every moment. */
+function signalWords(result: RailResult): string {
+  const limit = swingNeedOf(result)?.limit;
+  return limit === undefined ? '' : windowWords({ min: limit, max: limit });
+}
+
 type State = 'good' | 'close' | 'bad' | 'neutral';
 
 function stateOf(result: RailResult): State {
   const { needs } = result.rail;
   if (result.pump?.points.some((point) => point.loadCurrent < 0.99 * point.askedCurrent)) return 'bad';
-  const misses = [missOf(result, 'weak'), missOf(result, 'strong')].filter((miss) => miss !== undefined);
+  const misses = [missOf(result, 'weak'), missOf(result, 'strong'), swingMissOf(result)].filter(
+    (miss) => miss !== undefined,
+  );
   const allowed = needs?.ripple?.max ?? Number.POSITIVE_INFINITY;
   const { typical = 0, max = 0 } = result.ripple ?? {};
   if (misses.some((miss) => miss.corner === undefined) || typical > allowed) return 'bad';
   if (misses.length > 0 || max > allowed) return 'close';
-  return result.voltage && (needs?.voltage || needs?.ripple) ? 'good' : 'neutral';
+  return result.voltage && (needs?.voltage || needs?.ripple || needs?.swing) ? 'good' : 'neutral';
 }
 
 function fromOf({ rail: { origin } }: RailResult): string {

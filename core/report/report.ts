@@ -23,7 +23,7 @@ export interface RailReport {
   /** Intercept of the load line at the operating point. */
   readonly openCircuit: number | null;
   readonly outputResistance: number | null;
-  /** Volts left at the worst corner above the lower edge of `needs.voltage` (in magnitude). */
+  /** Volts left at the worst corner above the lower edge of `needs.voltage` and above what `needs.swing` asks (in magnitude). */
   readonly headroom: number | null;
   readonly drops: readonly Drop[] | null;
   readonly startTime: number | null;

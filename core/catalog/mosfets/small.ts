@@ -12,6 +12,7 @@ export const nmosSmallSignal: MosfetData = {
   threshold: band(1, 1.7, 2.5, 'V', memory('250 uA drain current')),
   onResistance: band(1, 2, 5, 'ohm', memory('at 5 V of gate voltage', 'VGS = 5 V, 25 degC')),
   gateCharge: band(0.4e-9, 0.7e-9, 1e-9, 'C', memory('at 5 V of gate voltage')),
+  gateVoltage: exact(5, 'V', memory('where resistance and charge hold')),
   current: exact(0.2, 'A', memory('the lower of the usual ratings')),
 };
 
@@ -23,6 +24,7 @@ export const pmosSmallSignal: MosfetData = {
   threshold: band(0.8, 1.5, 2, 'V', memory('250 uA drain current')),
   onResistance: band(3, 6, 10, 'ohm', memory('at 5 V of gate voltage', 'VGS = -5 V, 25 degC')),
   gateCharge: band(0.5e-9, 0.9e-9, 1.3e-9, 'C', memory('at 5 V of gate voltage')),
+  gateVoltage: exact(5, 'V', memory('where resistance and charge hold')),
   current: exact(0.13, 'A', memory('rating')),
 };
 
@@ -34,6 +36,7 @@ export const nmosLogicLevel: MosfetData = {
   threshold: band(0.45, 0.75, 1.1, 'V', memory('250 uA drain current')),
   onResistance: band(0.02, 0.03, 0.05, 'ohm', memory('at 4.5 V of gate voltage', 'VGS = 4.5 V, 25 degC')),
   gateCharge: band(3e-9, 5e-9, 8e-9, 'C', memory('at 4.5 V of gate voltage')),
+  gateVoltage: exact(4.5, 'V', memory('where resistance and charge hold')),
   current: exact(3, 'A', memory('class value')),
 };
 
@@ -45,5 +48,6 @@ export const pmosLogicLevel: MosfetData = {
   threshold: band(0.45, 0.75, 1.1, 'V', memory('250 uA drain current')),
   onResistance: band(0.05, 0.08, 0.13, 'ohm', memory('at 4.5 V of gate voltage', 'VGS = -4.5 V, 25 degC')),
   gateCharge: band(4e-9, 7e-9, 11e-9, 'C', memory('at 4.5 V of gate voltage')),
+  gateVoltage: exact(4.5, 'V', memory('where resistance and charge hold')),
   current: exact(2, 'A', memory('class value')),
 };

@@ -3,7 +3,9 @@
  * scale from zero, with the needed window behind and the spread over tolerance on the output. Negative rails are
  * drawn by magnitude and labelled with their sign.
  */
+import { swingNeedOf } from '../../analysis/swing-need';
 import type { PumpResult, RailResult } from '../../analysis/types';
+import { type Band, exactly } from '../../quantity/figure';
 import { formatBand } from '../../quantity/write';
 import type { Picture, Theme } from '../card';
 import { type Inks, inks } from './inks';
@@ -21,7 +23,7 @@ const top = 20;
 export function voltsPicture(result: RailResult, pump: PumpResult, theme: Theme): Picture {
   const ink = inks[theme];
   const steps = stepsOf(pump);
-  const needed = result.rail.needs?.voltage;
+  const needed = neededOf(result);
   const edges = needed && [Math.abs(needed.min), Math.abs(needed.max)].sort((a, b) => a - b);
   const spread = spreadOf(pump);
   const most = Math.max(...steps.map((step) => step.to), spread[1], edges?.[1] ?? 0) * 1.02;
@@ -58,6 +60,12 @@ export function voltsPicture(result: RailResult, pump: PumpResult, theme: Theme)
     width,
     height,
   };
+}
+
+/** The window, or else what a signal needs at every moment. */
+function neededOf(result: RailResult): Band | undefined {
+  const limit = swingNeedOf(result)?.limit;
+  return result.rail.needs?.voltage ?? (limit === undefined ? undefined : exactly(limit));
 }
 
 function spreadOf(pump: PumpResult): readonly [number, number] {
@@ -164,7 +172,7 @@ function whisker(
 }
 
 function inWords(result: RailResult, steps: readonly Step[]): string {
-  const needed = result.rail.needs?.voltage;
+  const needed = neededOf(result);
   const words = steps.map((step) => `${step.name} ${step.value}`).join(', ');
   return `${result.rail.name}: ${words}${needed ? `; needs ${formatBand(needed, 'V')}` : ''}`;
 }

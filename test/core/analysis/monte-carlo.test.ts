@@ -28,6 +28,22 @@ rails: { v5: { supply: lab, needs: { voltage: 4.75..5.05 V }, loads: { x: 100 mA
     expect(v5.leading[0]!.correlation).toBeCloseTo(-1, 9);
   });
 
+  it('a supply that a signal of 3.75 V with 1 V of headroom stands on', () => {
+    // The same edge of 4.75 V, asked for by an amplifier: three quarters.
+    const result = yieldOf(
+      `supplies: { lab: { voltage: 5 V, resistance: 1..2..3 ohm } }
+rails: { v5: { supply: lab, needs: { swing: 3.75 V, headroom: 1 V }, loads: { x: 100 mA } } }`,
+      { samples },
+    );
+    expectShare(result.outcome!.met, samples, 0.75);
+    expect(railOf(result, 'v5').misses).toEqual({
+      low: samples - result.outcome!.met,
+      high: null,
+      ripple: null,
+    });
+    expect(result.notJudged).toEqual([]);
+  });
+
   it('a supply and a filter that give way to a load with a band', () => {
     // Behind 1 ohm, 5 V on 100..300 mA is even in 4.7..4.9 V: above 4.75 V three quarters, above 4.8 V half. Behind
     // 5 ohm more and 10 mA of its own, the filter loses another 50 mV.

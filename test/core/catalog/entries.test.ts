@@ -18,6 +18,7 @@ const unitOf: Readonly<Record<string, Unit>> = {
   fastest: 'Hz',
   gain: '1',
   gateCharge: 'C',
+  gateVoltage: 'V',
   highDrop: 'V',
   highResistance: 'ohm',
   heat: 'W',

@@ -1,6 +1,7 @@
 import { describe, it } from 'vitest';
 import { bench } from '../../support/bench-board';
 import { checkRule, checkSilent } from '../../support/check-rule';
+import { mosfetBoard, ownPair } from '../../support/mosfet-board';
 
 const pump = (series: string) =>
   `pump: { topology: inverter, drive: tick, diode: schottky-signal, ${series}flying: { value: 47 nF, kind: x7r }, reservoir: { value: 10 uF, kind: x7r } }`;
@@ -24,5 +25,18 @@ describe('pin-peak', () => {
       'pin-peak',
       `${bench.replace(', absolute: 40 mA', '')}  down:\n    ${pump('')}\n    loads: { bias: 8 mA }\n`,
     );
+  });
+
+  it('proposes a gate resistor where the peaks charge gates', () => {
+    // Ohm's law: 5 V over the 25 ohm of the pin and 25 ohm more are 100 mA; 40 mA want 125 ohm, 75 ohm more.
+    const pair = (gate: string) => mosfetBoard(`${ownPair('1 V', '1 ohm', '2 nC')}, gate: ${gate}`);
+    checkRule(
+      'pin-peak',
+      pair('25 ohm').replace(
+        'duty: 50 % }',
+        'duty: 50 % }\n#              ^^^^^^ warning pin-peak: They charge the gates of amp: about 82 ohm more',
+      ),
+    );
+    checkSilent('pin-peak', pair('120 ohm'));
   });
 });

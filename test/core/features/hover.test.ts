@@ -53,6 +53,18 @@ describe('hover on a rail', () => {
     expect(ripple?.answer).toContain('1.04 mV of ripple where 1 mV are allowed');
   });
 
+  it('sets the weakest moment against swing and headroom', () => {
+    const signal = (needs: string) =>
+      hoverAt(pointAt('up:', 1, board.replace('voltage: 8..10 V, ripple: 2 mV', needs)));
+    const fine = signal('swing: 7 V, headroom: 1.2 V');
+    expect(fine?.state).toBe('good');
+    expect(fine?.body).toMatch(/weakest moment \| 9\.\d+ V \| 9\.\d+ V \| {2}\| 8\.2 V \(7 V \+ 1\.2 V\)/);
+    const assumed = signal('swing: 8 V');
+    expect(assumed?.state).toBe('bad');
+    expect(assumed?.answer).toMatch(/at its weakest moment, .* short of the 9\.5 V that its signal needs\.$/);
+    expect(assumed?.body).toContain('9.5 V (8 V + 1.5 V assumed)');
+  });
+
   it('works on a reference to the rail as on its name', () => {
     const card = hoverAt(pointAt('v5, drive'));
     expect(card?.over).toBe('v5');

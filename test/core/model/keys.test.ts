@@ -117,7 +117,6 @@ clocks:
 drivers:
   stage: { input: a, rail: v5, push-pull: { npn: npn-a, pnp: pnp-a, base: { npn: 1 kohm, pnp: 1 kohm } } }
   pair: { input: a, rail: v5, mosfet-pair: { nmos: nmos-a, pmos: pmos-a, gate: 10 ohm } }
-  #                                                                      ^^^^ not-computed
   hcs: { input: a, rail: v5, gates: { part: gate-a, parallel: 2 } }
   pins: { input: a, pins: [mcu.GP14, mcu.GP15] }
 rails:
@@ -137,14 +136,11 @@ rails:
       reservoir: { value: 1 uF, kind: x7r }
       smoothing: { value: 1 uF, kind: x7r }
     needs: { voltage: 5..9 V, ripple: 1 V, start: 1 s, swing: 1 V, headroom: 1 V, discharge: 1 s }
-    #                                                  ^^^^^ not-computed
-    #                                                              ^^^^^^^^ not-computed
     bleeder: 1 Mohm
     loads:
       a: 10 mW
       b: { power: 10 mW, least: 4 V, most: 9 V }
       c: { amplifier: { quiescent: 1 mA } }
-      #    ^^^^^^^^^ not-computed
 bench: [{ rail: v5, load: 1 mA, voltage: 5 V }]
 waivers: [{ finding: rail-low, at: rails.vm, because: fine }]
 include: [a.yaml, b.yaml]

@@ -34,7 +34,6 @@ parts:
   transistors: { t: { polarity: npn, saturation: 1 fA, gain: 100 } }
   mosfets: { m: { channel: n, threshold: 1 V, on-resistance: 1 ohm } }
   gates: { g: { high-resistance: 9 ohm, supply: 2..6 V } }
-  #                                     ^^^^^^ not-computed
   timers: { t: { high-drop: 1 V } }
 `),
   );
