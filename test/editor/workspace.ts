@@ -40,7 +40,7 @@ export function diagnosticAt(
   code: string,
   range: vscode.Range,
 ): vscode.Diagnostic | undefined {
-  return ourDiagnostics(uri).find((one) => one.code === code && one.range.isEqual(range));
+  return ourDiagnostics(uri).find((one) => codeOf(one) === code && one.range.isEqual(range));
 }
 
 /** Where a piece of the text stands; it must be there once. */
@@ -53,4 +53,9 @@ export function rangeOf(document: vscode.TextDocument, piece: string): vscode.Ra
 
 export async function replace(editor: vscode.TextEditor, range: vscode.Range, text: string): Promise<void> {
   ok(await editor.edit((edit) => edit.replace(range, text)), 'the edit was accepted');
+}
+
+/** The code, whose page stands beside it. */
+export function codeOf({ code }: vscode.Diagnostic): string | number | undefined {
+  return typeof code === 'object' ? code.value : code;
 }

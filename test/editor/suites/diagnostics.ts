@@ -7,6 +7,7 @@ import { equal, eventually, ok, pause } from '../expect';
 import { test } from '../runner';
 import {
   closeEditor,
+  codeOf,
   diagnosticAt,
   fixture,
   openFixture,
@@ -33,7 +34,7 @@ export function diagnosticsTests(): void {
     );
     const severities = ['error', 'warning', 'information'];
     const shown = ourDiagnostics(document.uri).map((one) => [
-      one.code,
+      codeOf(one),
       severities[one.severity],
       document.offsetAt(one.range.start),
       document.offsetAt(one.range.end),
