@@ -6,6 +6,7 @@ import { runTests } from './runner';
 import { activationTests } from './suites/activation';
 import { diagnosticsTests } from './suites/diagnostics';
 import { hoverTests } from './suites/hover';
+import { includeTests } from './suites/include';
 import { quickFixTests } from './suites/quick-fix';
 import { sizeRailTests } from './suites/size-rail';
 import { yieldTests } from './suites/yield';
@@ -14,6 +15,7 @@ export async function run(): Promise<void> {
   activationTests();
   diagnosticsTests();
   hoverTests();
+  includeTests();
   quickFixTests();
   sizeRailTests();
   yieldTests();

@@ -51,7 +51,7 @@ export function diagnosticsTests(): void {
   test('the rail that misses its need is an error in the file', async () => {
     const { document } = await openFixture('rails.yaml');
     const finding = await eventually(
-      () => ourDiagnostics(document.uri).find(({ code }) => code === 'rail-low'),
+      () => ourDiagnostics(document.uri).find((one) => codeOf(one) === 'rail-low'),
       'rail-low is shown',
     );
     equal(finding.severity, vscode.DiagnosticSeverity.Error, 'severity');
@@ -66,7 +66,7 @@ export function diagnosticsTests(): void {
     await eventually(() => diagnosticAt(uri, 'unknown-key', range), 'unknown-key under the key');
     await replace(editor, new vscode.Range(1, 0, 2, 0), '');
     await eventually(
-      () => !ourDiagnostics(uri).some(({ code }) => code === 'unknown-key'),
+      () => !ourDiagnostics(uri).some((one) => codeOf(one) === 'unknown-key'),
       'unknown-key is gone once the key is',
     );
     await closeEditor();
@@ -88,7 +88,7 @@ export function diagnosticsTests(): void {
       );
     }
     await eventually(
-      () => ourDiagnostics(uri).some(({ code }) => code === 'unknown-key'),
+      () => ourDiagnostics(uri).some((one) => codeOf(one) === 'unknown-key'),
       'judged at the end',
     );
     counting.dispose();
@@ -118,7 +118,7 @@ export function diagnosticsTests(): void {
       const range = await misspell(editor);
       await pause(1000);
       equal(
-        ourDiagnostics(uri).some(({ code }) => code === 'unknown-key'),
+        ourDiagnostics(uri).some((one) => codeOf(one) === 'unknown-key'),
         false,
         'judged while typing',
       );

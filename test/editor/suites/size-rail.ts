@@ -5,7 +5,7 @@ import * as vscode from 'vscode';
 import { analyse, applyEdits, type Sizing, sizeRail } from '../../../core/index';
 import { equal, eventually, ok } from '../expect';
 import { test } from '../runner';
-import { closeEditor, openFixture, ourDiagnostics } from '../workspace';
+import { closeEditor, codeOf, openFixture, ourDiagnostics } from '../workspace';
 
 const command = 'railLedger.sizeRail';
 
@@ -24,7 +24,7 @@ export function sizeRailTests(): void {
     const comments = (text: string) => text.match(/#.*$/gm);
     equal(comments(after), comments(before), 'comments');
     await eventually(
-      () => !ourDiagnostics(document.uri).some(({ code }) => code === 'rail-low'),
+      () => !ourDiagnostics(document.uri).some((one) => codeOf(one) === 'rail-low'),
       'the rail meets its need afterwards',
     );
 
