@@ -33,6 +33,12 @@ export function storeOf(supply: Supply): Store | undefined {
   return supply.voltage && supply.capacity && plainStore(supply, supply.voltage, supply.capacity);
 }
 
+/** A clause: why a supply has no store. */
+export function whyEndless({ standard, voltage, name }: Supply): string {
+  if (standard) return 'a port does not run down';
+  return voltage ? 'its capacity is not given' : `the voltage of ${name} is not known`;
+}
+
 function batteryStore(supply: Supply, data: BatteryData): Store {
   const cells = supply.cells?.typical ?? 1;
   const { openVoltage, agedResistance, voltage } = data;

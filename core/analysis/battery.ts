@@ -9,8 +9,8 @@ import { type Store, storeOf } from './battery-store';
 import { boardDraw, type Draw, drawnFromSupply, railsOf } from './board-draw';
 import { weightedModes } from './board-modes';
 import type { CurrentCases } from './currents';
-import { type Consumer, largestConsumer } from './largest-consumer';
 import { type Gap, isGap } from './gap';
+import { type Consumer, largestConsumer } from './largest-consumer';
 import type { Memory } from './memory';
 import type { RailVoltages } from './rail-voltages';
 
@@ -83,7 +83,8 @@ export function batteryLife(site: BatterySite, supply: Supply): BatteryLife | Ga
     return found && runOf(found, { site, store, current, ohms, capacity, usable, selfCurrent });
   };
   const typical = run(draw.typical, 'typical');
-  if (!typical) return { because: `nothing draws from ${supply.name}, and it does not lose charge by itself` };
+  if (!typical)
+    return { because: `nothing draws from ${supply.name}, and it does not lose charge by itself` };
   const consumer = largestConsumer(site, railsOf(site.board, supply), typical.top.mode);
   return {
     supply,
@@ -125,7 +126,10 @@ function runOf(found: Discharge, { site, store, current, ohms, ...figures }: Run
             ohms: store.resistance(left, ohms),
           },
         }),
-    current: seconds > 0 ? whole / seconds : modes.reduce((sum, mode, k) => sum + mode.share * current(k, store.full), 0),
+    current:
+      seconds > 0
+        ? whole / seconds
+        : modes.reduce((sum, mode, k) => sum + mode.share * current(k, store.full), 0),
     ...figures,
     top: {
       ...named(name),

@@ -158,8 +158,11 @@ function kinks(samples: readonly Sample[]): number[] {
     const b = samples[k + 1]!;
     return [...a.spare].flatMap(([name, from]) => {
       const to = b.spare.get(name);
-      if (to === undefined || from === to || from * to >= 0) return [];
-      return [a.volts + ((b.volts - a.volts) * from) / (from - to)];
+      if (to === undefined || from === to || from * to > 0) return [];
+      const share = from / (from - to);
+      // Rounding must not make a second voltage out of one that is known.
+      if (share < 1e-6) return [a.volts];
+      return [share > 1 - 1e-6 ? b.volts : a.volts + share * (b.volts - a.volts)];
     });
   });
   const kept: number[] = [];

@@ -1,14 +1,13 @@
 /**
  * What takes most from a rail in a mode: down the tree of rails, always along the largest part, to a load or a chip.
  */
-import type { Load } from '../model/board';
+import type { Board, Load } from '../model/board';
+import type { Span } from '../text/span';
 import { activeIn } from './board-modes';
 import { consumersOf } from './consumers';
 import type { Currents } from './currents';
-import { regulatorInput } from './regulators';
 import type { RailVoltages } from './rail-voltages';
-import type { Board } from '../model/board';
-import type { Span } from '../text/span';
+import { regulatorInput } from './regulators';
 
 export interface Consumer {
   /** Of a load, a chip, or a rail itself where nothing on it is larger than what it loses. */
@@ -43,7 +42,9 @@ export function largestConsumer(
   let here = rails;
   // A rail cannot stand on itself, so that the way down is no longer than the list of rails.
   for (let depth = 0; depth <= site.board.rails.size; depth++) {
-    const parts = here.flatMap((rail) => partsOf(site, consumers, rail, mode).map((part) => ({ part, rail })));
+    const parts = here.flatMap((rail) =>
+      partsOf(site, consumers, rail, mode).map((part) => ({ part, rail })),
+    );
     const largest = parts.reduce<(typeof parts)[number] | undefined>(
       (a, b) => (b.part.amps > (a?.part.amps ?? 0) ? b : a),
       undefined,

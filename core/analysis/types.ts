@@ -359,7 +359,9 @@ export interface SupplyResult {
   readonly limit: Figure | null;
   readonly use: number | null;
   /** Mode by mode, at typical values and where everything takes most, A; null when not known. */
-  readonly modes: readonly { readonly mode?: string; readonly typical: number; readonly most: number }[] | null;
+  readonly modes:
+    | readonly { readonly mode?: string; readonly typical: number; readonly most: number }[]
+    | null;
   /** Of a supply that runs down: computed at the first call. */
   readonly life?: () => BatteryLife | Gap;
 }

@@ -51,20 +51,22 @@ export function discharge(cell: Cell, drains: readonly Drain[]): Discharge | und
   let seconds = 0;
   for (const [k, upper] of cell.knots.entries()) {
     const stop = failing(cell, drains, upper);
-    if (stop !== undefined) return { seconds, left: upper, ...(upper < nothingLeft ? {} : { endedBy: stop }), taken };
+    if (stop !== undefined)
+      return { seconds, left: upper, ...(upper < nothingLeft ? {} : { endedBy: stop }), taken };
     const lower = cell.knots[k + 1];
     if (lower === undefined) break;
     const { left, endedBy } = lastAlive(cell, drains, upper, lower);
     for (const { at, weight } of gaussPoints(left, upper)) {
-      const currents = drains.map(({ share, current }) => share * current(loaded(cell, current, at) ?? Number.NaN));
+      const currents = drains.map(
+        ({ share, current }) => share * current(loaded(cell, current, at) ?? Number.NaN),
+      );
       const drain = currents.reduce((sum, each) => sum + each, cell.selfCurrent);
       const time = (cell.charge * weight) / drain;
       if (!(time >= 0 && Number.isFinite(time))) return undefined;
       seconds += time;
       for (const [m, each] of currents.entries()) taken[m] = taken[m]! + each * time;
     }
-    if (endedBy !== undefined)
-      return { seconds, left, ...(left < nothingLeft ? {} : { endedBy }), taken };
+    if (endedBy !== undefined) return { seconds, left, ...(left < nothingLeft ? {} : { endedBy }), taken };
   }
   return { seconds, left: 0, taken };
 }
