@@ -67,7 +67,9 @@ function batteryStore(supply: Supply, data: BatteryData): Store {
 function plainStore({ resistance }: Supply, voltage: Figure, capacity: Figure): Store {
   const negative = voltage.typical < 0;
   const sizes = [Math.abs(voltage.min), Math.abs(voltage.max)];
-  const [empty, full] = [Math.min(...sizes), Math.max(...sizes)];
+  // A band that reaches zero is no battery's: it has no end that could be computed.
+  const empty = voltage.min * voltage.max > 0 ? Math.min(...sizes) : 0;
+  const full = Math.max(...sizes);
   const course = [
     { left: 1, volts: full },
     { left: 0.5, volts: Math.abs(voltage.typical) },
@@ -79,7 +81,7 @@ function plainStore({ resistance }: Supply, voltage: Figure, capacity: Figure): 
     selfDischarge: exactly(0),
     negative,
     full,
-    end: full > empty ? empty : null,
+    end: full > empty || empty === 0 ? empty : null,
     knots: [1, 0.5, 0],
     open: curve(course, ({ volts }) => volts),
     resistance: (_, which) => resistance?.[which] ?? 0,

@@ -23,7 +23,7 @@ export function endWords(
   const end = store.end === null ? undefined : formatQuantity(store.end, 'V');
   if (end === undefined) return `its resistance lets no more through ${load}`;
   if (!(seconds > 0)) return `even full it does not hold ${end} ${load}`;
-  return `it falls to ${end} ${load}, with ${formatPercent(left, 2)} of its charge left`;
+  return `it falls to ${end} ${load}, ${formatPercent(left, 2)} of its charge left`;
 }
 
 /** `220 mAh of the file, 85 % of them counted`. */

@@ -147,12 +147,12 @@ function drawOf(
   store: Store,
 ): { typical: Draw; most: Draw | null; samples: readonly number[] } | Gap {
   const { end, full, negative } = store;
+  const rails = railsOf(board, supply);
+  const modes = weightedModes(board);
+  const typical = modes.map(({ name }) => drawnFromSupply(rails, currents, name));
+  if (typical.includes(null)) return { because: `the current out of ${supply.name} is not known` };
   if (end === null) {
-    const rails = railsOf(board, supply);
-    const modes = weightedModes(board);
-    const typical = modes.map(({ name }) => drawnFromSupply(rails, currents, name));
     const most = modes.map(({ name }) => drawnFromSupply(rails, currents.most, name));
-    if (typical.includes(null)) return { because: `the current out of ${supply.name} is not known` };
     return {
       typical: (mode) => typical[mode] ?? Number.NaN,
       most: most.includes(null) ? null : (mode) => most[mode] ?? Number.NaN,

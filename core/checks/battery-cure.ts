@@ -6,9 +6,8 @@ import { formatPercent, formatQuantity } from '../quantity/write';
 
 /** One sentence, or none when nothing of the kind would do. `wanted` in seconds. */
 export function batteryCure(life: BatteryLife, run: Run, wanted: number): readonly string[] {
-  // Nothing runs from it at all: neither charge nor time is what it lacks.
-  if (!(run.seconds > 0))
-    return ['A battery of more cells or of less resistance, or a lighter load, would carry it.'];
+  // Not even a full one carries the load: neither charge nor time is what it lacks.
+  if (!(run.seconds > 0)) return [];
   const { usable, left, capacity, current, selfCurrent } = run;
   // Part of the nameplate that this board takes out, and what is lost in the time that is wanted.
   const takes = usable * (1 - left);

@@ -67,14 +67,16 @@ function judge({ supply, life }: SupplyResult): readonly Finding[] {
       ? ''
       : ' with the smallest capacity, the most current and the highest resistance together';
   const told = needed
-    ? `where ${formatDuration(wanted)} are needed`
-    : 'less than a day; write `life` when that is enough';
+    ? `, where ${formatDuration(wanted)} are needed`
+    : run.seconds > 0
+      ? ', less than a day; write `life` when that is enough'
+      : '';
   return [
     {
       ...place,
       severity,
       message: [
-        `${supply.name} lasts ${lifeWords(run)}${corner}, ${told}: ${endWords(found, run)} (${chargeWords(found, run)}).`,
+        `${supply.name} lasts ${lifeWords(run)}${corner}${told}: ${endWords(found, run)} (${chargeWords(found, run)}).`,
         ...topWords(found, run),
         ...(run.ended && run.left > much ? [strandedWords(found, run)] : []),
         ...batteryCure(found, run, wanted),
@@ -98,7 +100,8 @@ function verdictOf({ typical, least }: BatteryLife, needed: Figure | undefined):
   const short = (run: Run, wanted: number) => run.seconds < wanted * (1 - 1e-9);
   if (!needed) {
     if (!short(typical, aDay)) return undefined;
-    return { run: typical, severity: 'information', wanted: aDay, source: 'common practice, no source' };
+    const severity = typical.seconds > 0 ? 'information' : 'warning';
+    return { run: typical, severity, wanted: aDay, source: 'common practice, no source' };
   }
   const wanted = needed.min;
   const source = 'charge balance over the discharge';
@@ -121,7 +124,7 @@ function topWords({ consumer }: BatteryLife, { top, current }: Run): readonly st
 function strandedWords({ store }: BatteryLife, { ended, left }: Run): string {
   const { amps, ohms } = ended!;
   const drop = formatQuantity(amps * ohms, 'V', 2);
-  return `Its resistance limits it: ${formatQuantity(amps, 'A')} through ${formatQuantity(ohms, 'ohm', 2)} take ${drop} from the ${formatQuantity(store.open(left), 'V')} that it still has. Cells in parallel or of lower resistance, or a large capacitor across it that carries the pulse, win the rest.`;
+  return `Its resistance limits it: ${formatQuantity(amps, 'A')} through ${formatQuantity(ohms, 'ohm', 2)} take ${drop} from the ${formatQuantity(store.open(left), 'V')} that it still has. Cells in parallel or of lower resistance, or a large capacitor across it that carries the pulse, would make use of the rest.`;
 }
 
 function related({ consumer }: BatteryLife): readonly Related[] {

@@ -72,8 +72,11 @@ const shares: ReadonlySet<string> = new Set([
   'self-discharge a year',
 ]);
 
-function bandInPercent({ min, max }: Figure): string {
-  return min === max ? formatPercent(min) : `${formatPercent(min)} to ${formatPercent(max)}`;
+function bandInPercent({ min, typical, max }: Figure): string {
+  if (min === max) return formatPercent(min);
+  // A tolerance is about nothing; a share has a typical value worth naming.
+  const usual = min > 0 ? `, typically ${formatPercent(typical)}` : '';
+  return `${formatPercent(min)} to ${formatPercent(max)}${usual}`;
 }
 
 function pointOf(name: string, { current, voltage, supply }: TestPoint): Line {

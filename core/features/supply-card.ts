@@ -68,6 +68,7 @@ function useState(use: number | null): State {
 
 function lifeState(life: BatteryLife | undefined): State {
   const needed = life?.supply.life?.min;
+  if (life && !(life.typical.seconds > 0)) return 'bad';
   if (!life || needed === undefined) return 'neutral';
   if (life.typical.seconds < needed) return 'bad';
   return life.least && life.least.seconds < needed ? 'close' : 'good';

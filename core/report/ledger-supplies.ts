@@ -47,7 +47,7 @@ function lifeLines({ supply, life }: SupplyResult, palette: Palette): readonly s
       : (least?.seconds ?? needed) < needed
         ? palette.close
         : palette.good;
-  const worst = least ? `, ${lifeWords(least)} at worst` : '';
+  const worst = least && lifeWords(least) !== lifeWords(typical) ? `, ${lifeWords(least)} at worst` : '';
   const wanted = supply.life ? `, ${formatDuration(supply.life.min)} needed` : '';
   return [
     `  ${name} lasts ${paint(lifeWords(typical))}${worst}${wanted}`,
