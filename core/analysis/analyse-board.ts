@@ -7,11 +7,12 @@ import type { Board } from '../model/board';
 import { type BoardReading, readBoard } from '../model/build';
 import type { IncludeSource } from '../model/include';
 import { formatQuantity } from '../quantity/write';
+import { assumedCapacities } from './battery-store';
 import { benchResults } from './bench';
 import { weightedModes } from './board-modes';
-import { chipResults, currentBand, groupResults } from './chips';
+import { chipResults, groupResults } from './chips';
 import { clockSource } from './clock-source';
-import { boardCurrents, type CurrentCases } from './currents';
+import { boardCurrents } from './currents';
 import { driverResults, unknownGates } from './drivers';
 import { isGap } from './gap';
 import { Memory } from './memory';
@@ -20,9 +21,10 @@ import { pinResults } from './pins';
 import { plainBand, type RailVoltages, railVoltages } from './rail-voltages';
 import { railResults } from './rails';
 import { regulatorResults } from './regulators';
-import { supplyResistance, supplyVoltage } from './supply-voltage';
+import { supplyResults } from './supplies';
+import { supplyResistance } from './supply-voltage';
 import { assumedHeadrooms } from './swing-need';
-import type { BoardAnalysis, ClockResult, SupplyResult } from './types';
+import type { BoardAnalysis, ClockResult } from './types';
 
 /** `file` is only a name for reports; `text` has no byte-order mark. */
 export function analyseBoard(
@@ -62,13 +64,14 @@ export function computeBoard(
     clocks: clockResults(board, solved),
     drivers,
     regulators: regulatorResults(board, solved, currents),
-    supplies: supplyResults(board, currents),
+    supplies: supplyResults({ board, solved, currents, memory }),
     bench: once(() => benchResults({ board, solved, memory })),
     balance: balances.length > 0 ? Math.max(...balances) : null,
     problems: [
       ...gapFindings(solved),
       ...assumedDraws(board),
       ...assumedResistances(board),
+      ...assumedCapacities(board),
       ...averagedPowers(board, solved),
       ...assumedHeadrooms(rails),
       ...unknownGates(drivers),
@@ -166,37 +169,6 @@ function clockResults(board: Board, solved: RailVoltages): Map<string, ClockResu
       duty: opposite ? { min: 1 - duty.max, typical: 1 - duty.typical, max: 1 - duty.min } : plainBand(duty),
       high: top ? top.typical - output.highDrop.typical : null,
       low: output.lowVolts.typical,
-    });
-  }
-  return results;
-}
-
-function supplyResults(board: Board, currents: CurrentCases): Map<string, SupplyResult> {
-  const modes = weightedModes(board);
-  const results = new Map<string, SupplyResult>();
-  for (const supply of board.supplies.values()) {
-    const rails = [...board.rails.values()].filter(
-      (rail) => rail.origin?.kind === 'supply' && rail.origin.supply.name === supply.name,
-    );
-    const found = supplyVoltage(supply);
-    const voltage = found && plainBand(found);
-    const current = currentBand(modes, currents, (of, mode) => {
-      let sum = 0;
-      for (const rail of rails) {
-        const part = of.rail(rail.name, mode);
-        if (part === null) return null;
-        sum += part;
-      }
-      return sum;
-    });
-    const limit = supply.current ?? supply.standard?.data?.current ?? supply.battery?.data?.current ?? null;
-    results.set(supply.name, {
-      supply,
-      voltage,
-      current,
-      power: voltage && current ? voltage.typical * current.typical : null,
-      limit,
-      use: current && limit ? current.max / limit.min : null,
     });
   }
   return results;

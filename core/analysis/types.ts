@@ -7,8 +7,10 @@ import type { Finding } from '../checks/finding';
 import type { BenchPoint, Chip, Clock, Driver, Rail, Regulator, Supply } from '../model/board';
 import type { BoardReading } from '../model/build';
 import type { Band, Figure, Unit } from '../quantity/figure';
+import type { BatteryLife } from './battery';
 import type { ClockSource } from './clock-source';
 import type { LoadPoint, Waveform } from './curves';
+import type { Gap } from './gap';
 import type { GateDrive } from './mosfet-stage';
 
 /** One quantity of a corner and the end of its band at which it was taken. */
@@ -356,6 +358,12 @@ export interface SupplyResult {
   readonly power: number | null;
   readonly limit: Figure | null;
   readonly use: number | null;
+  /** Mode by mode, at typical values and where everything takes most, A; null when not known. */
+  readonly modes:
+    | readonly { readonly mode?: string; readonly typical: number; readonly most: number }[]
+    | null;
+  /** Of a supply that runs down: computed at the first call. */
+  readonly life?: () => BatteryLife | Gap;
 }
 
 /** A measured quantity beside its prediction at the same load. Voltages carry the rail's sign. */

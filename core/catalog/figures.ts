@@ -3,7 +3,7 @@
  * limit; the rules that turn such a limit into a band stand here once, so that every part uses the same ones.
  */
 import { type Band, type Figure, figure, type Origin, type Unit } from '../quantity/figure';
-import type { TestPoint } from './part';
+import type { OpenPoint, ResistancePoint, TestPoint } from './part';
 
 /** Share of a guaranteed output drop that a typical part shows at 25 degC, and the share of the best part. */
 export const typicalShare = 0.5;
@@ -73,6 +73,25 @@ export function pointFromDrops(
     voltage: figure(voltage, 'V', origin),
     supply: exact(supplyV, 'V', origin),
   };
+}
+
+/** Open voltages of a cell in equal steps of its charge, from full to empty. */
+export function openCurve(volts: readonly number[], origin: Origin): readonly OpenPoint[] {
+  const steps = volts.length - 1;
+  return volts.map((value, k) => ({ left: (steps - k) / steps, volts: exact(value, 'V', origin) }));
+}
+
+/** Resistance of a cell by its charge left: `[left, min, typical, max]`, ohm, from full to empty. */
+export function resistanceCurve(
+  rows: readonly (readonly [left: number, min: number, typical: number, max: number])[],
+  origin: Origin,
+): readonly ResistancePoint[] {
+  return rows.map(([left, min, typical, max]) => ({ left, ohms: band(min, typical, max, 'ohm', origin) }));
+}
+
+/** Milliampere-hours as the labels of cells print them, in coulomb. */
+export function milliampereHours(min: number, typical: number, max: number, origin: Origin): Figure {
+  return band(3.6 * min, 3.6 * typical, 3.6 * max, 'C', origin);
 }
 
 /** Origin of a printed limit whose typical value is filled in by the shares above. */

@@ -5,6 +5,7 @@
 import { alkaline } from './batteries/alkaline';
 import { liIon } from './batteries/li-ion';
 import { lithiumCoin } from './batteries/lithium-coin';
+import { nimh } from './batteries/nimh';
 import { c0g, x5r, x7r, y5v } from './capacitors/ceramic';
 import { aluminium, polymer, tantalum } from './capacitors/electrolytic';
 import { film } from './capacitors/film';
@@ -72,7 +73,7 @@ export const catalogue: Catalogue = {
   gates: [ac, ahc, hc, hcBusDriver, hcSchmitt, hcSchmittSingle, hcSingle, lvc, lvcSingle],
   timers: [bipolarAstable, cmosAstable],
   standards: [usb2Configured, usb2Unconfigured, usb3, usbC1500mA, usbC3A, usbCDefault],
-  batteries: [alkaline, liIon, lithiumCoin],
+  batteries: [alkaline, liIon, lithiumCoin, nimh],
 };
 
 /** The entry with that key, or undefined. */

@@ -138,6 +138,34 @@ export interface SupplyData extends PartEntry {
   readonly bulk?: Figure;
 }
 
+/** Open voltage of a cell at a share of its usable charge left, 1 full and 0 empty. */
+export interface OpenPoint {
+  readonly left: number;
+  readonly volts: Figure;
+}
+
+/** Internal resistance of a cell at a share of its usable charge left. */
+export interface ResistancePoint {
+  readonly left: number;
+  readonly ohms: Figure;
+}
+
+/** One cell of a kind of battery: a supply that runs down. */
+export interface BatteryData extends SupplyData {
+  /** Nameplate. */
+  readonly capacity: Figure;
+  /** Part of the nameplate that may be counted on. */
+  readonly usable: Figure;
+  /** Share of the nameplate that a cell loses by itself in a year of 8760 h. */
+  readonly selfDischarge: Figure;
+  /** From full to empty, straight lines between. */
+  readonly openVoltage: readonly OpenPoint[];
+  /** From full to empty, straight lines between. `resistance` is the one figure for a cell of unknown state. */
+  readonly agedResistance: readonly ResistancePoint[];
+  /** What can go wrong with it, in plain words. */
+  readonly caution: string;
+}
+
 export interface Catalogue {
   readonly chips: readonly ChipData[];
   readonly diodes: readonly DiodeData[];
@@ -148,5 +176,5 @@ export interface Catalogue {
   readonly timers: readonly TimerData[];
   readonly standards: readonly SupplyData[];
   /** Per cell. */
-  readonly batteries: readonly SupplyData[];
+  readonly batteries: readonly BatteryData[];
 }

@@ -2,6 +2,7 @@
  * All rules in one list, sorted by code: adding a rule is one file and one line. No rule depends on the order.
  */
 import type { BoardAnalysis } from '../analysis/types';
+import { batteryShortLife } from './battery-short-life';
 import { benchDisagrees } from './bench-disagrees';
 import { capacitorDerated } from './capacitor-derated';
 import { capacitorPolarity } from './capacitor-polarity';
@@ -41,6 +42,7 @@ import { supplyOverLimit } from './supply-over-limit';
 import { unused } from './unused';
 
 export const checks: readonly Check[] = [
+  batteryShortLife,
   benchDisagrees,
   capacitorDerated,
   capacitorPolarity,

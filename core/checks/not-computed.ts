@@ -2,6 +2,8 @@
  * Says once which figures of the report this version leaves empty, so that nobody waits for them or takes their
  * absence for a zero. Keys of the file without effect are reported where they are read.
  */
+import { whyEndless } from '../analysis/battery-store';
+import { isGap } from '../analysis/gap';
 import type { BoardAnalysis } from '../analysis/types';
 import type { Span } from '../text/span';
 import type { Check } from './check';
@@ -9,7 +11,6 @@ import type { Finding } from './finding';
 
 /** Fields of the report, with the words for them. */
 const emptyFields: readonly string[] = [
-  'life of batteries',
   'ripple, load line and drops of rails that neither a pump nor a filter makes',
 ];
 
@@ -20,10 +21,10 @@ export const notComputed: Check = {
   why: 'An empty figure must not be mistaken for a harmless one.',
   run: (analysis) => {
     const place = firstPump(analysis);
-    const bench = [...uncomparedBench(analysis), ...unjudged(analysis)];
-    if (place === undefined) return bench;
+    const others = [...unknownLives(analysis), ...uncomparedBench(analysis), ...unjudged(analysis)];
+    if (place === undefined) return others;
     return [
-      ...bench,
+      ...others,
       {
         code: 'not-computed',
         severity: 'information',
@@ -52,6 +53,27 @@ function unjudged(analysis: BoardAnalysis): readonly Finding[] {
       ];
     }),
   );
+}
+
+/** Batteries whose life nobody can tell, and capacities of what does not run down; a life that is needed is judged elsewhere. */
+function unknownLives(analysis: BoardAnalysis): readonly Finding[] {
+  return [...analysis.supplies.values()].flatMap(({ supply, life }): readonly Finding[] => {
+    const finding = (key: string, span: Span | undefined, message: string): Finding => ({
+      code: 'not-computed',
+      severity: 'information',
+      at: `${supply.path}${key}`,
+      span: span ?? supply.nameSpan,
+      message,
+    });
+    if (!life) {
+      if (!supply.capacity) return [];
+      const why = `This capacity has no effect: ${whyEndless(supply)}.`;
+      return [finding('.capacity', supply.capacity.span, why)];
+    }
+    const found = supply.life ? undefined : life();
+    if (!found || !isGap(found)) return [];
+    return [finding('', undefined, `The life of ${supply.name} is not computed: ${found.because}.`)];
+  });
 }
 
 /** Bench entries that are whole, but of a rail without a figure to set against them. */

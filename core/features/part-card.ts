@@ -1,8 +1,9 @@
 /**
  * The card of a catalogue entry, or of one of the file's own: every figure with its band and its origin.
  */
+import { deference } from '../analysis/battery-words';
 import { originWords } from '../analysis/words';
-import type { PartEntry, TestPoint } from '../catalog/part';
+import type { OpenPoint, PartEntry, ResistancePoint, TestPoint } from '../catalog/part';
 import type { Figure } from '../quantity/figure';
 import { formatBand, formatPercent, formatQuantity } from '../quantity/write';
 import type { Span } from '../text/span';
@@ -26,6 +27,7 @@ export function partCard(part: PartEntry, span: Span): Card {
     origins: [
       ...(few ? notes.map((note, k) => `${k + 1}: ${note}.`) : []),
       `Entry: ${part.source}.`,
+      ...('caution' in part ? [`Caution: ${part.caution} ${deference}`] : []),
       ...(figures.length > mostRows ? [`${figures.length - mostRows} more figures are left out here.`] : []),
     ],
   };
@@ -45,6 +47,7 @@ function figuresOf(data: object, prefix: string): readonly Line[] {
   return Object.entries(data).flatMap(([key, value]): readonly Line[] => {
     const name = `${prefix}${hyphened(key)}`;
     if (isFigure(value)) return [lineOf(name, value)];
+    if (isCurve(value)) return [curveOf(name, value)];
     if (Array.isArray(value))
       return value.flatMap((item) => (isTestPoint(item) ? [pointOf(name, item)] : []));
     // Settings and single pins repeat the common figures; the pin's own card shows them.
@@ -53,16 +56,27 @@ function figuresOf(data: object, prefix: string): readonly Line[] {
   });
 }
 
-function lineOf(name: string, figure: Figure): Line {
+function lineOf(key: string, figure: Figure): Line {
+  // The one figure whose name does not say that it counts over a time.
+  const name = key === 'self-discharge' ? `${key} a year` : key;
   const value =
     figure.unit === '1' && shares.has(name) ? bandInPercent(figure) : formatBand(figure, figure.unit);
   return { name, value, origin: originWords(figure.origin) };
 }
 
-const shares: ReadonlySet<string> = new Set(['tolerance', 'temperature', 'loss']);
+const shares: ReadonlySet<string> = new Set([
+  'tolerance',
+  'temperature',
+  'loss',
+  'usable',
+  'self-discharge a year',
+]);
 
-function bandInPercent({ min, max }: Figure): string {
-  return min === max ? formatPercent(min) : `${formatPercent(min)} to ${formatPercent(max)}`;
+function bandInPercent({ min, typical, max }: Figure): string {
+  if (min === max) return formatPercent(min);
+  // A tolerance is about nothing; a share has a typical value worth naming.
+  const usual = min > 0 ? `, typically ${formatPercent(typical)}` : '';
+  return `${formatPercent(min)} to ${formatPercent(max)}${usual}`;
 }
 
 function pointOf(name: string, { current, voltage, supply }: TestPoint): Line {
@@ -71,6 +85,28 @@ function pointOf(name: string, { current, voltage, supply }: TestPoint): Line {
     value: formatBand(voltage, 'V'),
     origin: originWords(voltage.origin),
   };
+}
+
+type CurvePoint = OpenPoint | ResistancePoint;
+
+/** All of a curve on one line: `4.2, 4.06 .. 3 V` at 100, 90 .. 0 %. */
+function curveOf(name: string, points: readonly CurvePoint[]): Line {
+  const figures = points.map((point) => ('volts' in point ? point.volts : point.ohms));
+  const lefts = points.map(({ left }) => `${Math.round(100 * left)}`);
+  const few = lefts.length <= 5 ? lefts.join(', ') : `${lefts[0]}, ${lefts[1]} .. ${lefts.at(-1)}`;
+  return {
+    name: `${name} at ${few} % left`,
+    value: figures.map(({ typical, unit }) => formatQuantity(typical, unit)).join(', '),
+    origin: originWords(figures[0]!.origin),
+  };
+}
+
+function isCurve(value: unknown): value is readonly CurvePoint[] {
+  if (!Array.isArray(value) || value.length === 0) return false;
+  return value.every(
+    (point) =>
+      typeof point === 'object' && point !== null && 'left' in point && ('volts' in point || 'ohms' in point),
+  );
 }
 
 /** As the file would write the key: `highResistance` is `high-resistance`. */

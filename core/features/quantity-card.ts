@@ -7,7 +7,7 @@ import type { Capacitor } from '../model/board';
 import type { ReadQuantity } from '../model/context';
 import type { Figure } from '../quantity/figure';
 import { unitFacts } from '../quantity/units';
-import { formatBand, formatPercent, formatQuantity } from '../quantity/write';
+import { formatBand, formatDuration, formatPercent, formatQuantity } from '../quantity/write';
 import type { Card } from './card';
 
 export function quantityCard(analysis: BoardAnalysis, quantity: ReadQuantity): Card {
@@ -51,12 +51,19 @@ function whatOf(figure: Figure): string {
 }
 
 function whole(figure: Figure): string {
-  if (!isShare(figure)) return formatBand(figure, figure.unit);
   const { min, max } = figure;
+  if (isLong(figure) && min === max) return formatDuration(min);
+  if (!isShare(figure)) return formatBand(figure, figure.unit);
   return min === max ? formatPercent(min) : `${formatPercent(min)} to ${formatPercent(max)}`;
 }
 
+/** Hours and days are not counted in seconds. */
+function isLong({ unit, min }: Figure): boolean {
+  return unit === 's' && min >= 120;
+}
+
 function one(value: number, figure: Figure): string {
+  if (isLong(figure)) return formatDuration(value);
   return isShare(figure) ? formatPercent(value) : formatQuantity(value, figure.unit);
 }
 

@@ -36,7 +36,12 @@ export const supplyShape = shape(
     cells: row(quantity('1', { above: 0, whole: true }), 'Cells in series; one if left out.', '2'),
     current: row(quantity('A', positive), 'The most that may be drawn.', '500 mA'),
     resistance: row(quantity('ohm', notNegative), 'Internal resistance.', '120 mohm'),
-    capacity: row(quantity('C', positive), 'Charge of the battery.', '1200 mAh', later),
+    capacity: row(
+      quantity('C', positive),
+      'Charge of the battery; behind a plain `voltage` its band runs from full to empty.',
+      '1200 mAh',
+    ),
+    life: row(quantity('s', positive), 'Time that the battery must last.', '6000 h'),
     bulk: row(quantity('F', notNegative), 'Capacitance that the supply lets you connect.', '10 uF'),
   },
   ['standard', 'battery', 'voltage'],

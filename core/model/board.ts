@@ -3,6 +3,7 @@
  * Built from any text, however broken: what could not be read is absent here and stands in the issues.
  */
 import type {
+  BatteryData,
   CapacitorKind,
   ChipData,
   DiodeData,
@@ -42,12 +43,14 @@ export interface Entry {
 
 export interface Supply extends Entry {
   readonly standard?: Use<SupplyData>;
-  readonly battery?: Use<SupplyData>;
+  readonly battery?: Use<BatteryData>;
   readonly cells?: Figure;
   readonly voltage?: Figure;
   readonly current?: Figure;
   readonly resistance?: Figure;
   readonly capacity?: Figure;
+  /** Time that it must last. */
+  readonly life?: Figure;
   readonly bulk?: Figure;
 }
 

@@ -63,6 +63,8 @@ const rows: readonly Row[] = [
   { symbols: ['s'], unit: 's', prefixed: true },
   { symbols: ['min'], unit: 's', prefixed: false, factor: 60 },
   { symbols: ['h'], unit: 's', prefixed: false, factor: 3600 },
+  // The day of the SI brochure, 86 400 s; months and years have no one length.
+  { symbols: ['d', 'day', 'days'], unit: 's', prefixed: false, factor: 86_400 },
   { symbols: ['K'], unit: 'K', prefixed: true },
   { symbols: ['degC', '\u00b0C', '\u2103'], unit: 'K', prefixed: false, offset: icePointK },
   { symbols: ['W'], unit: 'W', prefixed: true },
@@ -129,6 +131,8 @@ const longNames: readonly (readonly [string, string])[] = [
   ['hertz', 'Hz'],
   ['second', 's'],
   ['sec', 's'],
+  ['minute', 'min'],
+  ['hour', 'h'],
   ['watt', 'W'],
   ['kelvin', 'K'],
   ['celsius', 'degC'],

@@ -3,6 +3,7 @@
  * something is not computed.
  */
 
+import { isGap } from '../analysis/gap';
 import { inrushPeak } from '../analysis/inrush-peak';
 import type {
   BoardAnalysis,
@@ -134,8 +135,10 @@ function clockReport({ frequency, duty, high, low }: ClockResult): ClockReport {
   return { frequency: band(frequency), duty: band(duty), high: finite(high), low: finite(low) };
 }
 
-function supplyReport({ current, power, use }: SupplyResult): SupplyReport {
-  return { current: band(current), power: finite(power), use: finite(use), life: null };
+function supplyReport({ current, power, use, life }: SupplyResult): SupplyReport {
+  const found = life?.();
+  const lasts = found && !isGap(found) ? found.typical.seconds : null;
+  return { current: band(current), power: finite(power), use: finite(use), life: finite(lasts) };
 }
 
 /** Each part at the pump's heaviest load. */

@@ -78,6 +78,7 @@ export interface SupplyReport {
   readonly current: Band | null;
   readonly power: number | null;
   readonly use: number | null;
+  /** s at typical values; null for what does not run down. */
   readonly life: number | null;
 }
 

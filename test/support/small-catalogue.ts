@@ -112,6 +112,18 @@ export const smallCatalogue: Catalogue = {
       title: 'Lithium-ion cell',
       source,
       voltage: given({ min: 3, typical: 3.7, max: 4.2 }, 'V'),
+      capacity: given(3600, 'C'),
+      usable: given(0.8, '1'),
+      selfDischarge: given(0.3, '1'),
+      openVoltage: [
+        { left: 1, volts: given(4.2, 'V') },
+        { left: 0, volts: given(3, 'V') },
+      ],
+      agedResistance: [
+        { left: 1, ohms: given(0.1, 'ohm') },
+        { left: 0, ohms: given(0.2, 'ohm') },
+      ],
+      caution: 'invented',
     },
   ],
 };

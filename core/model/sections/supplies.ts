@@ -27,6 +27,7 @@ export function suppliesOf(slot: Slot | undefined): Map<string, Supply> {
           current: figureOf(fields.at('current')),
           resistance: figureOf(fields.at('resistance')),
           capacity: figureOf(fields.at('capacity')),
+          life: figureOf(fields.at('life')),
           bulk: figureOf(fields.at('bulk')),
         })),
     });

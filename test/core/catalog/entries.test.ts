@@ -9,6 +9,7 @@ const unitOf: Readonly<Record<string, Unit>> = {
   average: 'A',
   baseResistance: 'ohm',
   bulk: 'F',
+  capacity: 'C',
   collectorResistance: 'ohm',
   current: 'A',
   draws: 'A',
@@ -30,6 +31,7 @@ const unitOf: Readonly<Record<string, Unit>> = {
   loss: '1',
   lowResistance: 'ohm',
   lowVoltage: 'V',
+  ohms: 'ohm',
   onResistance: 'ohm',
   peak: 'A',
   recommended: 'A',
@@ -38,6 +40,7 @@ const unitOf: Readonly<Record<string, Unit>> = {
   reverseGain: '1',
   rising: 'V',
   saturation: 'A',
+  selfDischarge: '1',
   sink: 'A',
   source: 'A',
   storage: 's',
@@ -47,7 +50,9 @@ const unitOf: Readonly<Record<string, Unit>> = {
   thresholdSupply: 'V',
   tolerance: '1',
   total: 'A',
+  usable: '1',
   voltage: 'V',
+  volts: 'V',
 };
 
 /** May be zero or below without being a slip. */
@@ -143,6 +148,42 @@ describe('capacitor kinds', () => {
   });
   it.each(catalogue.capacitors)('$key has a loss of one kind', (kind) => {
     expect([kind.esr, kind.loss].filter((figure) => figure !== undefined)).toHaveLength(1);
+  });
+});
+
+describe('batteries', () => {
+  it.each(catalogue.batteries)('$key runs down from full to empty, and its resistance rises', (battery) => {
+    const { voltage, openVoltage, agedResistance, resistance } = battery;
+    expect(openVoltage.map(({ left }) => left)).toEqual([1, 0.9, 0.8, 0.7, 0.6, 0.5, 0.4, 0.3, 0.2, 0.1, 0]);
+    expect(openVoltage[0]!.volts.typical).toBe(voltage.max);
+    expect(openVoltage.at(-1)!.volts.typical).toBe(voltage.min);
+    // The nominal voltage is one that it has on the way.
+    expect(openVoltage[1]!.volts.typical).toBeGreaterThan(voltage.typical);
+    for (const [i, point] of openVoltage.entries()) {
+      const before = openVoltage[i - 1];
+      if (before) expect(point.volts.typical).toBeLessThan(before.volts.typical);
+    }
+    expect([agedResistance[0]!.left, agedResistance.at(-1)!.left]).toEqual([1, 0]);
+    for (const [i, point] of agedResistance.entries()) {
+      const before = agedResistance[i - 1];
+      if (!before) continue;
+      expect(point.left).toBeLessThan(before.left);
+      for (const end of ['min', 'typical', 'max'] as const)
+        expect(point.ohms[end]).toBeGreaterThanOrEqual(before.ohms[end]);
+    }
+    // Two to three times as much near the end; makers' articles on coin cells have up to four.
+    const rise = agedResistance.at(-1)!.ohms.typical / agedResistance[0]!.ohms.typical;
+    expect(rise).toBeGreaterThanOrEqual(2);
+    expect(rise).toBeLessThanOrEqual(4);
+    expect(agedResistance[0]!.ohms.typical).toBeLessThanOrEqual(resistance!.typical);
+  });
+
+  it.each(catalogue.batteries)('$key can be counted on for 70 to 90 % of its label', (battery) => {
+    expect(battery.usable.min).toBeGreaterThanOrEqual(0.7);
+    expect(battery.usable.max).toBeLessThanOrEqual(0.9);
+    expect(battery.capacity.typical).toBeGreaterThan(0);
+    expect(battery.selfDischarge.typical).toBeGreaterThan(0);
+    expect(battery.caution).toMatch(/charge/);
   });
 });
 

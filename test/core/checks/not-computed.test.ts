@@ -36,6 +36,21 @@ bench:
     );
   });
 
+  it('says which capacities have no effect, and which battery has no life', () => {
+    checkRule(
+      'not-computed',
+      `supplies:
+  port: { standard: usb-3, capacity: 1 Ah }
+#                                    ^^^^ information not-computed: a port does not run down
+  pack: { voltage: 3..4 V, capacity: 1 Ah }
+# ^^^^ information not-computed: The life of pack is not computed: nothing draws from pack
+rails:
+  v5: { supply: port, loads: { x: 1 mA } }
+  vb: { supply: pack }
+`,
+    );
+  });
+
   it('is silent on a board without', () => {
     checkSilent(
       'not-computed',

@@ -141,6 +141,47 @@ describe('hover on the rest', () => {
     expect(hoverAt(pointAt('reservoir:'))?.answer).toMatch(/^Works/);
   });
 
+  const cell = `supplies:
+  cell: { battery: lithium-coin, capacity: 220 mAh, life: 6000 h }
+rails:
+  vb: { supply: cell, loads: { radio: { current: 10 mA, in: [send] }, clock: { current: 5 uA, in: [wait] } } }
+modes: { send: { share: 1 % }, wait: { share: 99 % } }
+`;
+
+  it('shows how long a battery lasts, what ends it, where the figures come from, and a caution', () => {
+    const card = hoverAt(pointAt('cell:', 1, cell));
+    expect(card?.state).toBe('bad');
+    expect(card?.answer).toMatch(/; lasts 7[0-4]\.\d days\.$/);
+    expect(card?.body).toMatch(/until \| it falls to 2 V under the load of mode send/);
+    expect(card?.body).toContain('needed | 250 days');
+    expect(card?.body).toContain('capacity | 220 mAh of the file, 85 % of it counted on');
+    // 220 mAh / 100 / 8760 h, worked by hand: 0.2511 uA.
+    expect(card?.body).toContain('self-discharge | as 251 nA');
+    expect(card?.body).toMatch(/^Self-discharge: from memory: confirm; about 1 % a year\.$/m);
+    expect(card?.body).toMatch(
+      /^Caution: A lithium coin cell must never be charged.*safety rules of your place/m,
+    );
+    expect(hoverAt(pointAt('cell:', 1, cell.replace('6000 h', '20 d')))?.state).not.toBe('bad');
+    expect(hoverAt(pointAt('6000 h', 1, cell))?.answer).toBe('250 days.');
+  });
+
+  it('warns of the short circuit of a lithium-ion cell', () => {
+    const card = hoverAt(pointAt('cell:', 1, cell.replace('lithium-coin', 'li-ion')));
+    expect(card?.body).toMatch(/^Caution: .*tens of amperes.*licensed/m);
+    expect(hoverAt(pointAt('lab:'))?.body).not.toContain('Caution');
+  });
+
+  it('shows the discharge of a kind of battery with its origin', () => {
+    const body = hoverAt(pointAt('lithium-coin', 1, cell))?.body ?? '';
+    expect(body).toMatch(/^capacity \| 200\.\.220\.\.235 mAh \|/m);
+    expect(body).toMatch(/^usable \| 70 % to 90 %, typically 85 % \| common practice/m);
+    expect(body).toMatch(
+      /^open-voltage at 100, 90 \.\. 0 % left \| 3\.3 V, .*, 2 V \| from memory: confirm/m,
+    );
+    expect(body).toMatch(/^aged-resistance at 100, 50, 20, 0 % left \| 10 ohm, .*, 40 ohm \|/m);
+    expect(body).toMatch(/^Caution: /m);
+  });
+
   it('says nothing on names that the user gave and on blank places', () => {
     expect(hoverAt(pointAt('lamp'))).toBeUndefined();
     expect(hoverAt(`$0${board}`)).toBeUndefined();

@@ -65,7 +65,7 @@ test('keys that exclude each other exist', () => {
 describe('the keys are those of the language', () => {
   test.each([
     [[], 'bench board chips clocks conditions drivers include modes parts rails supplies waivers'],
-    [['supplies', 'x'], 'battery bulk capacity cells current resistance standard voltage'],
+    [['supplies', 'x'], 'battery bulk capacity cells current life resistance standard voltage'],
     [['chips', 'x'], 'draws part pins rail'],
     [['chips', 'x', 'pins', 'x'], 'sinks sources strength'],
     [['clocks', 'x'], 'astable duty external fall frequency inverse-of pin rail rise schmitt timer'],

@@ -106,7 +106,6 @@ test('effects that are not computed: one finding for each use, one for a whole e
   checkFindings(`
 supplies:
   p: { voltage: 5 V, resistance: 1 ohm, capacity: 1 Ah, bulk: 10 uF, current: 1 A }
-  #                                     ^^^^^^^^ not-computed
 chips: { mcu: { part: mcu-a, rail: v5 } }
 clocks:
   a: { pin: mcu.GP14, timer: { input: 1 MHz, top: 99 }, rise: 1 ns, fall: 1 ns }

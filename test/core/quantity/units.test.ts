@@ -47,6 +47,8 @@ describe('units', () => {
     ['1 s', 's', 1],
     ['1 min', 's', 60],
     ['1 h', 's', 3600],
+    ['1 d', 's', 86_400],
+    ['2 days', 's', 172_800],
     ['1 K', 'K', 1],
     ['0 degC', 'K', 273.15],
     ['25 °C', 'K', 298.15],
@@ -84,7 +86,21 @@ describe('units', () => {
       'Ah',
       'S',
     ];
-    const alone = ['min', 'h', 'degC', '\u00b0C', '\u2103', 'K/W', 'degC/W', '\u00b0C/W', '%', 'ppm'];
+    const alone = [
+      'min',
+      'h',
+      'd',
+      'day',
+      'days',
+      'degC',
+      '\u00b0C',
+      '\u2103',
+      'K/W',
+      'degC/W',
+      '\u00b0C/W',
+      '%',
+      'ppm',
+    ];
     expect(spellings.size).toBe(rows.length * bare.length + alone.length);
   });
   test('dimensions are consistent: ohm = V/A, F = A s/V, H = V s/A, W = V A, C = A s, S = A/V', () => {
@@ -120,6 +136,8 @@ test.each([
   ['kilohertz', 'Hz', 'kHz'],
   ['megaohm', 'ohm', 'Mohm'],
   ['MHZ', 'Hz', 'MHz'],
+  ['hours', 's', 'h'],
+  ['minutes', 's', 'min'],
 ] as const)('%s for %s is meant as %s', (written, unit, meant) => {
   expect(suggestSpelling(written, unit)).toBe(meant);
 });

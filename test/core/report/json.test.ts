@@ -162,4 +162,16 @@ describe('report', () => {
       expect(empty.balance).toBeNull();
     }
   });
+
+  it('has the life of a battery in seconds, and null for what does not run down', () => {
+    const { supplies } = analyse(
+      `supplies: { cell: { voltage: 3 V, capacity: 1 Ah }, lab: { voltage: 5 V } }
+rails: { vb: { supply: cell, loads: { x: 10 mA } }, v5: { supply: lab, loads: { x: 10 mA } } }
+`,
+      { file: 'rails.yaml' },
+    ).report;
+    // 1 Ah over 10 mA: 100 h.
+    expect(supplies['cell']?.life).toBeCloseTo(360_000, 6);
+    expect(supplies['lab']?.life).toBeNull();
+  });
 });

@@ -72,4 +72,25 @@ describe('ledger', () => {
     expect(ledger('')).toContain('lamp/rails.yaml');
     expect(ledger('{')).toContain('syntax');
   });
+
+  it('says how long a battery lasts, until what, and whose capacity that is', () => {
+    const text = `supplies: { cell: { battery: lithium-coin, capacity: 220 mAh, life: 100 d } }
+rails: { vb: { supply: cell, loads: { radio: { current: 10 mA, in: [send] }, clock: { current: 5 uA, in: [wait] } } } }
+modes: { send: { share: 1 % }, wait: { share: 99 % } }
+`;
+    const lines = ledger(text, 80).split('\n');
+    const at = lines.findIndex((line) => line.startsWith('  cell lasts'));
+    // Charge balance by hand, 104.95 uA and 220 mAh * 0.85: 74.2 days, less what 10 mA leave behind at the end.
+    expect(lines[at]).toMatch(/^ {2}cell lasts 7[0-4]\.\d days, \d\d\.\d days at worst, 100 days needed$/);
+    expect(lines[at + 1]).toMatch(/^ {4}until it falls to 2 V under the load of mode send, [\d.]+ % of its/);
+    expect(lines[at + 2]).toBe('    220 mAh of the file, 85 % of it counted on');
+    expect(ledger(text.replace('capacity: 220 mAh, ', ''))).toContain('220 mAh of the catalogue');
+    for (const line of lines.slice(at, at + 3)) expect(line.length).toBeLessThanOrEqual(80);
+  });
+
+  it('says why the life of a battery is not computed', () => {
+    expect(
+      ledger('supplies: { cell: { voltage: 3 V, capacity: 1 Ah } }\nrails: { vb: { supply: cell } }\n'),
+    ).toContain('  how long cell lasts is not computed: nothing draws from cell');
+  });
 });
