@@ -19,7 +19,6 @@ import {
   text,
 } from './shape';
 
-const later = { computed: false } as const;
 const needed = { required: true } as const;
 
 export const supplyShape = shape(
