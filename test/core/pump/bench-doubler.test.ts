@@ -6,10 +6,10 @@
  */
 import { describe, expect, it } from 'vitest';
 import { catalogue, findPart } from '../../../core/catalog';
-import { aluminium } from '../../../core/catalog/capacitors/electrolytic';
+import { aluminium } from '../../../core/catalog/capacitors/aluminium';
 import { siliconSwitching } from '../../../core/catalog/diodes/silicon-switching';
 import type { TransistorData } from '../../../core/catalog/part';
-import { bipolarAstable } from '../../../core/catalog/timers/astable';
+import { bipolarAstable } from '../../../core/catalog/timers/bipolar-astable';
 import { astableTiming } from '../../../core/compute/astable-timing';
 import { esrFromLoss } from '../../../core/compute/esr-from-loss';
 import { referenceTemperature, thermalVoltage } from '../../../core/compute/thermal-voltage';

@@ -1,17 +1,7 @@
-/** Bipolar pair of the 500 to 800 mA class: for pumps that ask more than a small-signal pair saturates for. */
+/** NPN transistor, 500 to 800 mA. */
 import { band, exact, memory } from '../figures';
 import type { TransistorData } from '../part';
-
-const model = memory('class values for a transport model, scaled from the small-signal pair', '25 degC');
-const gain = band(100, 160, 250, '1', memory('gain class at 100 mA'));
-// Makes 0.7 V of saturation voltage at 500 mA with 50 mA of base current the worst case.
-const collector = band(
-  0.3,
-  0.6,
-  1.1,
-  'ohm',
-  memory('from at most 0.7 V at 500 mA with 50 mA of base current'),
-);
+import { collector, gain, model } from './medium-power-class';
 
 export const npn500mA: TransistorData = {
   key: 'npn-500ma',
@@ -26,11 +16,4 @@ export const npn500mA: TransistorData = {
   emitterResistance: exact(0.05, 'ohm', model),
   storage: band(100e-9, 300e-9, 600e-9, 's', memory('class value')),
   current: exact(0.5, 'A', memory('the lower of the usual ratings 500 and 800 mA')),
-};
-
-export const pnp500mA: TransistorData = {
-  ...npn500mA,
-  key: 'pnp-500ma',
-  title: 'PNP transistor, 500 to 800 mA',
-  polarity: 'pnp',
 };
