@@ -163,7 +163,7 @@ describe('pumps of the language', () => {
 it('says which resistance of a supply it took from the catalogue', () => {
   const check = (resistance: string) =>
     analyse(
-      `supplies: { cell: { battery: li-ion${resistance} } }\nrails: { vb: { supply: cell, loads: { x: 10 mA } } }\n`,
+      `supplies: { cell: { battery: li-ion, capacity: 1 Ah${resistance} } }\nrails: { vb: { supply: cell, loads: { x: 10 mA } } }\n`,
       {
         file: 'rails.yaml',
       },
