@@ -66,6 +66,7 @@ export function railSolver(
   const models = new Map<string, readonly ModeModel[]>();
   const parts = new Map<string, readonly PumpParts[]>();
   const open = new Set<string>();
+  const besides = railsBySupply(board);
   const voltage: RailVoltage = (name) => {
     const known = voltages.get(name);
     if (known) return known;
@@ -87,15 +88,20 @@ export function railSolver(
       if (isGap(band)) return band;
       const supply = supplyOf(board, name);
       if (!supply?.ohms) return { name, band: rounded(band) };
-      const all = drawn.total(name, mode);
+      const all = onSupply(name, mode);
       const own = drawn.byPump(name, mode, rail.name);
       const others = { min: all.min - own.min, typical: all.typical - own.typical, max: all.max - own.max };
       return { name, band: rounded(sagged(supply.band, supply.ohms, others)), ohms: supply.ohms };
     },
   });
+  /** Out of the supply behind a rail: all rails on it pull it down together. */
+  const onSupply = (name: string, mode: string | undefined): Band =>
+    (besides.get(name) ?? [name])
+      .map((each) => drawn.total(each, mode))
+      .reduce((a, b) => ({ min: a.min + b.min, typical: a.typical + b.typical, max: a.max + b.max }));
   /** Over all modes: the heaviest makes the typical voltage. */
   const heaviest = (name: string): Band => {
-    const draws = weightedModes(board).map(({ name: mode }) => drawn.total(name, mode));
+    const draws = weightedModes(board).map(({ name: mode }) => onSupply(name, mode));
     return {
       min: Math.min(...draws.map(({ min }) => min)),
       typical: Math.max(...draws.map(({ typical }) => typical)),
@@ -151,7 +157,7 @@ export function railSolver(
     const origin = board.rails.get(name)?.origin;
     if (!band || isGap(band) || !origin) return undefined;
     if (origin.kind === 'pump') return pumps.get(name)?.points.find((p) => p.mode === mode)?.voltage;
-    const amps = drawn.total(name, mode).typical;
+    const amps = onSupply(name, mode).typical;
     if (origin.kind === 'supply') {
       const supply = supplyOf(board, name);
       return supply ? supply.band.typical - (supply.ohms?.typical ?? 0) * amps : undefined;
@@ -165,7 +171,30 @@ export function railSolver(
     return regulatedVoltage(origin.regulator, exactly(input))?.typical;
   };
   const at = (name: string, mode: string | undefined) => within(name, mode, board.rails.size);
-  return { voltages, at, pumps, chains, models, parts, around, drawn, voltage };
+  return {
+    voltages,
+    at,
+    pumps,
+    chains,
+    models,
+    parts,
+    around,
+    drawn: { ...drawn, total: onSupply },
+    voltage,
+  };
+}
+
+/** For each rail that is a supply: all rails on the same one. */
+function railsBySupply(board: Board): ReadonlyMap<string, readonly string[]> {
+  const bySupply = new Map<string, string[]>();
+  const result = new Map<string, readonly string[]>();
+  for (const { name, origin } of board.rails.values()) {
+    if (origin?.kind !== 'supply') continue;
+    const list = bySupply.get(origin.supply.name) ?? [];
+    bySupply.set(origin.supply.name, [...list, name]);
+  }
+  for (const names of bySupply.values()) for (const name of names) result.set(name, names);
+  return result;
 }
 
 /** Open voltage and source resistance of the supply that a rail is. */

@@ -90,6 +90,24 @@ describe('a board with rails on rails', () => {
     );
   });
 
+  it('rails on one supply pull it down together', () => {
+    const rails = analyse(
+      'supplies: { lab: { voltage: 5 V, resistance: 2 ohm } }\nrails:\n  a: { supply: lab, loads: { x: 100 mA } }\n  b: { supply: lab, loads: { y: 200 mA } }\n',
+      { file: 'rails.yaml' },
+    ).report.rails;
+    // Ohm's law: 5 V - 2 ohm x 300 mA.
+    expectNear(rails['a']!.voltage!.typical, 4.4, consistent);
+    expectNear(rails['b']!.voltage!.typical, 4.4, consistent);
+  });
+
+  it('reads a circle of rails without an answer and without an end', () => {
+    const { findings } = analyse(
+      'supplies: { lab: { voltage: 5 V } }\nrails:\n  a: { regulator: { from: b, output: 3 V, dropout: 1 V } }\n  b: { filter: { from: a, resistor: 1 ohm, capacitor: 1 uF } }\n',
+      { file: 'rails.yaml' },
+    );
+    expect(findings.map(({ code }) => code)).toContain('rail-cycle');
+  });
+
   it('energy in is energy out and heat, for every pump', () => {
     expect(report.balance).toBeLessThan(1e-3);
   });
