@@ -23,6 +23,8 @@ import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
 import { yieldMarkdown as writeYieldMarkdown } from './report/yield-markdown';
 import { yieldText as writeYieldText } from './report/yield-text';
+import type { Progress } from './sizing/search';
+import { type SizeResult, sizing } from './sizing/size';
 import { stripBom } from './text/bom';
 import { joined } from './text/relative-path';
 
@@ -34,6 +36,8 @@ export type { PumpRail } from './features/rails';
 export type { Sizing } from './features/size-rail';
 export type { IncludeProblem, IncludeSource } from './model/include';
 export type { Report } from './report/report';
+export type { Progress as SizeProgress } from './sizing/search';
+export type { SizeChoice, SizeResult } from './sizing/size';
 export { stripBom } from './text/bom';
 export { applyEdits, type TextEdit } from './text/edit';
 export type { Span } from './text/span';
@@ -178,4 +182,12 @@ export function yieldText(
 /** The same as a Markdown document. */
 export function yieldMarkdown(result: YieldResult): string {
   return writeYieldMarkdown(result);
+}
+
+/**
+ * Ways to make a rail that meets its needs, with their parts and edits; one step for each way that is looked into, so
+ * that a host may show progress or stop. The last value is the result.
+ */
+export function sizeRun(analysis: Analysis, rail: string): Generator<Progress, SizeResult> {
+  return sizing(analysis.board, rail);
 }

@@ -4,7 +4,7 @@
  */
 import { combinedResistance } from '../compute/combined-resistance';
 import { diodeCount } from '../compute/pump-topology';
-import type { Pump } from '../model/board';
+import type { Topology } from '../model/board';
 import type { PumpResult } from './types';
 
 export type LossKind = 'capacitance' | 'resistance' | 'diodes';
@@ -24,7 +24,10 @@ export interface PumpLosses {
 }
 
 /** Undefined without an estimate, and for an overloaded pump, where the closed forms say nothing. */
-export function pumpLosses(pump: Pump, result: PumpResult): PumpLosses | undefined {
+export function pumpLosses(
+  pump: { readonly topology?: Topology; readonly stages?: { readonly typical: number } },
+  result: PumpResult,
+): PumpLosses | undefined {
   const { estimate, heaviest } = result;
   if (estimate === null || pump.topology === undefined) return undefined;
   if (heaviest.loadCurrent < 0.99 * heaviest.askedCurrent) return undefined;

@@ -6,6 +6,7 @@ import { partsShape } from './parts';
 import { chipShape, clockShape, conditionsShape, includeRow, modeShape, supplyShape } from './power';
 import { railShape } from './rails';
 import { list, map, name, notNegative, quantity, row, type Shape, shape, table, text } from './shape';
+import { stockShape } from './stock';
 
 const needed = { required: true } as const;
 
@@ -62,5 +63,6 @@ export const boardShape = shape('a board file', 'The rails of one board.', {
     'Findings accepted on purpose.',
     '[{ finding: rail-low, at: rails.v6, because: checked }]',
   ),
+  stock: row(map(stockShape), stockShape.doc, '{ series: E6, diodes: [schottky-signal], stages: 3 }'),
   include: includeRow,
 });

@@ -9,3 +9,4 @@ export * from './parts';
 export * from './power';
 export * from './rails';
 export type { Limits, NameSpace, Option, PartFamily, Row, Shape, Value } from './shape';
+export * from './stock';

@@ -288,6 +288,25 @@ export interface Waiver {
   readonly until?: string;
 }
 
+/** What may be used when a rail is sized; a key that is left out has a usual value. */
+export interface Stock {
+  readonly series?: 'E3' | 'E6' | 'E12' | 'E24';
+  /** F. */
+  readonly capacitors?: readonly number[];
+  readonly kinds?: readonly CapacitorKind[];
+  /** V. */
+  readonly rated?: readonly number[];
+  readonly diodes?: readonly DiodeData[];
+  readonly transistors?: readonly TransistorData[];
+  readonly gates?: readonly GateData[];
+  readonly mosfets?: readonly MosfetData[];
+  readonly stages?: Figure;
+  /** Hz. */
+  readonly frequencies?: readonly number[];
+  readonly preferred?: readonly string[];
+  readonly rails?: readonly string[];
+}
+
 /** A file with shared parts, as written. */
 export interface Include extends Ref {
   readonly path: string;
@@ -306,5 +325,6 @@ export interface Board {
   readonly modes: ReadonlyMap<string, Mode>;
   readonly bench: readonly BenchPoint[];
   readonly waivers: readonly Waiver[];
+  readonly stock: Stock;
   readonly includes: readonly Include[];
 }

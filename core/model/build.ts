@@ -25,6 +25,7 @@ import { clocksOf } from './sections/clocks';
 import { driversOf } from './sections/drivers';
 import { railsOf } from './sections/rails';
 import { benchOf, includesOf, waiversOf } from './sections/reality';
+import { stockOf } from './sections/stock';
 import { modesOf, suppliesOf } from './sections/supplies';
 import { settle, syntaxFinding } from './settle';
 import { openMap, type Slot } from './slot';
@@ -137,6 +138,7 @@ function boardOf(
       modes: modesOf(at('modes')),
       bench: benchOf(at('bench')),
       waivers: waiversOf(at('waivers')),
+      stock: stockOf(at('stock')),
       includes,
     },
   };

@@ -28,6 +28,7 @@ const rooms: Readonly<Record<string, readonly string[]>> = {
   analysis: computers,
   checks: ['analysis', ...computers],
   features: ['analysis', ...computers],
+  sizing: ['analysis', 'checks', ...computers],
   report: ['analysis', ...ground],
   cli: [],
 };

@@ -64,7 +64,7 @@ test('keys that exclude each other exist', () => {
 /** The contract of the language, written down a second time by hand. */
 describe('the keys are those of the language', () => {
   test.each([
-    [[], 'bench board chips clocks conditions drivers include modes parts rails supplies waivers'],
+    [[], 'bench board chips clocks conditions drivers include modes parts rails stock supplies waivers'],
     [['supplies', 'x'], 'battery bulk capacity cells current life resistance standard voltage'],
     [['chips', 'x'], 'draws part pins rail'],
     [['chips', 'x', 'pins', 'x'], 'sinks sources strength'],

@@ -1,0 +1,309 @@
+/**
+ * "Size this rail": from what a rail needs to bills of parts that meet it. Closed forms take out what cannot work, the
+ * solver decides on the rest at all corners, and what is proposed has gone through the same checks as any board: it
+ * raises no warning and no error that was not there before.
+ */
+
+import { computeBoard } from '../analysis/analyse-board';
+import { isGap } from '../analysis/gap';
+import { Memory } from '../analysis/memory';
+import { isMet, type Shortfall, shortfall } from '../analysis/needs';
+import { once } from '../analysis/once';
+import { setUpPump } from '../analysis/pump-solution';
+import { type PumpVerdict, pumpVerdict } from '../analysis/pump-verdict';
+import { railSolver, railVoltages } from '../analysis/rail-voltages';
+import type { BoardAnalysis, PumpResult } from '../analysis/types';
+import type { CapacitorKind } from '../catalog/part';
+import { runChecks } from '../checks';
+import type { Board, Capacitor, Rail } from '../model/board';
+import { readBoard } from '../model/build';
+import { preferredValues } from '../quantity/preferred';
+import { applyEdits, type TextEdit } from '../text/edit';
+import { type CapacitorPlan, type Design, type Frame, partCount, pumpedOf, totalCapacitance } from './design';
+import { designEdits } from './edits';
+import { framesOf, type Target } from './frames';
+
+export interface Candidate {
+  readonly design: Design;
+  readonly edits: readonly TextEdit[];
+  readonly pump: PumpResult;
+  readonly short: Shortfall;
+}
+
+/** A candidate that went through all checks, with the board as it would be. */
+export interface Verified extends Candidate {
+  readonly analysis: BoardAnalysis;
+}
+
+export interface Progress {
+  readonly done: number;
+  readonly of: number;
+}
+
+export interface Found {
+  /** In the order of cost: parts, capacitance, pins, ripple. */
+  readonly verified: readonly Verified[];
+  /** The one that came nearest, where nothing was verified. */
+  readonly nearest?: Candidate;
+  /** Findings that stand against the nearest although it meets the needs. */
+  readonly objections: readonly string[];
+  /** Pumps solved (with corners), and designs that there are in all. */
+  readonly solves: number;
+  readonly space: number;
+}
+
+const smallest = 1e-9;
+const largest = 470e-6;
+/** Frames that are looked into, and frames behind which nobody looks for other kinds of answers. */
+const mostFrames = 60;
+const enough = 10;
+/** Ratings that capacitors are stocked in (common practice, no source), V. */
+const usualRatings = [6.3, 10, 16, 25, 35, 50, 63, 100];
+
+export function* search(analysis: BoardAnalysis, rail: Rail, target: Target): Generator<Progress, Found> {
+  const run = new Search(analysis, rail, target);
+  const frames = framesOf(
+    analysis.reading.board,
+    rail,
+    railVoltages(analysis.reading.board, run.memory),
+    analysis.reading.catalogue,
+    target,
+  );
+  const tried = frames.slice(0, mostFrames);
+  const verified: Verified[] = [];
+  let done = 0;
+  for (const frame of tried) {
+    yield { done: done++, of: tried.length };
+    // With enough answers of fewer parts, more parts are looked at only for every third frame.
+    if (verified.length >= enough && done % 3 !== 0) continue;
+    const found = run.size(frame);
+    if (found) verified.push(found);
+  }
+  return {
+    verified: verified.sort(byCost),
+    ...(run.nearest ? { nearest: run.nearest } : {}),
+    objections: run.objections,
+    solves: run.solves,
+    space: frames.length * run.values.length ** 2,
+  };
+}
+
+/** Parts, then capacitance, then pins, then ripple. */
+function byCost(a: Verified, b: Verified): number {
+  return (
+    partCount(a.design) - partCount(b.design) ||
+    totalCapacitance(a.design) - totalCapacitance(b.design) ||
+    a.design.drive.pins - b.design.drive.pins ||
+    a.pump.ripple.highest.value - b.pump.ripple.highest.value
+  );
+}
+
+class Search {
+  readonly memory = new Memory();
+  readonly values: readonly number[];
+  solves = 0;
+  nearest: Candidate | undefined;
+  objections: readonly string[] = [];
+  readonly #board: Board;
+  readonly #known: ReadonlySet<string>;
+  readonly #verdicts = new Map<string, PumpVerdict | undefined>();
+  readonly #cache = new Map<string, Candidate | undefined>();
+
+  constructor(
+    private readonly analysis: BoardAnalysis,
+    private readonly rail: Rail,
+    private readonly target: Target,
+  ) {
+    this.#board = analysis.reading.board;
+    this.values = stockedValues(this.#board);
+    this.#known = new Set(serious(analysis).map(({ code, at }) => `${code} ${at}`));
+  }
+
+  /** The smallest capacitors with which the frame meets the needs, verified; undefined when none do. */
+  size(frame: Frame): Verified | undefined {
+    const last = this.values.length - 1;
+    const roomy = (f: number) => Math.min(last, f + 2 * this.#decade());
+    const f = firstTrue(0, last, (index) => this.#reaches(frame, index, roomy(index)));
+    if (f === undefined) {
+      this.#at(frame, last, last);
+      return undefined;
+    }
+    for (let flying = f; flying <= Math.min(last, f + 3); flying++) {
+      const r = firstTrue(
+        this.#leastReservoir(),
+        last,
+        (index) => this.#isQuiet(frame, flying, index) && this.#reaches(frame, flying, index),
+      );
+      const found = r === undefined ? undefined : this.#at(frame, flying, r);
+      if (!found || found.short.weak > 0 || found.short.ripple > 0) continue;
+      if (!isMet(found.short)) return undefined;
+      const verified = this.#verify(found);
+      if (verified) return verified;
+    }
+    return undefined;
+  }
+
+  #reaches(frame: Frame, f: number, r: number): boolean {
+    const volts = this.#verdict(frame, f, r)?.weakest();
+    return volts !== undefined && Math.abs(volts) >= this.target.least && volts < 0 === this.target.negative;
+  }
+
+  #isQuiet(frame: Frame, f: number, r: number): boolean {
+    const allowed = this.rail.needs?.ripple?.max;
+    if (allowed === undefined) return true;
+    const ripple = this.#verdict(frame, f, r)?.ripple();
+    return ripple !== undefined && ripple <= allowed;
+  }
+
+  /** The pump alone, on the rails as they are: what it does to them is for the full look at the end. */
+  #verdict(frame: Frame, f: number, r: number): PumpVerdict | undefined {
+    const edits = designEdits(this.analysis.text, this.rail, this.#design(frame, f, r));
+    if (!edits) return undefined;
+    const text = applyEdits(this.analysis.text, edits);
+    if (this.#verdicts.has(text)) return this.#verdicts.get(text);
+    const { board } = readBoard(text, this.analysis.reading.catalogue);
+    const rail = board.rails.get(this.rail.name);
+    const solver = railSolver(board, this.memory);
+    const setup =
+      rail?.origin?.kind === 'pump'
+        ? setUpPump(board, rail, rail.origin.pump, solver.around(rail))
+        : undefined;
+    const verdict = setup && !isGap(setup) ? pumpVerdict(setup.parts) : undefined;
+    this.solves++;
+    const kept = verdict && { weakest: once(verdict.weakest), ripple: once(verdict.ripple) };
+    this.#verdicts.set(text, kept);
+    return kept;
+  }
+
+  #decade(): number {
+    return Math.max(1, Math.round(this.values.length / Math.log10(largest / smallest)));
+  }
+
+  /** Without a need for ripple nothing says how small the reservoir may become: ten times 100 nF at least. */
+  #leastReservoir(): number {
+    if (this.rail.needs?.ripple) return 0;
+    const present = this.rail.origin?.kind === 'pump' ? this.rail.origin.pump.reservoir?.value : undefined;
+    const least = present?.typical ?? 1e-6;
+    const index = this.values.findIndex((farads) => farads >= least * (1 - 1e-9));
+    return index < 0 ? this.values.length - 1 : index;
+  }
+
+  #design(frame: Frame, f: number, r: number): Design {
+    return {
+      ...frame,
+      flying: this.#plan(frame, this.values[f]!, 'flying'),
+      reservoir: this.#plan(frame, this.values[r]!, 'reservoir'),
+    };
+  }
+
+  /** With everything that a board knows of its pump. */
+  #at(frame: Frame, f: number, r: number): Candidate | undefined {
+    const design = this.#design(frame, f, r);
+    const edits = designEdits(this.analysis.text, this.rail, design);
+    if (!edits) return undefined;
+    const text = applyEdits(this.analysis.text, edits);
+    if (this.#cache.has(text)) return this.#cache.get(text);
+    const { board } = readBoard(text, this.analysis.reading.catalogue);
+    const solver = railSolver(board, this.memory);
+    solver.voltage(this.rail.name);
+    this.solves++;
+    const pump = solver.pumps.get(this.rail.name);
+    const found = pump && { design, edits, pump, short: shortfall(this.rail.needs, pump) };
+    this.#cache.set(text, found);
+    if (found && (!this.nearest || distance(found.short) < distance(this.nearest.short)))
+      this.nearest = found;
+    return found;
+  }
+
+  /** Kind and rating: those of the file where it has them, else the first stocked kind that bears the value. */
+  #plan(frame: Frame, farads: number, column: 'flying' | 'reservoir'): CapacitorPlan {
+    const pump = this.rail.origin?.kind === 'pump' ? this.rail.origin.pump : undefined;
+    const present: Capacitor | undefined = column === 'flying' ? pump?.flying[0] : pump?.reservoir;
+    if (present?.kind.data && pump?.topology === frame.topology)
+      return {
+        farads,
+        kind: present.kind.data,
+        asWritten: true,
+        ...(present.rated ? { rated: present.rated.typical } : {}),
+      };
+    const kind = this.#kindFor(farads);
+    const volts = column === 'flying' ? this.target.least / frame.stages : this.#highest();
+    // Twice for what loses value, a quarter more for the rest (common practice, no source).
+    const wanted = (kind.bias ? 2 : 1.3) * volts;
+    const ratings = [...(this.#board.stock.rated ?? usualRatings)].sort((a, b) => a - b);
+    const rated = ratings.find((each) => each >= wanted) ?? ratings.at(-1);
+    return { farads, kind, ...(rated === undefined ? {} : { rated }) };
+  }
+
+  #highest(): number {
+    return Number.isFinite(this.target.most) ? this.target.most : 1.5 * this.target.least;
+  }
+
+  #kindFor(farads: number): CapacitorKind {
+    const { catalogue } = this.analysis.reading;
+    const stocked = this.#board.stock.kinds;
+    const usual = (key: string) => catalogue.capacitors.find((kind) => kind.key === key)!;
+    const kinds = stocked && stocked.length > 0 ? stocked : [usual('x7r'), usual('aluminium')];
+    const wet = kinds.find(({ polarised }) => polarised);
+    return farads > 22e-6 * (1 + 1e-9) && wet ? wet : kinds[0]!;
+  }
+
+  /** The whole board with it: no warning and no error that was not there before. */
+  #verify(candidate: Candidate): Verified | undefined {
+    const text = applyEdits(this.analysis.text, candidate.edits);
+    const reading = readBoard(text, this.analysis.reading.catalogue);
+    const analysis = computeBoard(text, this.analysis.file, reading, this.memory);
+    const raised = serious(analysis).filter(({ code, at }) => !this.#known.has(`${code} ${at}`));
+    const own = raised.length === 0;
+    if (own) return { ...candidate, analysis };
+    if (this.objections.length === 0) this.objections = raised.map(({ message }) => message);
+    return undefined;
+  }
+}
+
+/** Warnings and errors of a whole board. */
+function serious(analysis: BoardAnalysis) {
+  const all = [...analysis.reading.findings, ...analysis.problems, ...runChecks(analysis)];
+  return all.filter(({ severity }) => severity !== 'information');
+}
+
+function stockedValues({ stock }: Board): readonly number[] {
+  if (stock.capacitors && stock.capacitors.length > 0)
+    return [...new Set(stock.capacitors)].sort((a, b) => a - b);
+  const series = preferredValues[stock.series ?? 'E6'];
+  const all = Array.from({ length: 7 }, (_, decade) =>
+    series.map((value) => Number((value * 10 ** (decade - 9)).toPrecision(3))),
+  ).flat();
+  return all.filter((farads) => farads >= smallest * (1 - 1e-9) && farads <= largest * (1 + 1e-9));
+}
+
+function distance({ weak, strong, ripple }: Shortfall): number {
+  return weak + strong + ripple;
+}
+
+/** Index of the first candidate for which a test holds that stays true once it is; undefined if it never is. */
+function firstTrue(low: number, high: number, test: (index: number) => boolean): number | undefined {
+  if (low > high || !test(high)) return undefined;
+  let from = low;
+  let to = high;
+  while (from < to) {
+    const middle = (from + to) >> 1;
+    if (test(middle)) to = middle;
+    else from = middle + 1;
+  }
+  return to;
+}
+
+/** Parts by their key, with how many of each. */
+export function billOf(design: Design): readonly { readonly count: number; readonly part: string }[] {
+  const { flying, reservoir, diode, drive } = design;
+  const list = new Map<string, number>();
+  const add = (part: string, count: number) => list.set(part, (list.get(part) ?? 0) + count);
+  const words = ({ farads, kind, rated }: CapacitorPlan) =>
+    `${Number(farads.toPrecision(3))} F ${kind.key}${rated === undefined ? '' : ` ${rated} V`}`;
+  add(words(flying), pumpedOf(design));
+  add(words(reservoir), 1);
+  add(diode.key, partCount(design) - pumpedOf(design) - 1 - drive.parts.length);
+  for (const part of drive.parts) add(part, 1);
+  return [...list].map(([part, count]) => ({ count, part }));
+}
