@@ -21,6 +21,7 @@ import { toReport } from './report/json';
 import { ledgerText as writeLedger } from './report/ledger';
 import { colourPalette, plainPalette } from './report/paint';
 import type { Report } from './report/report';
+import { sizeText as writeSizes } from './report/size-text';
 import { yieldMarkdown as writeYieldMarkdown } from './report/yield-markdown';
 import { yieldText as writeYieldText } from './report/yield-text';
 import type { Progress } from './sizing/search';
@@ -190,4 +191,9 @@ export function yieldMarkdown(result: YieldResult): string {
  */
 export function sizeRun(analysis: Analysis, rail: string): Generator<Progress, SizeResult> {
   return sizing(analysis.board, rail);
+}
+
+/** The result of `sizeRun` for a terminal. */
+export function sizeText(result: SizeResult, { colour }: { readonly colour: boolean }): string {
+  return writeSizes(result, colour ? colourPalette : plainPalette);
 }

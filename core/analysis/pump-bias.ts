@@ -25,8 +25,10 @@ export function settlePump(
   pump: Pump,
   mode: string | undefined,
   assemble: (bears: Bears | undefined) => PumpModel | undefined,
+  /** What a pump much like this one bears: a good guess saves a solution. */
+  guess?: Bears,
 ): SettledPump | undefined {
-  let bears: Bears | undefined;
+  let bears: Bears | undefined = losesValue(pump) ? guess : undefined;
   for (let round = 1; ; round++) {
     const model = assemble(bears);
     if (!model) return undefined;

@@ -20,12 +20,17 @@ export function corner(
   from: SolvedPoint,
   target: Target,
   direction: 1 | -1,
+  /** `quick`: one climb, for a search that looks again at what it settles on. */
+  care: 'full' | 'quick' = 'full',
 ): CornerEnd {
   const start: Found = { value: from.point[target], at: typicalPoint(model), point: from.point };
   const climb = { model, mode, target, direction };
   const first = climbed(climb, start, from.slopes[target]);
-  let best = turned(climb, first.best, doubtful(model, from.slopes[target], first.slopes));
-  if (target === 'ripple') {
+  let best =
+    care === 'quick'
+      ? first.best
+      : turned(climb, first.best, doubtful(model, from.slopes[target], first.slopes));
+  if (target === 'ripple' && care === 'full') {
     // Ripple may have two such corners: one where the capacitors equalise, one where resistance keeps them from it.
     const other = reversed(climb, from, best);
     if (other && direction * (other.value - best.value) > 0) best = other;

@@ -31,7 +31,20 @@ export interface ExplainRequest {
   readonly code: string | undefined;
 }
 
+export interface SizeRequest {
+  readonly command: 'size';
+  readonly rail: string;
+  /** As written; `-` is standard input. Absent: look for a board. */
+  readonly file: string | undefined;
+  readonly format: Format;
+  readonly color: ColorChoice;
+  readonly stdinName: string;
+  /** Puts the first way into the file. */
+  readonly write: boolean;
+}
+
 export type Request =
+  | SizeRequest
   | CheckRequest
   | ExplainRequest
   | YieldRequest
@@ -43,13 +56,15 @@ export type Format = 'text' | 'json';
 export type ColorChoice = 'auto' | 'always' | 'never';
 export type Distribution = 'uniform' | 'triangular';
 
-const commands = ['check', 'yield', 'explain'] as const;
-const onBoards: readonly Command[] = ['check', 'yield'];
+const commands = ['check', 'size', 'yield', 'explain'] as const;
+const onBoards: readonly Command[] = ['check', 'size', 'yield'];
 type Command = (typeof commands)[number];
 
 interface Option {
   readonly of: readonly Command[];
   /** Why a value will not do; anything will where this is left out. */
+  /** True for an option without a value. */
+  readonly flag?: true;
   readonly fault?: (value: string) => string | undefined;
 }
 
@@ -57,6 +72,7 @@ const options: Readonly<Record<string, Option>> = {
   '--format': { of: onBoards, fault: oneOf('text', 'json') },
   '--color': { of: onBoards, fault: oneOf('auto', 'always', 'never') },
   '--stdin-filename': { of: onBoards },
+  '--write': { of: ['size'], flag: true },
   '--samples': { of: ['yield'], fault: wholeNumber(1, mostSamples) },
   '--seed': { of: ['yield'], fault: wholeNumber(0, Number.MAX_SAFE_INTEGER) },
   '--distribution': { of: ['yield'], fault: oneOf('uniform', 'triangular') },
@@ -88,6 +104,11 @@ export function readArguments(args: readonly string[]): Request {
       const known = [...Object.keys(options), '--help', '--version'].join(', ');
       return wrong(`There is no option ${name}; the options are ${known}.`);
     }
+    if (option.flag) {
+      if (equals >= 0) return wrong(`${name} takes no value.`);
+      given.set(name, 'yes');
+      continue;
+    }
     const value = equals < 0 ? args[++k] : arg.slice(equals + 1);
     if (value === undefined) return wrong(`${name} needs a value.`);
     const fault = option.fault?.(value);
@@ -103,6 +124,7 @@ export function readArguments(args: readonly string[]): Request {
   for (const name of given.keys())
     if (!options[name]?.of.includes(command)) return wrong(`${command} has no option ${name}.`);
   if (command === 'check') return { command, files, ...common(given) };
+  if (command === 'size') return sizeRequest(files, given);
   return command === 'yield' ? yieldRequest(files, given) : explainRequest(files);
 }
 
@@ -127,6 +149,12 @@ function yieldRequest(files: readonly string[], given: Given): Request {
     seed: Number(given.get('--seed') ?? 1),
     distribution: (given.get('--distribution') ?? 'uniform') as Distribution,
   };
+}
+
+function sizeRequest([rail, file, ...more]: readonly string[], given: Given): Request {
+  if (rail === undefined) return wrong('size needs the name of a rail.');
+  if (more.length > 0) return wrong(`size takes a rail and one file, not ${more.length + 2} names.`);
+  return { command: 'size', rail, file, ...common(given), write: given.has('--write') };
 }
 
 function explainRequest(codes: readonly string[]): Request {

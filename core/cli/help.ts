@@ -3,6 +3,7 @@ export const helpText = `Rail Ledger: voltage, ripple and pin budget of a board'
 
 Usage
   rail-ledger check [FILE...]
+  rail-ledger size RAIL [FILE] [--write]
   rail-ledger yield [FILE]
   rail-ledger explain [CODE] [--samples N] [--seed S]
 
@@ -13,6 +14,9 @@ findings, one finding on a line as
 
 Without FILE it takes the rails.yaml of the present folder or of the nearest
 folder above it. The file - is standard input.
+
+size: finds ways to make a rail that meets its needs, with the parts that the board's
+stock allows; --write puts the first one into the file.
 
 yield: draws boards by lot within the tolerances of their parts, solves each in
 every mode and counts how many meet their needs. The same seed draws the same

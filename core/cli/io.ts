@@ -14,6 +14,7 @@ export interface Io {
   err(text: string): void;
   /** Bytes of a file; rejects as Node's file system does. */
   readFile(path: string): Promise<Uint8Array>;
+  writeFile(path: string, text: string): Promise<void>;
   isFile(path: string): Promise<boolean>;
   /** Where the program's package lies, with its pages. */
   readonly packageFolder: string;

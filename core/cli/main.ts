@@ -1,7 +1,7 @@
 /**
  * Where the command line meets the process; the only file of the core that does.
  */
-import { readFile, stat } from 'node:fs/promises';
+import { readFile, stat, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { Io } from './io';
 import { run } from './run';
@@ -15,6 +15,7 @@ const io: Io = {
   out: (text) => process.stdout.write(text),
   err: (text) => process.stderr.write(text),
   readFile: (path) => readFile(path),
+  writeFile: (path, text) => writeFile(path, text, 'utf8'),
   isFile: async (path) => {
     try {
       return (await stat(path)).isFile();

@@ -11,6 +11,7 @@ import { boardFileName, findBoard, readSource } from './files';
 import { helpText } from './help';
 import type { Io } from './io';
 import { complain, type ExitCode, usualWidth } from './output';
+import { size } from './size';
 import { runYield } from './yield';
 
 export async function run(args: readonly string[], io: Io): Promise<ExitCode> {
@@ -28,6 +29,8 @@ export async function run(args: readonly string[], io: Io): Promise<ExitCode> {
       return check(request, io);
     case 'yield':
       return runYield(request, io);
+    case 'size':
+      return size(request, io);
     case 'explain':
       return explain(request, io);
   }

@@ -84,7 +84,11 @@ function diodesIn(board: Board, rail: Rail, catalogue: Catalogue): readonly Diod
   const stocked = board.stock.diodes ?? catalogue.diodes.filter(({ key }) => usual.includes(key));
   const present = rail.origin?.kind === 'pump' ? rail.origin.pump.diodes : [];
   const own = present.length === 1 && present[0]?.data && present[0].ref ? [present[0].data] : [];
-  return [...new Map([...own, ...stocked].map((each) => [each.key, each])).values()];
+  // Least drop first: kind, then the current at a volt's fraction, which grows with the saturation current.
+  const rank = ({ kind, saturation }: DiodeData) => (kind === 'schottky' ? 0 : 1) - saturation.typical;
+  return [...new Map([...own, ...stocked].map((each) => [each.key, each])).values()].sort(
+    (a, b) => rank(a) - rank(b),
+  );
 }
 
 /** Ideal voltage less the least that diodes take; nothing is asked of capacitors yet. */

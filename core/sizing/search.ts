@@ -6,9 +6,11 @@
 
 import { computeBoard } from '../analysis/analyse-board';
 import { isGap } from '../analysis/gap';
+import { loadAmps } from '../analysis/load-current';
 import { Memory } from '../analysis/memory';
 import { isMet, type Shortfall, shortfall } from '../analysis/needs';
 import { once } from '../analysis/once';
+import type { Bears } from '../analysis/pump-bias';
 import { setUpPump } from '../analysis/pump-solution';
 import { type PumpVerdict, pumpVerdict } from '../analysis/pump-verdict';
 import { railSolver, railVoltages } from '../analysis/rail-voltages';
@@ -18,6 +20,7 @@ import { runChecks } from '../checks';
 import type { Board, Capacitor, Rail } from '../model/board';
 import { readBoard } from '../model/build';
 import { preferredValues } from '../quantity/preferred';
+import { formatQuantity } from '../quantity/write';
 import { applyEdits, type TextEdit } from '../text/edit';
 import { type CapacitorPlan, type Design, type Frame, partCount, pumpedOf, totalCapacitance } from './design';
 import { designEdits } from './edits';
@@ -54,9 +57,11 @@ export interface Found {
 
 const smallest = 1e-9;
 const largest = 470e-6;
-/** Frames that are looked into, and frames behind which nobody looks for other kinds of answers. */
-const mostFrames = 60;
-const enough = 10;
+/** Frames that are looked into, and those of more parts than the fewest: other kinds of answers. */
+/** Steps of the series by which the flying capacitor may be larger than it must. */
+const mostLarger = 6;
+const mostFrames = 120;
+const mostBeyond = 8;
 /** Ratings that capacitors are stocked in (common practice, no source), V. */
 const usualRatings = [6.3, 10, 16, 25, 35, 50, 63, 100];
 
@@ -71,13 +76,20 @@ export function* search(analysis: BoardAnalysis, rail: Rail, target: Target): Ge
   );
   const tried = frames.slice(0, mostFrames);
   const verified: Verified[] = [];
+  const settled = new Set<string>();
   let done = 0;
+  let beyond = 0;
   for (const frame of tried) {
     yield { done: done++, of: tried.length };
-    // With enough answers of fewer parts, more parts are looked at only for every third frame.
-    if (verified.length >= enough && done % 3 !== 0) continue;
+    // Diodes come with the least drop first: one that works leaves nothing to win for the next.
+    const way = `${frame.topology} ${frame.stages} ${frame.input} ${frame.drive.label}`;
+    if (settled.has(way)) continue;
+    const fewest = verified[0] && partCount(verified[0].design);
+    if (fewest !== undefined && partCount(frame) > fewest && beyond++ >= mostBeyond) break;
     const found = run.size(frame);
-    if (found) verified.push(found);
+    if (!found) continue;
+    verified.push(found);
+    settled.add(way);
   }
   return {
     verified: verified.sort(byCost),
@@ -106,6 +118,7 @@ class Search {
   objections: readonly string[] = [];
   readonly #board: Board;
   readonly #known: ReadonlySet<string>;
+  readonly #bears = new Map<Frame, Bears>();
   readonly #verdicts = new Map<string, PumpVerdict | undefined>();
   readonly #cache = new Map<string, Candidate | undefined>();
 
@@ -123,20 +136,31 @@ class Search {
   size(frame: Frame): Verified | undefined {
     const last = this.values.length - 1;
     const roomy = (f: number) => Math.min(last, f + 2 * this.#decade());
-    const f = firstTrue(0, last, (index) => this.#reaches(frame, index, roomy(index)));
+    const guess = this.#flyingGuess(frame);
+    const f = firstFrom(guess, last, (index) => this.#reaches(frame, index, roomy(index)));
     if (f === undefined) {
       this.#at(frame, last, last);
       return undefined;
     }
-    for (let flying = f; flying <= Math.min(last, f + 3); flying++) {
-      const r = firstTrue(
-        this.#leastReservoir(),
+    // A larger flying capacitor may need less reservoir: the sum decides.
+    const pairs: { readonly flying: number; readonly reservoir: number; readonly total: number }[] = [];
+    const total = (flying: number, reservoir: number) =>
+      totalCapacitance(this.#design(frame, flying, reservoir));
+    const least = this.#leastReservoir();
+    for (let flying = f; flying <= Math.min(last, f + mostLarger); flying++) {
+      const best = Math.min(...pairs.map((pair) => pair.total));
+      if (total(flying, least) >= best) break;
+      const reservoir = firstFrom(
+        Math.max(least, Math.min(last, flying + this.#decade())),
         last,
-        (index) => this.#isQuiet(frame, flying, index) && this.#reaches(frame, flying, index),
+        (index) =>
+          index >= least && this.#isQuiet(frame, flying, index) && this.#reaches(frame, flying, index),
       );
-      const found = r === undefined ? undefined : this.#at(frame, flying, r);
-      if (!found || found.short.weak > 0 || found.short.ripple > 0) continue;
-      if (!isMet(found.short)) return undefined;
+      if (reservoir !== undefined) pairs.push({ flying, reservoir, total: total(flying, reservoir) });
+    }
+    for (const { flying, reservoir } of pairs.sort((x, y) => x.total - y.total)) {
+      const found = this.#at(frame, flying, reservoir);
+      if (!found || !isMet(found.short)) continue;
       const verified = this.#verify(found);
       if (verified) return verified;
     }
@@ -144,8 +168,10 @@ class Search {
   }
 
   #reaches(frame: Frame, f: number, r: number): boolean {
-    const volts = this.#verdict(frame, f, r)?.weakest();
-    return volts !== undefined && Math.abs(volts) >= this.target.least && volts < 0 === this.target.negative;
+    const verdict = this.#verdict(frame, f, r);
+    const does = (volts: number) =>
+      Math.abs(volts) >= this.target.least && volts < 0 === this.target.negative;
+    return verdict !== undefined && does(verdict.typical) && does(verdict.weakest());
   }
 
   #isQuiet(frame: Frame, f: number, r: number): boolean {
@@ -168,11 +194,40 @@ class Search {
       rail?.origin?.kind === 'pump'
         ? setUpPump(board, rail, rail.origin.pump, solver.around(rail))
         : undefined;
-    const verdict = setup && !isGap(setup) ? pumpVerdict(setup.parts) : undefined;
+    const verdict = setup && !isGap(setup) ? pumpVerdict(setup.parts, this.#bears.get(frame)) : undefined;
     this.solves++;
-    const kept = verdict && { weakest: once(verdict.weakest), ripple: once(verdict.ripple) };
+    if (verdict) this.#bears.set(frame, verdict.bears);
+    const kept = verdict && {
+      ...verdict,
+      weakest: once(verdict.weakest),
+      ripple: once(verdict.ripple),
+    };
     this.#verdicts.set(text, kept);
     return kept;
+  }
+
+  /** Index of a value near the one that the slow limit asks for: a tenth of a volt of drop for each stage. */
+  #flyingGuess(frame: Frame): number {
+    const amps = [...this.rail.loads.values()].reduce((sum, load) => {
+      const most = loadAmps(load, 'max', () => this.target.least);
+      return sum + (Number.isFinite(most) ? most : 0);
+    }, 1e-6);
+    const clock = frame.drive.names[0];
+    const hertz = (clock && this.#frequencyOf(frame, clock)) || 1e5;
+    const farads = amps / (hertz * 0.1);
+    const index = this.values.findIndex((value) => value >= farads);
+    return index < 0 ? this.values.length - 1 : index;
+  }
+
+  #frequencyOf(frame: Frame, name: string): number | undefined {
+    const written = frame.drive.entries
+      .map(({ text }) => /frequency: ([\d.]+) (k|M)?Hz/.exec(text))
+      .find(Boolean);
+    if (written) return Number(written[1]) * (written[2] === 'k' ? 1e3 : written[2] === 'M' ? 1e6 : 1);
+    const { board } = this.analysis.reading;
+    const driver = board.drivers.get(name);
+    const found = this.analysis.clocks.get(driver?.input?.name ?? name)?.frequency?.typical;
+    return found ?? undefined;
   }
 
   #decade(): number {
@@ -281,11 +336,30 @@ function distance({ weak, strong, ripple }: Shortfall): number {
   return weak + strong + ripple;
 }
 
-/** Index of the first candidate for which a test holds that stays true once it is; undefined if it never is. */
-function firstTrue(low: number, high: number, test: (index: number) => boolean): number | undefined {
-  if (low > high || !test(high)) return undefined;
-  let from = low;
-  let to = high;
+/**
+ * Index of the first value for which a test holds that stays true once it is, looked for from a guess outwards in
+ * growing steps; undefined if it never is.
+ */
+function firstFrom(guess: number, last: number, test: (index: number) => boolean): number | undefined {
+  let low = -1;
+  let high: number | undefined;
+  let at = Math.min(Math.max(guess, 0), last);
+  for (let step = 1; ; step *= 2) {
+    if (test(at)) {
+      high = at;
+      if (at === 0) return 0;
+      at = Math.max(0, at - step);
+      if (low >= 0) break;
+    } else {
+      low = Math.max(low, at);
+      if (high !== undefined) break;
+      if (at === last) return undefined;
+      at = Math.min(last, at + step);
+    }
+    if (high !== undefined && low >= 0) break;
+  }
+  let to = high!;
+  let from = Math.max(low, -1) + 1;
   while (from < to) {
     const middle = (from + to) >> 1;
     if (test(middle)) to = middle;
@@ -300,7 +374,7 @@ export function billOf(design: Design): readonly { readonly count: number; reado
   const list = new Map<string, number>();
   const add = (part: string, count: number) => list.set(part, (list.get(part) ?? 0) + count);
   const words = ({ farads, kind, rated }: CapacitorPlan) =>
-    `${Number(farads.toPrecision(3))} F ${kind.key}${rated === undefined ? '' : ` ${rated} V`}`;
+    `${formatQuantity(farads, 'F')} ${kind.key}${rated === undefined ? '' : ` ${formatQuantity(rated, 'V')}`}`;
   add(words(flying), pumpedOf(design));
   add(words(reservoir), 1);
   add(diode.key, partCount(design) - pumpedOf(design) - 1 - drive.parts.length);

@@ -27,6 +27,7 @@ export async function rail(args: string, machine: Machine = {}) {
   } = machine;
   const bytes = (content: string | Uint8Array) =>
     typeof content === 'string' ? new TextEncoder().encode(content) : content;
+  const written: Record<string, string> = {};
   let out = '';
   let err = '';
   const io: Io = {
@@ -46,6 +47,9 @@ export async function rail(args: string, machine: Machine = {}) {
       if (content === undefined) throw Object.assign(new Error('missing'), { code: 'ENOENT' });
       return bytes(content);
     },
+    writeFile: async (path, text) => {
+      written[path] = text;
+    },
     isFile: async (path) => Object.hasOwn(files, path),
     packageFolder: '/package',
     today: () => today,
@@ -55,5 +59,5 @@ export async function rail(args: string, machine: Machine = {}) {
     args.split(' ').filter((word) => word !== ''),
     io,
   );
-  return { code, out, err };
+  return { code, out, err, written };
 }
