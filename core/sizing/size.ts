@@ -180,7 +180,7 @@ function reasons(rail: Rail, target: Target, { nearest, objections }: Found): re
   if (short.weak > 0)
     return [
       `${head}: at its weakest corner it stays ${volts(short.weak)} short with every capacitor in stock at its largest.`,
-      weakCure(pump, short.weak),
+      weakCure(pump, design, target, short.weak),
     ];
   if (short.strong > 0)
     return [
@@ -198,10 +198,19 @@ function reasons(rail: Rail, target: Target, { nearest, objections }: Found): re
   ];
 }
 
-function weakCure({ heaviest, estimate }: PumpResult, missing: number): string {
+function weakCure(
+  { heaviest, estimate }: PumpResult,
+  { stages }: Design,
+  { most }: Target,
+  missing: number,
+): string {
   const lighter = heaviest.outputResistance > 0 ? missing / heaviest.outputResistance : 0;
   const share = heaviest.loadCurrent > 0 ? lighter / heaviest.loadCurrent : 1;
   if (share < 0.6)
     return `A load lighter by ${formatQuantity(lighter, 'A', 2)} (${formatPercent(share, 2)}) would allow it; so would a stronger drive, which is worth up to ${volts(heaviest.loadCurrent * (estimate?.fastLimit ?? 0))}.`;
-  return 'One stage more (stock.stages), a higher input rail or a driver stage would allow it.';
+  const higher = volts(missing / (stages + 1));
+  const another = (Math.abs(heaviest.ideal) * (stages + 2)) / (stages + 1);
+  if (another > 1.1 * most)
+    return `An input rail ${higher} higher would allow it; one stage more would pass ${formatQuantity(most, 'V')} without its load, unless a regulator follows it.`;
+  return `One stage more (stock.stages) or an input rail ${higher} higher would allow it.`;
 }

@@ -119,7 +119,9 @@ describe('chips', () => {
           expect(point.voltage.max).toBeLessThan(point.supply.typical);
         }
       }
-      const names = new Set(chip.names ?? chip.groups.flatMap((group) => group.pins));
+      // Without names nothing would hold groups and single pins against the chip.
+      if (chip.groups.length > 0 || Object.keys(chip.pin).length > 0) expect(chip.names).toBeDefined();
+      const names = new Set(chip.names ?? []);
       for (const group of chip.groups) {
         expect(group.source ?? group.sink).toBeDefined();
         expect(group.pins.filter((pin) => !names.has(pin))).toEqual([]);
@@ -129,6 +131,34 @@ describe('chips', () => {
       expect(groupNames).toEqual([...new Set(groupNames)]);
     },
   );
+});
+
+describe('every family is whole', () => {
+  const needed: Readonly<Record<string, readonly string[]>> = {
+    chips: ['supply', 'pins', 'total', 'draws'],
+    diodes: [
+      'kind',
+      'saturation',
+      'ideality',
+      'resistance',
+      'junction',
+      'reverse',
+      'average',
+      'peak',
+      'leakage',
+    ],
+    transistors: ['polarity', 'saturation', 'gain', 'reverseGain', 'baseResistance', 'storage', 'current'],
+    mosfets: ['channel', 'threshold', 'onResistance', 'gateCharge', 'current'],
+    gates: ['supply', 'output', 'absolute', 'total', 'draws'],
+    timers: ['supply', 'highDrop', 'highResistance', 'lowVoltage', 'lowResistance', 'draws', 'fastest'],
+    capacitors: ['tolerance', 'temperature', 'heat', 'polarised'],
+    standards: ['voltage', 'current', 'resistance', 'bulk'],
+    batteries: ['voltage', 'resistance', 'capacity'],
+  };
+  it.each(entries)('$name has every figure that its kind needs', ({ list, part }) => {
+    expect(Object.keys(needed)).toContain(list);
+    expect(needed[list]!.filter((key) => !Object.hasOwn(part, key))).toEqual([]);
+  });
 });
 
 describe('capacitor kinds', () => {
