@@ -4,8 +4,9 @@
  */
 import * as vscode from 'vscode';
 import { Analyses } from './analyses';
-import { runYieldCommand, showLogCommand, sizeRailCommand } from './commands/names';
+import { runYieldCommand, showLogCommand, sizeRailCommand, waysCommand } from './commands/names';
 import { sizeRailHandler } from './commands/size-rail';
+import { waysHandler } from './commands/ways';
 import { yieldHandler } from './commands/yield';
 import { registerDiagnostics } from './diagnostics';
 import { selector } from './files';
@@ -34,6 +35,7 @@ export function activate(context: vscode.ExtensionContext): Api {
       sizeRailCommand,
       sizeRailHandler(analyses, showLog, (line) => log.info(line)),
     ),
+    vscode.commands.registerCommand(waysCommand, waysHandler(analyses)),
     vscode.commands.registerCommand(runYieldCommand, yieldHandler(analyses)),
     vscode.commands.registerCommand(showLogCommand, showLog),
   );

@@ -3,9 +3,10 @@
  * a document beside the board. Runs in short slices, so that the editor answers meanwhile.
  */
 import * as vscode from 'vscode';
-import type { YieldProgress, YieldResult } from '../../core/index';
+import type { YieldResult } from '../../core/index';
 import type { Analyses, Core } from '../analyses';
 import { findDocument } from './find-document';
+import { inSlices } from './in-slices';
 
 export interface YieldCommandOptions {
   /** The document; the active one if left out. */
@@ -16,9 +17,6 @@ export interface YieldCommandOptions {
   /** `false` only answers; the result is opened if left out. */
   readonly open?: boolean;
 }
-
-/** Time after which the editor gets its turn, ms. */
-const slice = 20;
 
 /** The command's body. Answers with the result; with nothing when it was stopped. */
 export function yieldHandler(analyses: Analyses) {
@@ -32,11 +30,11 @@ export function yieldHandler(analyses: Analyses) {
     const samples = options.samples ?? (await askSamples(core));
     const analysis = samples === undefined ? undefined : await analyses.of(document);
     if (samples === undefined || analysis === undefined) return undefined;
-    const result = await vscode.window.withProgress(
-      { location: vscode.ProgressLocation.Notification, title: 'Yield of this board', cancellable: true },
-      (progress, token) =>
-        inSlices(core.yieldRun(analysis, { samples, seed: options.seed ?? 1 }), progress, token),
-    );
+    const run = core.yieldRun(analysis, { samples, seed: options.seed ?? 1 });
+    const result = await inSlices('Yield of this board', run, ({ done, samples: all }) => ({
+      message: `${done} of ${all} samples`,
+      share: done / all,
+    }));
     if (result !== undefined && options.open !== false) await show(core.yieldMarkdown(result));
     return result;
   };
@@ -54,33 +52,6 @@ async function askSamples({ usualSamples, mostSamples }: Core): Promise<number |
     },
   });
   return answer === undefined ? undefined : Number(answer);
-}
-
-async function inSlices(
-  run: Generator<YieldProgress, YieldResult, void>,
-  progress: vscode.Progress<{ message?: string; increment?: number }>,
-  token: vscode.CancellationToken,
-): Promise<YieldResult | undefined> {
-  let shown = 0;
-  let end = performance.now() + slice;
-  while (!token.isCancellationRequested) {
-    const step = run.next();
-    if (step.done) return step.value;
-    if (performance.now() < end) continue;
-    const { done, samples } = step.value;
-    const percent = (100 * done) / samples;
-    progress.report({ message: `${done} of ${samples} samples`, increment: percent - shown });
-    shown = percent;
-    await pause();
-    end = performance.now() + slice;
-  }
-  return undefined;
-}
-
-function pause(): Promise<void> {
-  return new Promise((resolve) => {
-    setTimeout(resolve, 0);
-  });
 }
 
 async function show(content: string): Promise<void> {

@@ -5,6 +5,7 @@ import type { SimplePump } from '../support/simple-pump';
 import { benchBoardGrowth } from './board-growth';
 import { benchEngine, benchGrowth, benchRandom } from './engine';
 import { benchDerivatives, benchRivals, benchScaling } from './rivals';
+import { benchSizing } from './sizing';
 
 const count = Number(process.env['RANDOM_CIRCUITS'] ?? 5000);
 
@@ -40,6 +41,7 @@ console.log(
     benchDerivatives(),
     benchScaling(),
     benchBoardGrowth(),
+    benchSizing(),
     benchRandom(count),
   ].join('\n\n'),
 );

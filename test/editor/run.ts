@@ -9,6 +9,7 @@ import { hoverTests } from './suites/hover';
 import { includeTests } from './suites/include';
 import { quickFixTests } from './suites/quick-fix';
 import { sizeRailTests } from './suites/size-rail';
+import { waysTests } from './suites/ways';
 import { yieldTests } from './suites/yield';
 
 export async function run(): Promise<void> {
@@ -18,6 +19,7 @@ export async function run(): Promise<void> {
   includeTests();
   quickFixTests();
   sizeRailTests();
+  waysTests();
   yieldTests();
   await runTests();
 }
