@@ -124,7 +124,8 @@ export async function readIncludes(
     known.set(path, found);
     if (typeof found === 'string') open.push(...includePaths(found).map((inner) => joined(path!, inner)));
   }
-  return (path) => known.get(path);
+  const left: IncludeProblem = { problem: 'more than 100 files are included in all' };
+  return (path) => known.get(path) ?? (known.size >= 100 ? left : undefined);
 }
 
 /**

@@ -15,7 +15,8 @@ export interface PumpVerdict {
   readonly typical: number;
   /** The same over corners too. */
   weakest(): number;
-  /** Ripple at its worst, V. */
+  /** Ripple at typical values, the worst of all modes, V, and over corners too. */
+  readonly typicalRipple: number;
   ripple(): number;
   /** What its capacitors bear: a guess for the next one like it. */
   readonly bears: Bears;
@@ -47,6 +48,7 @@ export function pumpVerdict(parts: readonly PumpParts[], guess?: Bears): PumpVer
   const worst = down ? Math.max(...typical) : Math.min(...typical);
   return {
     typical: worst,
+    typicalRipple: Math.max(...modes.map((each) => each.at.point.ripple)),
     bears: new Map(at.point.capacitors.map(({ key, average }) => [key, Math.abs(average)])),
     weakest: () => {
       const { value } = corner(model, mode, at, 'voltage', down ? 1 : -1, 'quick');

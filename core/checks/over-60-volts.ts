@@ -9,6 +9,8 @@ import type { Finding } from './finding';
 
 /** Extra-low voltage, d.c., as common standards draw the line (from memory: confirm). */
 const cautionV = 60;
+/** Upper edge of the next class of IEC 62368-1 (from memory: confirm). */
+const benchV = 120;
 
 export const over60Volts: Check = {
   code: 'over-60-volts',
@@ -29,7 +31,7 @@ function judge(result: RailResult): readonly Finding[] {
       severity: 'warning',
       at: path,
       span: nameSpan,
-      message: `${worst.what} can reach ${formatQuantity(worst.volts, 'V')}, above 60 V d.c. Plan insulation, spacing, discharge and covers; the electrical safety rules of your place and people licensed to work under them decide what is allowed.`,
+      message: `${worst.what} can reach ${formatQuantity(worst.volts, 'V')}, above 60 V d.c.${worst.volts > benchV ? ' and beyond what belongs on an open bench' : ''}. Plan insulation, spacing, discharge and covers; the electrical safety rules of your place and people licensed to work under them decide what is allowed.`,
       expected: 'up to 60 V d.c. without further precautions',
       actual: formatQuantity(worst.volts, 'V'),
       source: 'usual limit of extra-low voltage; from memory: confirm',

@@ -74,7 +74,8 @@ function judge(
       stale: `it fits ${below.length} findings (${places.slice(0, 4).join(', ')}) and silences none of them: name one place`,
     };
   }
-  if (ofCode.length === 0) return { stale: `there is no \`${code.name}\` any more`, fix: 'delete' };
+  if (ofCode.length === 0)
+    return { stale: `there is no \`${code.name}\` any more, at ${at.name} or elsewhere`, fix: 'delete' };
   const near =
     closest(
       at.name,
@@ -84,7 +85,7 @@ function judge(
 }
 
 function isDate(text: string): boolean {
-  return /^\d{4}-\d{2}-\d{2}$/.test(text);
+  return /^\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/.test(text);
 }
 
 function isBelow(path: string, above: string): boolean {

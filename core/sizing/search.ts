@@ -19,12 +19,11 @@ import type { CapacitorKind } from '../catalog/part';
 import { runChecks } from '../checks';
 import type { Board, Capacitor, Rail } from '../model/board';
 import { readBoard } from '../model/build';
-import { preferredValues } from '../quantity/preferred';
-import { formatQuantity } from '../quantity/write';
 import { applyEdits, type TextEdit } from '../text/edit';
-import { type CapacitorPlan, type Design, type Frame, partCount, pumpedOf, totalCapacitance } from './design';
+import { type CapacitorPlan, type Design, type Frame, partCount, totalCapacitance } from './design';
 import { designEdits } from './edits';
 import { framesOf, type Target } from './frames';
+import { firstFrom, stepsInDecade, stockedValues } from './values';
 
 export interface Candidate {
   readonly design: Design;
@@ -55,13 +54,13 @@ export interface Found {
   readonly space: number;
 }
 
-const smallest = 1e-9;
-const largest = 470e-6;
 /** Frames that are looked into, and those of more parts than the fewest: other kinds of answers. */
 /** Steps of the series by which the flying capacitor may be larger than it must. */
 const mostLarger = 6;
+/** Designs of a frame that get the full look. */
+const mostLooks = 10;
 const mostFrames = 120;
-const mostBeyond = 8;
+const mostBeyond = 6;
 /** Ratings that capacitors are stocked in (common practice, no source), V. */
 const usualRatings = [6.3, 10, 16, 25, 35, 50, 63, 100];
 
@@ -149,20 +148,26 @@ class Search {
     const least = this.#leastReservoir();
     for (let flying = f; flying <= Math.min(last, f + mostLarger); flying++) {
       const best = Math.min(...pairs.map((pair) => pair.total));
-      if (total(flying, least) >= best) break;
+      // From one flying value to the next the reservoir falls by a step at most.
+      const before = pairs.at(-1)?.reservoir ?? least + 1;
+      if (total(flying, Math.max(least, before - 1)) >= best) break;
       const reservoir = firstFrom(
         Math.max(least, Math.min(last, flying + this.#decade())),
         last,
-        (index) =>
-          index >= least && this.#isQuiet(frame, flying, index) && this.#reaches(frame, flying, index),
+        (index) => index >= least && this.#isQuiet(frame, flying, index),
       );
-      if (reservoir !== undefined) pairs.push({ flying, reservoir, total: total(flying, reservoir) });
+      if (reservoir === undefined) continue;
+      pairs.push({ flying, reservoir, total: total(flying, reservoir) });
     }
-    for (const { flying, reservoir } of pairs.sort((x, y) => x.total - y.total)) {
+    // The full look may see a little more ripple or a little less voltage: then the next larger reservoir is next in line.
+    for (let looks = 0; looks < mostLooks && pairs.length > 0; looks++) {
+      pairs.sort((x, y) => y.total - x.total);
+      const { flying, reservoir } = pairs.pop()!;
       const found = this.#at(frame, flying, reservoir);
-      if (!found || !isMet(found.short)) continue;
-      const verified = this.#verify(found);
+      const verified = found && isMet(found.short) ? this.#verify(found) : undefined;
       if (verified) return verified;
+      if (found && found.short.strong === 0 && reservoir < last)
+        pairs.push({ flying, reservoir: reservoir + 1, total: total(flying, reservoir + 1) });
     }
     return undefined;
   }
@@ -177,8 +182,8 @@ class Search {
   #isQuiet(frame: Frame, f: number, r: number): boolean {
     const allowed = this.rail.needs?.ripple?.max;
     if (allowed === undefined) return true;
-    const ripple = this.#verdict(frame, f, r)?.ripple();
-    return ripple !== undefined && ripple <= allowed;
+    const verdict = this.#verdict(frame, f, r);
+    return verdict !== undefined && verdict.typicalRipple <= allowed && verdict.ripple() <= allowed;
   }
 
   /** The pump alone, on the rails as they are: what it does to them is for the full look at the end. */
@@ -231,7 +236,7 @@ class Search {
   }
 
   #decade(): number {
-    return Math.max(1, Math.round(this.values.length / Math.log10(largest / smallest)));
+    return stepsInDecade(this.values);
   }
 
   /** Without a need for ripple nothing says how small the reservoir may become: ten times 100 nF at least. */
@@ -322,62 +327,6 @@ function serious(analysis: BoardAnalysis) {
   return all.filter(({ severity }) => severity !== 'information');
 }
 
-function stockedValues({ stock }: Board): readonly number[] {
-  if (stock.capacitors && stock.capacitors.length > 0)
-    return [...new Set(stock.capacitors)].sort((a, b) => a - b);
-  const series = preferredValues[stock.series ?? 'E6'];
-  const all = Array.from({ length: 7 }, (_, decade) =>
-    series.map((value) => Number((value * 10 ** (decade - 9)).toPrecision(3))),
-  ).flat();
-  return all.filter((farads) => farads >= smallest * (1 - 1e-9) && farads <= largest * (1 + 1e-9));
-}
-
 function distance({ weak, strong, ripple }: Shortfall): number {
   return weak + strong + ripple;
-}
-
-/**
- * Index of the first value for which a test holds that stays true once it is, looked for from a guess outwards in
- * growing steps; undefined if it never is.
- */
-function firstFrom(guess: number, last: number, test: (index: number) => boolean): number | undefined {
-  let low = -1;
-  let high: number | undefined;
-  let at = Math.min(Math.max(guess, 0), last);
-  for (let step = 1; ; step *= 2) {
-    if (test(at)) {
-      high = at;
-      if (at === 0) return 0;
-      at = Math.max(0, at - step);
-      if (low >= 0) break;
-    } else {
-      low = Math.max(low, at);
-      if (high !== undefined) break;
-      if (at === last) return undefined;
-      at = Math.min(last, at + step);
-    }
-    if (high !== undefined && low >= 0) break;
-  }
-  let to = high!;
-  let from = Math.max(low, -1) + 1;
-  while (from < to) {
-    const middle = (from + to) >> 1;
-    if (test(middle)) to = middle;
-    else from = middle + 1;
-  }
-  return to;
-}
-
-/** Parts by their key, with how many of each. */
-export function billOf(design: Design): readonly { readonly count: number; readonly part: string }[] {
-  const { flying, reservoir, diode, drive } = design;
-  const list = new Map<string, number>();
-  const add = (part: string, count: number) => list.set(part, (list.get(part) ?? 0) + count);
-  const words = ({ farads, kind, rated }: CapacitorPlan) =>
-    `${formatQuantity(farads, 'F')} ${kind.key}${rated === undefined ? '' : ` ${formatQuantity(rated, 'V')}`}`;
-  add(words(flying), pumpedOf(design));
-  add(words(reservoir), 1);
-  add(diode.key, partCount(design) - pumpedOf(design) - 1 - drive.parts.length);
-  for (const part of drive.parts) add(part, 1);
-  return [...list].map(([part, count]) => ({ count, part }));
 }

@@ -9,9 +9,10 @@ import { volts } from '../analysis/words';
 import type { Rail } from '../model/board';
 import { formatPercent, formatQuantity } from '../quantity/write';
 import type { TextEdit } from '../text/edit';
+import { billOf } from './bill';
 import { type Design, partCount, totalCapacitance } from './design';
 import type { Target } from './frames';
-import { billOf, type Candidate, type Found, type Progress, search, type Verified } from './search';
+import { type Candidate, type Found, type Progress, search, type Verified } from './search';
 
 export interface SizeChoice {
   /** What it is best at: `fewest parts`, `lowest pin load`. */

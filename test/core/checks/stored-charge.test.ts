@@ -40,6 +40,19 @@ describe('stored-charge', () => {
     );
   });
 
+  it('notes energy that burns at any voltage', () => {
+    // E = C V^2 / 2 with 9.2 V: 1 F holds 42 J (any textbook).
+    checkRule(
+      'stored-charge',
+      `${bench}
+  up:
+# ^^ information stored-charge: a short circuit of its capacitors welds and burns
+    ${pump.replace('100 uF', '1 F')}
+    loads: { x: 2 mA }
+`,
+    );
+  });
+
   it('is silent in time, with a bleeder, and for little charge', () => {
     checkSilent(
       'stored-charge',

@@ -51,7 +51,7 @@ describe('exit codes and streams', () => {
   it('answers help and version on standard output', async () => {
     expect((await rail('--help')).out).toContain('rail-ledger check [FILE...]');
     expect((await rail('check --help')).code).toBe(0);
-    expect(await rail('--version')).toEqual({
+    expect(await rail('--version')).toMatchObject({
       code: 0,
       out: expect.stringMatching(/^Rail Ledger \d+\.\d+\.\d+\n$/),
       err: '',

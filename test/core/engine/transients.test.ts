@@ -16,6 +16,28 @@ function started(values: PumpValues, reach: number) {
 /** Nearly ideal diode: 1 mV per e-fold, so that its drop hardly counts. */
 const sharp = { saturation: 1e-9, slope: 1e-3, ohms: 1e-3 };
 
+it('switch-on starts every capacitor at nothing and tells how far each goes', () => {
+  // A capacitor behind a resistor on a steady 5 V: it climbs to 5 V and never goes below zero (exponential charging).
+  const network = {
+    segments: [{ duration: 1e-4 }],
+    nodeNames: ['out'],
+    knowns: [
+      { name: 'ground', volts: [0] },
+      { name: 'rail', volts: [5] },
+    ],
+    resistors: [{ name: 'r', a: ~1, b: 0, ohms: [1000] }],
+    capacitors: [{ name: 'c', a: 0, b: ~0, farads: 1e-6, ohms: 0 }],
+    diodes: [],
+    loads: [],
+  };
+  const start = startUp(network, { output: 0, final: 5, states: Float64Array.of(5), reach: 0.9 })!;
+  expect(start.capacitorLows[0]).toBe(0);
+  expect(start.capacitorHighs[0]).toBeGreaterThan(4.4);
+  expect(start.capacitorHighs[0]).toBeLessThanOrEqual(5 + 1e-6);
+  // R C ln 10 to 90 %, and the average over a period lags by half of it.
+  expect(Math.abs(start.time / (1e-3 * Math.log(10) + 0.5e-4) - 1)).toBeLessThan(0.012);
+});
+
 describe('switch-on', () => {
   it('takes a multiplier the cycles of its self-capacitance formula', () => {
     // T. Tanzawa, T. Tanaka, IEEE JSSC 32(8), 1997 (formula from memory): Rout (Cout + Cp) ln 10 from the state in

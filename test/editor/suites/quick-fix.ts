@@ -33,4 +33,18 @@ export function quickFixTests(): void {
     equal((await fixesAt(document.uri, new vscode.Range(0, 0, 0, 1))).length, 0, 'offers at the title');
     await closeEditor();
   });
+
+  test('a rail that misses its need is offered the ways to make it', async () => {
+    const { document } = await openFixture('rails.yaml');
+    const all = await vscode.commands.executeCommand<vscode.CodeAction[]>(
+      'vscode.executeCodeActionProvider',
+      document.uri,
+      rangeOf(document, '5.0..6.6 V'),
+      vscode.CodeActionKind.QuickFix.value,
+    );
+    const ways = all.find(({ command }) => command?.command === 'railLedger.waysToMake');
+    ok(ways, 'the action is offered');
+    equal(ways.command?.arguments?.[0], 'vlamp', 'for that rail');
+    await closeEditor();
+  });
 }
