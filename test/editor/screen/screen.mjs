@@ -11,6 +11,7 @@ import {
   lineWith,
   openBoard,
   paletteEntries,
+  placeOf,
   runCommand,
   setTheme,
   waitForSquiggles,
@@ -23,6 +24,7 @@ const themes = [
   { label: 'Light High Contrast', file: 'high-contrast-light' },
 ];
 const sizeTitle = 'Rail Ledger: Size this rail';
+const waysTitle = 'Rail Ledger: Ways to make this rail';
 
 /**
  * @param {{ program: string, profile: string, open: (file: string) => string, pictures: string,
@@ -81,6 +83,21 @@ export async function screenPass({ program, profile, open, pictures, check }) {
       await page
         .locator('.quick-input-list .monaco-list-row', { hasText: 'Write it into the file' })
         .waitFor();
+      await dismiss(page);
+    });
+
+    await see('the palette lists ways to make a rail, and the chosen one is written', async () => {
+      await openBoard(page, open('wanted.rails.yaml'));
+      const place = await placeOf(page, 'up: #');
+      await page.mouse.click(place.x + 4, place.y + place.height / 2);
+      await runCommand(page, waysTitle);
+      const way = page.locator('.quick-input-list .monaco-list-row', { hasText: 'doubler on v5' }).first();
+      await way.waitFor({ timeout: 60_000 });
+      await picture('ways');
+      await page.keyboard.press('Enter');
+      await lineWith(page, 'pump: {');
+      await picture('ways-written');
+      await page.keyboard.press('ControlOrMeta+z');
       await dismiss(page);
     });
 
