@@ -41,7 +41,7 @@ function unjudged(analysis: BoardAnalysis): readonly Finding[] {
   return [...analysis.rails.values()].flatMap(({ rail, ripple }) =>
     (['ripple', 'start', 'discharge'] as const).flatMap((key): Finding[] => {
       const need = rail.needs?.[key];
-      if (!need || rail.origin?.kind === 'pump' || (key === 'ripple' && ripple)) return [];
+      if (!need || !rail.origin || rail.origin.kind === 'pump' || (key === 'ripple' && ripple)) return [];
       return [
         {
           code: 'not-computed',
