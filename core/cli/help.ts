@@ -4,8 +4,8 @@ export const helpText = `Rail Ledger: voltage, ripple and pin budget of a board'
 Usage
   rail-ledger check [FILE...]
   rail-ledger size RAIL [FILE] [--write]
-  rail-ledger yield [FILE]
-  rail-ledger explain [CODE] [--samples N] [--seed S]
+  rail-ledger yield [FILE] [--samples N] [--seed S]
+  rail-ledger explain [CODE]
 
 check: checks board files and prints a ledger for each: rails, pins, supplies and
 findings, one finding on a line as
@@ -30,6 +30,7 @@ Options
                            object for one file, a list for several
   --color auto|always|never
   --stdin-filename NAME    name to show for standard input
+  --write                  put the first way of size into the file
   --samples N              boards that yield draws (1000)
   --seed S                 a whole number (1)
   --distribution uniform|triangular
@@ -39,8 +40,10 @@ Options
   --version, -V
 
 Exit code
-  0  no finding of severity error; yield: every sample met every need
-  1  at least one; yield: a sample missed a need, or could not be judged
+  0  no finding of severity error; size: a way was found; yield: every sample met
+     every need
+  1  at least one; size: none was found; yield: a sample missed a need, or could
+     not be judged
   2  wrong use, or a file that cannot be read
 
 Colour in auto: off when NO_COLOR is set, on when FORCE_COLOR is set, otherwise
