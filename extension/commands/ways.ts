@@ -3,8 +3,8 @@
  * chosen one is shown as a comparison or written as one change.
  */
 import * as vscode from 'vscode';
-import { applyEdits, type SizeChoice, type SizeResult } from '../../core/index';
-import type { Analyses } from '../analyses';
+import type { SizeChoice, SizeResult } from '../../core/index';
+import type { Analyses, Core } from '../analyses';
 import { toWorkspaceEdit } from '../convert';
 import { findDocument } from './find-document';
 import { inSlices } from './in-slices';
@@ -48,7 +48,7 @@ export function waysHandler(analyses: Analyses) {
     }
     const chosen =
       options.choice === undefined
-        ? await pickWay(document, analysis.text, result)
+        ? await pickWay(core, document, analysis.text, result)
         : result.choices[options.choice];
     if (chosen) await write(document, analysis.text, chosen);
     return result;
@@ -71,6 +71,7 @@ interface Item extends vscode.QuickPickItem {
 }
 
 function pickWay(
+  core: Core,
   document: vscode.TextDocument,
   text: string,
   { rail, choices }: SizeResult,
@@ -90,7 +91,7 @@ function pickWay(
     choice,
   }));
   return new Promise((resolve) => {
-    pick.onDidTriggerItemButton(({ item }) => void showComparison(document, text, rail, item.choice));
+    pick.onDidTriggerItemButton(({ item }) => void showComparison(core, document, text, rail, item.choice));
     pick.onDidAccept(() => {
       resolve(pick.activeItems[0]?.choice);
       pick.hide();
@@ -116,12 +117,13 @@ function figures({ voltage, ripple, efficiency, pins }: SizeChoice): string {
 }
 
 async function showComparison(
+  core: Core,
   document: vscode.TextDocument,
   text: string,
   rail: string,
   { edits }: SizeChoice,
 ): Promise<void> {
-  const content = applyEdits(text, edits);
+  const content = core.applyEdits(text, edits);
   const proposed = await vscode.workspace.openTextDocument({ language: document.languageId, content });
   await vscode.commands.executeCommand('vscode.diff', document.uri, proposed.uri, `${rail} as it would be`, {
     preview: true,

@@ -4,7 +4,7 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect, test } from 'vitest';
-import { projectRoot, readProjectFile } from '../support/project-files';
+import { projectRoot, readProjectFile, sourcesUnder } from '../support/project-files';
 
 const manifest = JSON.parse(readProjectFile('package.json'));
 const packed: readonly string[] = manifest.files;
@@ -29,6 +29,13 @@ test('every file that the manifest names is packed', () => {
 test("the core's bundle, which the desktop extension loads at the first board, is packed", () => {
   expect(readProjectFile('.tools/build.mjs')).toContain("coreFile: './core.js'");
   expect(isPacked('dist/core.js')).toBe(true);
+});
+
+test('the extension names the core by its types only, so that activation never loads it', () => {
+  const values = sourcesUnder('extension').flatMap(({ path, text }) =>
+    [...text.matchAll(/^import (?!type )[^;]*core\/index';/gm)].map(([line]) => `${path}: ${line}`),
+  );
+  expect(values).toEqual([]);
 });
 
 test('nothing of the workshop is packed', () => {
