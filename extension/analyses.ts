@@ -4,14 +4,13 @@
  */
 import type * as vscode from 'vscode';
 import type { Analysis, PumpMemory } from '../core/index';
-import { readIncluded } from './included';
+import { includedUri, readIncluded } from './included';
 import { describe, type Log } from './log';
 
 export type Core = typeof import('../core/index');
 
 interface Kept {
   readonly version: number;
-  readonly round: number;
   readonly analysis: Analysis;
 }
 
@@ -20,14 +19,16 @@ export class Analyses {
   private readonly kept = new WeakMap<vscode.TextDocument, Kept>();
   private readonly memories = new WeakMap<vscode.TextDocument, PumpMemory>();
 
-  /** Counts changes of files that boards may include. */
-  private round = 0;
+  /** Files that each board asked for. */
+  private readonly included = new WeakMap<vscode.TextDocument, ReadonlySet<string>>();
 
   constructor(private readonly log: Log) {}
 
-  /** A file beside a board has changed: what was computed may rest on its old text. */
-  forgetIncluded(): void {
-    this.round++;
+  /** True for a board that asked for that file; what was computed from its old text is forgotten. */
+  forgetIncluder(document: vscode.TextDocument, file: vscode.Uri): boolean {
+    const includes = this.included.get(document)?.has(file.toString()) === true;
+    if (includes) this.kept.delete(document);
+    return includes;
   }
 
   get coreLoaded(): boolean {
@@ -51,19 +52,23 @@ export class Analyses {
     try {
       const core = await this.loadCore();
       const kept = this.kept.get(document);
-      if (kept?.version === document.version && kept.round === this.round) return kept.analysis;
+      if (kept?.version === document.version) return kept.analysis;
       const start = performance.now();
       const { version } = document;
-      const { round } = this;
       const text = document.getText();
-      const include = await core.readIncludes(text, (path) => readIncluded(document, path));
+      const included = new Set<string>();
+      this.included.set(document, included);
+      const include = await core.readIncludes(text, (path) => {
+        included.add(includedUri(document, path).toString());
+        return readIncluded(document, path);
+      });
       const analysis = core.analyse(text, {
         file: fileName(document.uri),
         memory: this.memoryOf(document, core),
         include,
         today: new Date().toISOString().slice(0, 10),
       });
-      this.kept.set(document, { version, round, analysis });
+      this.kept.set(document, { version, analysis });
       this.log.debug(`${fileName(document.uri)}, version ${version}, computed in ${elapsed(start)}.`);
       return analysis;
     } catch (error) {

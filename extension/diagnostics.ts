@@ -50,11 +50,10 @@ export function registerDiagnostics(analyses: Analyses, pages: vscode.Uri): vsco
     for (const document of vscode.workspace.textDocuments) void judge(document);
   }
 
-  /** Other YAML files may be parts that boards include. */
-  function judgeIncluders(): void {
-    if (!analyses.coreLoaded) return;
-    analyses.forgetIncluded();
-    for (const document of vscode.workspace.textDocuments) judgeLater(document);
+  /** Other YAML files may be parts that boards include: those boards alone are computed again. */
+  function judgeIncluders(file: vscode.Uri): void {
+    for (const document of vscode.workspace.textDocuments)
+      if (analyses.forgetIncluder(document, file)) judgeLater(document);
   }
 
   const watcher = vscode.workspace.createFileSystemWatcher('**/*.{yaml,yml}');
@@ -69,7 +68,7 @@ export function registerDiagnostics(analyses: Analyses, pages: vscode.Uri): vsco
     vscode.workspace.onDidChangeTextDocument((event) => {
       // A change of the dirty flag alone arrives here too, with nothing changed.
       if (event.contentChanges.length === 0) return;
-      if (isPart(event.document)) judgeIncluders();
+      if (isPart(event.document)) judgeIncluders(event.document.uri);
       else judgeLater(event.document);
     }),
     vscode.workspace.onDidCloseTextDocument((document) => forget(document.uri)),

@@ -5,6 +5,11 @@
 import * as vscode from 'vscode';
 import type { IncludeProblem } from '../core/index';
 
+/** Where the file of an include stands. */
+export function includedUri(board: vscode.TextDocument, path: string): vscode.Uri {
+  return vscode.Uri.joinPath(board.uri, '..', path);
+}
+
 export async function readIncluded(
   board: vscode.TextDocument,
   path: string,
@@ -12,7 +17,7 @@ export async function readIncluded(
   if (board.isUntitled) return { problem: 'save this board first: the path is relative to its folder' };
   const folder = vscode.Uri.joinPath(board.uri, '..');
   const workspace = vscode.workspace.getWorkspaceFolder(board.uri)?.uri ?? folder;
-  const file = vscode.Uri.joinPath(folder, path);
+  const file = includedUri(board, path);
   const inside = file.path.startsWith(workspace.path.endsWith('/') ? workspace.path : `${workspace.path}/`);
   if (!inside) return { problem: 'it lies outside the workspace folder' };
   const open = vscode.workspace.textDocuments.find(({ uri }) => uri.toString() === file.toString());
